@@ -1,0 +1,17 @@
+using System.Globalization;
+
+namespace ProcessPlan.Core.Values;
+
+/// <summary>Working time in minutes, an estimate.</summary>
+/// <param name="Value">Minutes, zero or more.</param>
+public readonly record struct Minutes(double Value)
+{
+    public static Minutes operator +(Minutes left, Minutes right) => new(left.Value + right.Value);
+
+    public static Minutes operator *(Minutes minutes, double factor) => new(minutes.Value * factor);
+
+    /// <summary>Two decimals below ten minutes, one below a hundred, whole minutes above.</summary>
+    public string Format() => Value.ToString(Value < 10 ? "0.00" : Value < 100 ? "0.0" : "0", CultureInfo.InvariantCulture);
+
+    public override string ToString() => Format() + " min";
+}
