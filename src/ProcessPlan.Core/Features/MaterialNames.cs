@@ -1,0 +1,67 @@
+namespace ProcessPlan.Core.Features;
+
+/// <summary>The names under which the materials of a shop book may be called in a line. Case, spaces and hyphens do not matter.</summary>
+public sealed class MaterialNames
+{
+    private const int LongestName = 40;
+
+    private readonly Dictionary<string, string> _designations = new(StringComparer.OrdinalIgnoreCase);
+    private readonly Dictionary<string, string>.AlternateLookup<ReadOnlySpan<char>> _bySpan;
+
+    /// <param name="materials">The designation of each material and the other names it goes by.</param>
+    public MaterialNames(IEnumerable<(string Designation, IReadOnlyList<string> Aliases)> materials)
+    {
+        _bySpan = _designations.GetAlternateLookup<ReadOnlySpan<char>>();
+        foreach ((string designation, IReadOnlyList<string> aliases) in materials)
+        {
+            Add(designation, designation);
+            foreach (string alias in aliases)
+            {
+                Add(alias, designation);
+            }
+        }
+    }
+
+    public static MaterialNames None { get; } = new([]);
+
+    public IEnumerable<string> Designations => _designations.Values.Distinct();
+
+    public bool TryFind(ReadOnlySpan<char> name, out string designation)
+    {
+        designation = "";
+        if (name.Length is 0 or > LongestName)
+        {
+            return false;
+        }
+
+        Span<char> folded = stackalloc char[LongestName];
+        int length = Fold(name, folded);
+        return length > 0 && _bySpan.TryGetValue(folded[..length], out designation!);
+    }
+
+    private void Add(string name, string designation)
+    {
+        Span<char> folded = stackalloc char[LongestName];
+        if (name.Length > LongestName)
+        {
+            throw new ArgumentException($"The material name '{name}' is longer than {LongestName} characters.", nameof(name));
+        }
+
+        int length = Fold(name, folded);
+        _designations.TryAdd(folded[..length].ToString(), designation);
+    }
+
+    private static int Fold(ReadOnlySpan<char> name, Span<char> folded)
+    {
+        int length = 0;
+        foreach (char c in name)
+        {
+            if (c is not ' ' and not '-' and not '_')
+            {
+                folded[length++] = c;
+            }
+        }
+
+        return length;
+    }
+}

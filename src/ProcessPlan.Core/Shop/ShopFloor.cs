@@ -1,0 +1,85 @@
+using ProcessPlan.Core.Features;
+using ProcessPlan.Core.Standards;
+using ProcessPlan.Core.Values;
+
+namespace ProcessPlan.Core.Shop;
+
+/// <summary>All that one shop owns and charges, whole and unchangeable: what a plan is made from.</summary>
+public sealed class ShopFloor
+{
+    private readonly Dictionary<string, Material> _materials;
+    private readonly Dictionary<ToolUse, Tool[]> _tools = [];
+
+    public ShopFloor(string name, string currency, IReadOnlyList<Machine> machines, IEnumerable<Tool> tools, IReadOnlyList<Material> materials, IReadOnlyList<BarSeries> bars,
+        IReadOnlyList<Supplier> suppliers)
+    {
+        Name = name;
+        Currency = currency;
+        Machines = machines;
+        Materials = materials;
+        Bars = bars;
+        Suppliers = suppliers;
+        _materials = materials.ToDictionary(static material => material.Designation);
+        foreach (IGrouping<ToolUse, Tool> use in tools.GroupBy(static tool => tool.Use))
+        {
+            Tool[] sorted = [.. use.OrderBy(static tool => tool.Stamped).ThenBy(static tool => tool.Name, StringComparer.Ordinal)];
+            _tools[use.Key] = sorted;
+        }
+
+        Names = new MaterialNames(materials.Select(static material => (material.Designation, material.Aliases)));
+    }
+
+    public string Name { get; }
+
+    /// <summary>Three letters; all rates are in it.</summary>
+    public string Currency { get; }
+
+    public IReadOnlyList<Machine> Machines { get; }
+
+    public IReadOnlyList<Material> Materials { get; }
+
+    public IReadOnlyList<BarSeries> Bars { get; }
+
+    public IReadOnlyList<Supplier> Suppliers { get; }
+
+    /// <summary>The names under which a feature line may call the materials.</summary>
+    public MaterialNames Names { get; }
+
+    /// <exception cref="KeyNotFoundException">The shop has no such material.</exception>
+    public Material Material(string designation) => _materials[designation];
+
+    /// <summary>The tools for one use, by size.</summary>
+    public IReadOnlyList<Tool> Tools(ToolUse use) => _tools.TryGetValue(use, out Tool[]? tools) ? tools : [];
+
+    /// <summary>The smallest stocked bar whose smallest diameter is not below <paramref name="least"/>; null beyond the series.</summary>
+    public Bar? BarFor(Length least)
+    {
+        foreach (BarSeries series in Bars)
+        {
+            Length size = (least + new Deviation(series.Deviation.Picometres)).RoundUp(series.Step);
+            if (size <= series.Over)
+            {
+                size = (series.Over + new Deviation(1)).RoundUp(series.Step);
+            }
+
+            if (size <= series.UpTo)
+            {
+                return new Bar(size, new SizeWindow(size - series.Deviation, size + series.Deviation));
+            }
+        }
+
+        return null;
+    }
+}
+
+/// <summary>Stocked round bars of one range of sizes.</summary>
+/// <param name="Over">Sizes over this,</param>
+/// <param name="UpTo">up to and including this,</param>
+/// <param name="Step">in these steps,</param>
+/// <param name="Deviation">with this permissible deviation either way.</param>
+/// <param name="Origin">Where the figures come from.</param>
+public sealed record BarSeries(Length Over, Length UpTo, Length Step, Deviation Deviation, Citation Origin);
+
+/// <param name="Size">Nominal diameter.</param>
+/// <param name="Limits">Smallest and largest diameter as delivered.</param>
+public sealed record Bar(Length Size, SizeWindow Limits);
