@@ -146,10 +146,10 @@ public sealed class Candidate
     {
         Process process = candidate.Process;
         Deviation asked = job.Feature.Limits.Width;
-        bool roughEnough(Effort effort) => job.Feature.Finish is not { } finish || process.Ra(effort).RaPicometres <= finish.RaPicometres;
+        bool smoothEnough(Effort effort) => job.Ra is not { } asked || process.Ra(effort).Nanometres <= asked.Nanometres;
         foreach (Effort effort in (ReadOnlySpan<Effort>)[Effort.Routine, Effort.Special])
         {
-            if (candidate.HeldWidth(effort) <= asked && roughEnough(effort))
+            if (candidate.HeldWidth(effort) <= asked && smoothEnough(effort))
             {
                 return (effort, null);
             }

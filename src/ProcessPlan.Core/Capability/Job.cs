@@ -14,6 +14,9 @@ public sealed class Job
     /// <summary>Steel of this hardness is planned with the figures of quenched and tempered steel.</summary>
     private const double TemperedFromHrc = 27;
 
+    /// <summary>Hardness of a case whose hardness the line does not give.</summary>
+    private const double UsualCaseHrc = 60;
+
     private readonly List<string> _assumptions = [];
     private readonly List<string> _queries = [];
 
@@ -29,9 +32,11 @@ public sealed class Job
         End = feature.End ?? HoleEnd.Through;
         Assume(feature.End is null && feature.Kind == FeatureKind.Hole, "the hole goes through");
         Assume(feature.Finish is null, "no roughness is asked for");
-        Hrc = feature.Hardness is { } delivered ? HardnessConversion.ToHrc(delivered) : null;
+        Ra = feature.Finish is { } finish ? RoughnessPairs.ToRa(finish) : null;
+        Assume(feature.Finish is { IsRa: false }, $"{feature.Finish} is held as {Ra} µm. {RoughnessPairs.Remark}");
+        Hrc = feature.Hardness is { } delivered ? ToHrc(delivered) : null;
         Assume(feature.Hardness is null && Material.HbTo is not null, $"hardness as delivered {HbRange(Material)}");
-        HrcAfterTreatment = feature.Treatment?.Hardness is { } treated ? HardnessConversion.ToHrc(treated) : feature.Treatment is null ? null : HardFromHrc + 15;
+        HrcAfterTreatment = feature.Treatment?.Hardness is { } treated ? ToHrc(treated) ?? HardFromHrc : feature.Treatment is null ? null : UsualCaseHrc;
         if (feature.Coating is { Limits: null } coating)
         {
             _assumptions.Add($"the drawing's limits are meant after the coating {coating.Name}");
@@ -61,6 +66,9 @@ public sealed class Job
     public Length? BottomRoom { get; }
 
     public StartForm Start { get; }
+
+    /// <summary>The Ra to hold; null where no roughness is asked for.</summary>
+    public Roughness? Ra { get; }
 
     /// <summary>Hardness as delivered, where it is in the range of HRC.</summary>
     public double? Hrc { get; }
@@ -92,6 +100,8 @@ public sealed class Job
             return Feature.Asked(GeometryKind.Position) <= limit || Feature.Asked(GeometryKind.Coaxiality) <= limit;
         }
     }
+
+    private static double? ToHrc(Hardness hardness) => HardnessConversion.Convert(hardness, HardnessScale.HRC)?.Points;
 
     private static string HbRange(Material material) => material.HbFrom is { } from ? $"{from:0} to {material.HbTo:0} HB" : $"up to {material.HbTo:0} HB";
 

@@ -114,7 +114,7 @@ public readonly record struct CutTime(double Minutes, double Speed, double Feed,
     {
         double perSide = (cut.Stock?.ToMillimetres() ?? 0) / 2;
         bool rough = cut.Process.StartsRough;
-        double feedForRa = Math.Sqrt(32 * cut.Ra.RaMicrometres / RealRoughness * nose / 1000);
+        double feedForRa = Math.Sqrt(32 * cut.Ra.ToMicrometres() / RealRoughness * nose / 1000);
         double feed = Math.Min(feedForRa, roughFeed);
         int passes = Math.Max(1, (int)Math.Ceiling(perSide / (rough ? roughDepth : MediumDepth) - 1e-9));
         double speed = rough ? cut.Data.TurnRough : cut.Data.TurnFinish;
