@@ -1,0 +1,256 @@
+using System.Globalization;
+using ProcessPlan.Core.Capability;
+using ProcessPlan.Core.Costing;
+using ProcessPlan.Core.Features;
+using ProcessPlan.Core.Inspection;
+using ProcessPlan.Core.Shop;
+using ProcessPlan.Core.Standards;
+using ProcessPlan.Core.Tooling;
+using ProcessPlan.Core.Values;
+
+namespace ProcessPlan.Core.Routing;
+
+/// <summary>Turns a chain of the search into the operations of a route, each number with its origin.</summary>
+internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
+{
+    private int _number;
+
+    public Route Write(Step first, int rank)
+    {
+        _number = 0;
+        List<Operation> operations = [];
+        double yield = 1;
+        Step? before = null;
+        bool hard = false;
+        for (Step? step = first; step is not null; before = step, step = step.Next)
+        {
+            yield *= step.Yield;
+            operations.Add(Write(step, before, hard, first.Start!));
+            foreach (Change change in step.ChangesAfter)
+            {
+                operations.Add(Write(change, step));
+                hard |= change.Hardens;
+            }
+        }
+
+        Money cost = Sum(operations);
+        return new Route(rank, operations, cost, new Minutes(operations.Sum(static operation => operation.Minutes.Value)),
+            new Minutes(operations.Sum(static operation => operation.SetUp.Value)), yield, (int)Math.Ceiling(job.Quantity / yield - 1e-9), first.Start!.Name);
+    }
+
+    private Money Sum(List<Operation> operations)
+    {
+        decimal sum = 0;
+        foreach (Operation operation in operations)
+        {
+            sum += operation.Cost.Amount;
+        }
+
+        return new Money(sum, shop.Currency);
+    }
+
+    private Money Price(double amount) => new((decimal)amount, shop.Currency);
+
+    private Operation Write(Step step, Step? before, bool hard, Blank blank)
+    {
+        Process process = step.Candidate.Process;
+        SizeWindow size = step.Leaving.Sizes(job.IsInternal);
+        SizeWindow? drawing = step.IsLast && step.ChangesAfter.Count == 0 ? job.Feature.Limits : null;
+        SizeWindow held = drawing ?? size;
+        ToleranceGrade? grade = Iso286.NearestGrade(held.Max, held.Width);
+        (Stock? least, Stock? most) = step.Entering is { } from
+            ? (new Stock(from.Least - step.Leaving.Most), new Stock(from.Most - step.Leaving.Least))
+            : ((Stock?)null, (Stock?)null);
+        Length aim = held.Middle;
+        (Instrument instrument, bool good) = Instrument.For(job.IsInternal, held.Max, held.Width);
+        Roughness ra = step.IsLast ? job.Ra ?? process.Ra(step.Effort) : process.LeftRa;
+        return new Operation
+        {
+            Number = _number += 10,
+            Process = process.Name,
+            Machine = step.Machine.Name,
+            Condition = hard ? Condition.Hard : Condition.Soft,
+            Effort = step.Effort,
+            Tool = step.Tool,
+            Size = held,
+            Aim = aim,
+            Grade = grade,
+            Ra = ra,
+            StockMin = least,
+            StockMax = most,
+            Minutes = new Minutes(step.Own.Minutes),
+            SetUp = new Minutes(step.Own.SetUp),
+            Cost = Price(step.Own.PerGoodPiece),
+            Inspection = Inspect(step, instrument, good, held),
+            Because = Because(step),
+            Cautions = Cautions(step, instrument, good, held),
+            Why = [.. Why(step, before, blank, held, aim, instrument)],
+        };
+    }
+
+    private Operation Write(Change change, Step step)
+    {
+        Supplier? supplier = change.Supplier;
+        decimal share = supplier is null ? 0 : supplier.ChargeFor(job.Quantity) / job.Quantity;
+        string days = supplier is null ? "price and days to be asked" : $"{supplier.Days} days away";
+        SizeWindow after = new MetalWindow(step.Leaving.Least + change.LeastGrowth.Picometres, step.Leaving.Most + change.MostGrowth.Picometres).Sizes(job.IsInternal);
+        return new Operation
+        {
+            Number = _number += 10,
+            Process = change.Process,
+            Machine = "outside",
+            Condition = change.Covers ? Condition.Coated : Condition.Hard,
+            Size = step.IsLast && change == step.ChangesAfter[^1] && job.Feature.Coating is not { Limits: CoatingLimits.Before } ? job.Feature.Limits : after,
+            Minutes = default,
+            SetUp = default,
+            Cost = new Money(share, shop.Currency),
+            Inspection = change.Hardens ? "hardness by the treater's certificate; size and run-out on return" : "thickness by the coater's certificate; size on return",
+            Because = [$"{change.Detail}; {days}"],
+            Cautions = ChangeCautions(change),
+            Why =
+            [
+                new Reason("size", $"the size moves by {change.LeastGrowth} to {change.MostGrowth} on {Across} [{change.Origin}]"),
+                new Reason("cost", supplier is null
+                    ? "this shop knows no supplier: not in the price"
+                    : $"the larger of the lot charge {supplier.LotCharge} and {job.Quantity} · {supplier.PiecePrice}, over {job.Quantity} pieces"),
+            ],
+        };
+    }
+
+    private string Across => job.Feature.IsRound ? "diameter" : "width";
+
+    private static List<string> ChangeCautions(Change change) => change.Covers
+        ? ["Plating of high-strength steel: embrittlement relief as the plating specification requires.", "Only by a qualified shop, to the specification on the drawing."]
+        : ["Heat treatment only by a qualified shop, to the specification on the drawing. Ask it for the size change to expect."];
+
+    private static string Inspect(Step step, Instrument instrument, bool good, SizeWindow held)
+    {
+        string how = step.Effort == Effort.Special ? "every piece" : "first piece, then 1 in 5";
+        string ratio = instrument.RatioTo(held.Width).ToString("0.#", CultureInfo.InvariantCulture);
+        string verdict = good ? "" : $", NOT GOOD ENOUGH (needs 1 : {Instrument.LeastRatio})";
+        return $"{instrument.Name}, U {instrument.Uncertainty.Format()} µm = 1 : {ratio} of the tolerance{verdict}; {how}";
+    }
+
+    private List<string> Because(Step step)
+    {
+        Candidate candidate = step.Candidate;
+        List<string> because = [];
+        if (step.IsLast)
+        {
+            string effort = step.Effort == Effort.Routine ? "with routine effort" : "with special effort";
+            ToleranceGrade grade = Iso286.NearestGrade(job.Nominal, candidate.HeldWidth(step.Effort)) ?? candidate.Process.Grade(step.Effort);
+            string lost = candidate.GradesLost > 0 ? $" ({candidate.LossReason}: {candidate.GradesLost} grade worse)" : "";
+            because.Add($"holds {grade} {effort}{lost}, leaves {candidate.Process.Ra(step.Effort)}");
+        }
+        else
+        {
+            because.Add($"leaves the next operation {(step.Next!.Entering is { } from ? $"{new Stock(from.Least - step.Next.Leaving.Most)} to {new Stock(from.Most - step.Next.Leaving.Least)}" : "its stock")} on {Across}");
+        }
+
+        if (job.AsksForPosition && !candidate.Process.Follows)
+        {
+            because.Add("puts the axis right; drills and reamers only follow");
+        }
+
+        return because;
+    }
+
+    private static List<string> Cautions(Step step, Instrument instrument, bool good, SizeWindow held)
+    {
+        List<string> cautions = [];
+        if (step.Candidate.Process.Ability == "ream")
+        {
+            cautions.Add("Never turn a reamer backwards. Make a trial hole with a reamer that is new to this material.");
+        }
+
+        if (step.Candidate.Process.Ability.StartsWith("grind", StringComparison.Ordinal))
+        {
+            cautions.Add("Guard, wheel rating and ring test; coolant on. Look for burn and cracks on hardened steel.");
+        }
+
+        if (!good)
+        {
+            cautions.Add($"No instrument of this shop is good enough for {held.Width.Format()} µm: the {instrument.Name} is the nearest.");
+        }
+
+        if (step.Effort == Effort.Special)
+        {
+            cautions.Add("Special effort: slow cut, careful set-up, every piece checked.");
+        }
+
+        return cautions;
+    }
+
+    private IEnumerable<Reason> Why(Step step, Step? before, Blank blank, SizeWindow held, Length aim, Instrument instrument)
+    {
+        Process process = step.Candidate.Process;
+        yield return new Reason("size", SizeOrigin(step, held));
+        yield return new Reason("aim", $"middle of {held.Min.Format(3)} and {held.Max.Format(3)} = {aim}");
+        if (step.Tool is { } tool)
+        {
+            yield return new Reason("tool", ToolOrigin(step, tool));
+        }
+
+        if (step.Entering is { } from)
+        {
+            string source = before is null ? blank.Name : before.Process();
+            SizeWindow entering = from.Sizes(job.IsInternal);
+            yield return new Reason("stock", job.IsInternal
+                ? $"after {source}: least {held.Min.Format(3)} - {entering.Max.Format(3)}, most {held.Max.Format(3)} - {entering.Min.Format(3)}"
+                : $"after {source}: least {entering.Min.Format(3)} - {held.Max.Format(3)}, most {entering.Max.Format(3)} - {held.Min.Format(3)}");
+            StockNeed? need = before is null ? step.NeedFromBlank : before.NeedOfNext;
+            if (need is { } known)
+            {
+                foreach (string line in known.Explain())
+                {
+                    yield return new Reason("stock", line);
+                }
+            }
+
+            yield return new Reason("stock", $"{process.Name} takes at most {process.MostStockAt(held.Max)} here [{process.Origin}]");
+        }
+
+        yield return new Reason("grade", $"{process.Name}: routine {process.RoutineGrade}, special {process.SpecialGrade?.ToString() ?? "none"}; leaves {process.LeftRa} on the way [{process.Origin}]");
+        Cut cut = search.CutOf(step, step.Entering);
+        yield return new Reason("minutes", $"cut: {step.Own.Cutting.Explain(cut)} [{cut.Data.Origin}]");
+        yield return new Reason("minutes", string.Create(CultureInfo.InvariantCulture,
+            $"sum: cut {step.Own.Cutting.Minutes:0.00} + tool change {step.Machine.ToolChangeMinutes:0.00} + checking {step.Own.Checking:0.00} + handling {step.Own.Handling:0.00} = {step.Own.Minutes:0.00} min"));
+        yield return new Reason("cost", string.Create(CultureInfo.InvariantCulture,
+            $"{step.Own.Minutes:0.00} min · {step.Machine.RatePerHour:0.##}/60 / yield to the end {step.YieldToEnd:0.0000} + set-up {step.Own.SetUp:0} min · {step.Machine.RatePerHour:0.##}/60 / {job.Quantity} = {step.Own.PerGoodPiece:0.00}"));
+        yield return new Reason("inspection", $"{instrument.Name}: U {instrument.Uncertainty.Format()} µm against {held.Width.Format()} µm [{instrument.Origin}]");
+    }
+
+    private string SizeOrigin(Step step, SizeWindow held)
+    {
+        if (step.IsLast)
+        {
+            return job.Feature.Class is { } toleranceClass && step.ChangesAfter.Count == 0
+                ? $"the drawing's limits, {toleranceClass} [{Iso286.Cite(job.Nominal, toleranceClass.Grade)}; {Iso286.Cite(job.Nominal, toleranceClass)}]"
+                : step.ChangesAfter.Count == 0 ? "the drawing's limits" : "the drawing's limits, less what comes after at its extremes";
+        }
+
+        if (step.Tool is { } tool)
+        {
+            SizedCut cut = SizedCut.Predict(tool, job.Group, careful: step.Candidate.Process.EnterGrade <= ToleranceGrade.It(9));
+            return $"what {tool.Label} is predicted to cut: {cut.Over.Least} to {cut.Over.Most} over its size [{cut.Origin}]";
+        }
+
+        return $"the next operation's limit and least stock, then the tolerance {step.Candidate.LeftGrade} = {held.Width.Format()} µm into the metal [{Iso286.Cite(held.Max, step.Candidate.LeftGrade)}]";
+    }
+
+    private static string ToolOrigin(Step step, Tool tool)
+    {
+        if (tool.Use == ToolUse.Ream && step.IsLast)
+        {
+            ReamerChoice.Suits(tool, step.Leaving.Sizes(isInternal: true), out string because);
+            return $"{tool.Label}: {because} [{Din1420.Citation}]";
+        }
+
+        return $"{tool.Label}: the size of the shop's drawer that leaves the next operation its stock at the least cost";
+    }
+}
+
+file static class StepWords
+{
+    public static string Process(this Step step) => step.Candidate.Process.Name;
+}
