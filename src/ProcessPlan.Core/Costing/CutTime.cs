@@ -41,6 +41,12 @@ public readonly record struct CutTime(double Minutes, double Speed, double Feed,
     /// <summary>Real over ideal roughness at finishing speeds in ductile metal (Groover; from memory).</summary>
     private const double RealRoughness = 1.25;
 
+    /// <summary>A bar overhangs and chatters: boring at this share of the turning speed (common practice, no source).</summary>
+    private const double BoringSpeed = 0.6;
+
+    /// <summary>Bores of this grade and finer get a spring pass (common practice, no source).</summary>
+    private static readonly ToleranceGrade SpringPassTo = ToleranceGrade.It(8);
+
     private const double TurningNose = 0.8;
     private const double BoringNose = 0.4;
 
@@ -57,7 +63,7 @@ public readonly record struct CutTime(double Minutes, double Speed, double Feed,
             "drill" => Drilling(cut),
             "ream" => Reaming(cut),
             "turn" or "diamond" => Turning(cut, RoughTurningDepth, RoughTurningFeed, TurningNose),
-            "bore" => Turning(cut, RoughBoringDepth, RoughBoringFeed, BoringNose),
+            "bore" or "fine-bore" => Turning(cut, RoughBoringDepth, RoughBoringFeed, BoringNose),
             "mill" => Milling(cut),
             "grind-round" or "centreless" => Grinding(cut, wheelWidth: 40),
             "grind-hole" => Grinding(cut, wheelWidth: 20),
@@ -116,8 +122,9 @@ public readonly record struct CutTime(double Minutes, double Speed, double Feed,
         bool rough = cut.Process.StartsRough;
         double feedForRa = Math.Sqrt(32 * cut.Ra.ToMicrometres() / RealRoughness * nose / 1000);
         double feed = Math.Min(feedForRa, roughFeed);
-        int passes = Math.Max(1, (int)Math.Ceiling(perSide / (rough ? roughDepth : MediumDepth) - 1e-9));
-        double speed = rough ? cut.Data.TurnRough : cut.Data.TurnFinish;
+        bool boring = nose == BoringNose;
+        int passes = Math.Max(1, (int)Math.Ceiling(perSide / (rough ? roughDepth : MediumDepth) - 1e-9)) + (boring && cut.Process.RoutineGrade <= SpringPassTo ? 1 : 0);
+        double speed = (rough ? cut.Data.TurnRough : cut.Data.TurnFinish) * (boring ? BoringSpeed : 1);
         return Revolving(cut.Diameter.ToMillimetres(), speed, feed, passes, cut.Extent.ToMillimetres() + 2 * Overrun);
     }
 

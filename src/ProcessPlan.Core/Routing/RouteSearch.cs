@@ -1,7 +1,6 @@
 using ProcessPlan.Core.Capability;
 using ProcessPlan.Core.Costing;
 using ProcessPlan.Core.Features;
-using ProcessPlan.Core.Inspection;
 using ProcessPlan.Core.Shop;
 using ProcessPlan.Core.Standards;
 using ProcessPlan.Core.Tooling;
@@ -11,19 +10,26 @@ namespace ProcessPlan.Core.Routing;
 
 /// <summary>
 /// Finds the cheapest chains of operations by going back from the drawing: each operation asks for a window of entering sizes, and only operations
-/// that can leave sizes inside it may stand before. Best first: costs only grow on the way back, so the first chain that reaches the blank is the
-/// cheapest, the next one with other operations the second, and so on. Same input, same routes.
+/// that can leave sizes inside it may stand before. Best first, by the cost that is settled and a bound from below for the rest, so the first chain
+/// that reaches the blank is the cheapest, the next one with other operations the second, and so on. Same input, same routes.
 /// </summary>
 internal sealed class RouteSearch
 {
-    /// <summary>The largest hole drilled in solid metal with one drill; larger ones need a pilot.</summary>
-    public static readonly Length LargestSingleDrill = Length.FromMillimetres(26);
+    /// <summary>The largest hole drilled in solid metal with one drill; larger ones need a pilot (after the sizes of handbook table A1; from memory).</summary>
+    private static readonly Length LargestSingleDrill = Length.FromMillimetres(26);
 
-    /// <summary>Above this size a reamer is not asked to go from a drilled hole to IT7 in one pass.</summary>
+    /// <summary>Above this size a reamer is not asked to go from a drilled hole to IT7 in one pass (common practice, no source).</summary>
     private static readonly Length LargestReamAfterDrill = Length.FromMillimetres(12);
 
+    /// <summary>A cut that the machinist sets gains at most this many grades (textbook rule: roughing 2 to 4, finishing 1 to 2; from memory).</summary>
+    private const int MostGradesGained = 4;
+
+    /// <summary>Pilot over drill, in the middle of the handbook's pairs 15 for 28 to 25 for 48.</summary>
     private const double PilotShare = 0.55;
-    private const double RoutineChecks = 0.2;
+
+    /// <summary>Permissible deviation of a cast size (ISO 8062-3, DCTG 10, 25 to 63 mm: 2.8 mm in all; from memory).</summary>
+    private static readonly Deviation CastTolerance = Deviation.FromMicrometres(1400);
+
     private static readonly Length Micrometre = new(Length.PicometresPerMicrometre);
     private static readonly Length Hundredth = Length.FromMicrometres(10);
 
@@ -32,6 +38,7 @@ internal sealed class RouteSearch
     private readonly IReadOnlyList<Candidate> _candidates;
     private readonly List<Change> _changes;
     private readonly CuttingData _data;
+    private readonly CostBound _bound;
     private readonly PriorityQueue<Step, (double Cost, int Order)> _open = new();
     private int _order;
 
@@ -42,6 +49,7 @@ internal sealed class RouteSearch
         _candidates = candidates;
         _changes = Change.For(job, shop);
         _data = CuttingData.For(job.Group);
+        _bound = new CostBound(job, candidates, (before, after) => MayPrecede(before, after.Process, null, after.LeftGrade, isLast: false));
     }
 
     /// <summary>Steps whose ways back were looked through; pinned in tests.</summary>
@@ -53,7 +61,7 @@ internal sealed class RouteSearch
     /// <summary>The change whose window closed against the drawing itself.</summary>
     public Change? ClosedChange { get; private set; }
 
-    /// <summary>The cheapest chain and the next ones that differ in their operations.</summary>
+    /// <summary>The cheapest chain and the next ones that differ in their operations; each begins with its blank.</summary>
     /// <param name="most">How many; fewer where there are no more.</param>
     public List<Step> Find(int most)
     {
@@ -62,7 +70,7 @@ internal sealed class RouteSearch
         HashSet<string> known = [];
         while (found.Count < most && _open.TryDequeue(out Step? step, out _))
         {
-            if (step.Start is not null)
+            if (step.IsBlank)
             {
                 if (known.Add(step.Sequence()))
                 {
@@ -80,7 +88,19 @@ internal sealed class RouteSearch
         return found;
     }
 
-    private void Push(Step step) => _open.Enqueue(step, (step.Cost, _order++));
+    public StepCost CostOf(Step step, MetalWindow? entering, bool arrives) => StepCost.Of(step, entering, arrives, _job, _data);
+
+    /// <summary>The least stock of a step after another one, or after the blank.</summary>
+    public StockNeed NeedOf(Step step, Step before) => before.IsBlank
+        ? Need(step, before.BlankName!.StartsWith("bar", StringComparison.Ordinal) ? "bar" : "casting", before.Leaving!.Value.Most, new Deviation(before.Leaving.Value.Width), false, false)
+        : Need(step, before.Process.Name, step.Window.Most, LeftTolerance(before.Candidate!, step, before.Tool is null ? null : before.Leaving),
+            before.ChangesAfter.Length == 0 && before.Machine == step.Machine, Array.Exists(before.ChangesAfter, static change => change.Hardens));
+
+    private void Push(Step step)
+    {
+        double rest = step.IsBlank ? 0 : _bound.Of(step);
+        _open.Enqueue(step, (step.Settled + rest, _order++));
+    }
 
     /// <summary>Operations that can finish the feature; changes that come after the last cut have moved the window already.</summary>
     private void OpenLastSteps()
@@ -89,9 +109,9 @@ internal sealed class RouteSearch
         Change[] after = [];
         for (int left = _changes.Count; left >= 0; left--)
         {
+            bool coated = left > 0 && _changes[left - 1].Covers;
             foreach (Candidate candidate in _candidates)
             {
-                bool coated = left > 0 && _changes[left - 1].Covers;
                 if (candidate.NoAtAll is null && !coated && Cuts(candidate, left))
                 {
                     Finish(candidate, window, left, after);
@@ -114,42 +134,43 @@ internal sealed class RouteSearch
 
     private void Finish(Candidate candidate, MetalWindow window, int changesLeft, Change[] after)
     {
-        Deviation width = new(window.Width);
-        Effort? effort = candidate.Finishes;
-        if (effort is not { } least)
+        if (candidate.Finishes is not { } least)
         {
             return;
         }
 
-        if (candidate.HeldWidth(least) > width)
+        // A change after the last cut eats tolerance, and a tool of fixed size can be worth more care than its grade asks for.
+        foreach (Effort effort in (ReadOnlySpan<Effort>)[Effort.Routine, Effort.Special])
         {
-            // The change after it has eaten tolerance: only more effort can hold what is left.
-            if (candidate.HeldWidth(Effort.Special) > width)
+            bool worthIt = effort == least || candidate.Process.SizedBy == ToolUse.Ream || candidate.HeldWidth(least).Picometres > window.Width;
+            if (effort < least || !worthIt || candidate.HeldWidth(effort).Picometres > window.Width)
             {
-                return;
+                continue;
             }
 
-            least = Effort.Special;
-        }
-
-        foreach (Machine machine in candidate.Machines)
-        {
-            foreach (Tool? tool in LastTools(candidate, window, least))
+            foreach (Tool? tool in LastTools(candidate, window, effort))
             {
-                Push(new Step
+                double yield = Yield(candidate, tool, effort, window);
+                foreach (Machine machine in candidate.Machines)
                 {
-                    Candidate = candidate,
-                    Machine = machine,
-                    Tool = tool,
-                    Effort = least,
-                    Leaving = window,
-                    IsLast = true,
-                    ChangesLeft = changesLeft,
-                    ChangesAfter = after,
-                    Yield = Yield(candidate, tool, least, window),
-                    Places = !candidate.Process.Follows,
-                    Cost = ChangeCost(after),
-                }.Chained(null));
+                    if (tool is null || tool.Stamped <= machine.Largest)
+                    {
+                        Push(new Step
+                        {
+                            Candidate = candidate,
+                            Machine = machine,
+                            Tool = tool,
+                            Effort = effort,
+                            Leaving = window,
+                            ChangesLeft = changesLeft,
+                            ChangesAfter = after,
+                            Yield = yield,
+                            YieldToEnd = yield,
+                            Places = !candidate.Process.Follows,
+                            Settled = ChangeCost(after),
+                        });
+                    }
+                }
             }
         }
     }
@@ -165,35 +186,33 @@ internal sealed class RouteSearch
         return cost;
     }
 
-    private IEnumerable<Tool?> LastTools(Candidate candidate, MetalWindow window, Effort effort)
+    private List<Tool?> LastTools(Candidate candidate, MetalWindow window, Effort effort)
     {
         if (candidate.Process.SizedBy is not { } use)
         {
-            yield return null;
-            yield break;
+            return [null];
         }
 
         SizeWindow sizes = window.Sizes(_job.IsInternal);
         if (use == ToolUse.Ream)
         {
-            if (ReamerChoice.Best(_shop.Tools(use), sizes, _job.Feature.Class) is { } reamer)
-            {
-                yield return reamer;
-            }
-
-            yield break;
+            return ReamerChoice.Best(_shop.ToolsNear(use, sizes), sizes, _job.Feature.Class) is { } reamer ? [reamer] : [];
         }
 
-        foreach (Tool tool in _shop.Tools(use))
+        List<Tool?> fitting = [];
+        foreach (Tool tool in _shop.ToolsNear(use, sizes))
         {
             if (sizes.Contains(SizedCut.Predict(tool, _job.Group, IsCareful(candidate, effort)).Sizes))
             {
-                yield return tool;
+                fitting.Add(tool);
             }
         }
+
+        return fitting;
     }
 
-    private static bool IsCareful(Candidate candidate, Effort effort) => effort == Effort.Special || candidate.Process.EnterGrade <= ToleranceGrade.It(9);
+    /// <summary>Special effort, or a light finishing cut, keeps the oversize of a reamer small.</summary>
+    public static bool IsCareful(Candidate candidate, Effort effort) => effort == Effort.Special || candidate.Process.EnterGrade <= ToleranceGrade.It(9);
 
     private bool Cuts(Candidate candidate, int changesBefore)
     {
@@ -224,7 +243,7 @@ internal sealed class RouteSearch
     /// <summary>Tries to begin the route with this step.</summary>
     private void Start(Step step)
     {
-        if (step.ChangesLeft > 0 || !step.Candidate.Process.StartsRough || (_job.AsksForPosition && !step.Places))
+        if (step.ChangesLeft > 0 || !step.Process.StartsRough || (_job.AsksForPosition && !step.Places))
         {
             return;
         }
@@ -232,17 +251,14 @@ internal sealed class RouteSearch
         switch (_job.Start.Kind)
         {
             case StartKind.Solid when _job.IsInternal:
-                if (step.Candidate.Process.SizedBy == ToolUse.Drill ? step.Tool!.Stamped <= LargestSingleDrill : _job.Kind == FeatureKind.Slot)
+                if (step.Process.SizedBy == ToolUse.Drill ? step.Tool!.Stamped <= LargestSingleDrill : _job.Kind == FeatureKind.Slot)
                 {
-                    Push(Settled(step, null, new Blank("solid metal", null)));
+                    PushBlank(step, null, "solid metal");
                 }
 
                 break;
-            case StartKind.Cast or StartKind.Cored when _job.IsInternal && _job.Start.Size is { } cored:
-                StartFromSize(step, cored, CastTolerance, "casting", $"{(_job.Start.Kind == StartKind.Cast ? "cast" : "cored")} {cored}");
-                break;
-            case StartKind.Cast when _job.Start.Size is { } cast:
-                StartFromSize(step, cast, CastTolerance, "casting", $"cast {cast}");
+            case StartKind.Cast or StartKind.Cored when _job.Start.Size is { } cast:
+                StartFromSize(step, cast, CastTolerance, "casting", $"{(_job.Start.Kind == StartKind.Cast ? "cast" : "cored")} {cast}");
                 break;
             default:
                 StartFromBar(step);
@@ -250,21 +266,18 @@ internal sealed class RouteSearch
         }
     }
 
-    /// <summary>Permissible deviation of a cast size (ISO 8062-3, DCTG 10, 25 to 63 mm: 2.8 mm in all; from memory).</summary>
-    public static readonly Deviation CastTolerance = Deviation.FromMicrometres(1400);
-
     private void StartFromSize(Step step, Length size, Deviation tolerance, string surface, string name)
     {
-        SizeWindow limits = new(size - tolerance, size + tolerance);
-        MetalWindow blank = MetalWindow.Of(limits, _job.IsInternal);
+        MetalWindow blank = MetalWindow.Of(new SizeWindow(size - tolerance, size + tolerance), _job.IsInternal);
         StockNeed need = Need(step, surface, blank.Most, new Deviation(blank.Width), sameClamping: false, afterHeat: false);
-        if (Entering(step, need, []).Holds(blank))
+        MetalWindow entering = Entering(step, need.Least, []);
+        if (entering.Holds(blank))
         {
-            Push(Settled(step, blank, new Blank(name, limits), need));
+            PushBlank(step, blank, name);
         }
         else
         {
-            Miss(step, name, Math.Max(Entering(step, need, []).Least - blank.Least, blank.Most - Entering(step, need, []).Most));
+            Miss(step, name, Math.Max(entering.Least - blank.Least, blank.Most - entering.Most));
         }
     }
 
@@ -272,46 +285,55 @@ internal sealed class RouteSearch
     {
         if (_job.Start.Size is { } typed)
         {
-            Deviation tolerance = _shop.Bars.FirstOrDefault(series => series.Over < typed && typed <= series.UpTo)?.Deviation ?? _shop.Bars[^1].Deviation;
-            StartFromSize(step, typed, tolerance, "bar", $"bar {typed}");
+            BarSeries series = _shop.Bars.FirstOrDefault(series => series.Over < typed && typed <= series.UpTo) ?? _shop.Bars[^1];
+            StartFromSize(step, typed, series.Deviation, "bar", $"bar {typed}");
             return;
         }
 
-        StockNeed need = Need(step, "bar", step.Leaving.Most, default, sameClamping: false, afterHeat: false);
-        if (_shop.BarFor(MetalWindow.Size(step.Leaving.Most + need.Least.Picometres)) is { } bar)
+        // The surface of a larger bar can ask for more stock, and so for a still larger bar.
+        Stock need = Need(step, "bar", step.Window.Most, default, sameClamping: false, afterHeat: false).Least;
+        while (_shop.BarFor(MetalWindow.Size(step.Window.Most + need.Picometres)) is { } bar)
         {
             MetalWindow blank = MetalWindow.Of(bar.Limits, _job.IsInternal);
-            StockNeed atBar = Need(step, "bar", blank.Most, new Deviation(blank.Width), sameClamping: false, afterHeat: false);
-            if (step.Leaving.Most + atBar.Least.Picometres > blank.Least && _shop.BarFor(MetalWindow.Size(step.Leaving.Most + atBar.Least.Picometres)) is { } larger)
+            need = Need(step, "bar", blank.Most, new Deviation(blank.Width), sameClamping: false, afterHeat: false).Least;
+            if (Entering(step, need, []).Holds(blank))
             {
-                bar = larger;
-                blank = MetalWindow.Of(bar.Limits, _job.IsInternal);
+                PushBlank(step, blank, $"bar {bar.Size}");
+                return;
             }
 
-            Push(Settled(step, blank, new Blank($"bar {bar.Size}", bar.Limits), atBar));
+            if (blank.Least >= step.Window.Most + need.Picometres)
+            {
+                return;
+            }
         }
+    }
+
+    private void PushBlank(Step first, MetalWindow? sizes, string name)
+    {
+        double cost = first.Settled + CostOf(first, sizes, arrives: true).PerGoodPiece(first.YieldToEnd, _job.Quantity);
+        Push(new Step { Leaving = sizes, Next = first, NextEntering = sizes, NextArrives = true, Settled = cost, YieldToEnd = first.YieldToEnd, BlankName = name });
     }
 
     /// <summary>Puts every possible operation before this step.</summary>
     private void Precede(Step step)
     {
-        ToleranceGrade held = step.IsLast ? GradeOf(step) : step.Candidate.LeftGrade;
+        ToleranceGrade held = step.IsLast ? step.Candidate!.HeldGrade(step.Effort) : step.Candidate!.LeftGrade;
         foreach (Candidate before in _candidates)
         {
-            if (before.NoAtAll is not null || !MayPrecede(before, step, held))
+            if (before.NoAtAll is not null || !MayPrecede(before, step.Process, step.Tool, held, step.IsLast))
             {
                 continue;
             }
 
-            for (int taken = 0; taken <= step.ChangesLeft; taken++)
+            for (int left = step.ChangesLeft; left >= 0; left--)
             {
-                int left = step.ChangesLeft - taken;
                 if (!Cuts(before, left))
                 {
                     continue;
                 }
 
-                Change[] between = [.. _changes[left..step.ChangesLeft]];
+                Change[] between = left == step.ChangesLeft ? [] : [.. _changes[left..step.ChangesLeft]];
                 foreach (Machine machine in before.Machines)
                 {
                     Precede(step, before, machine, between, left);
@@ -320,43 +342,42 @@ internal sealed class RouteSearch
         }
     }
 
-    private static ToleranceGrade GradeOf(Step step)
+    /// <summary>Whether one process makes sense before another, before any size is looked at.</summary>
+    /// <param name="before">The process before.</param>
+    /// <param name="process">The process after it.</param>
+    /// <param name="tool">Its tool; null where the machinist sets the size, or for any tool.</param>
+    /// <param name="held">The grade that it holds.</param>
+    /// <param name="isLast">Whether it finishes the feature.</param>
+    private static bool MayPrecede(Candidate before, Process process, Tool? tool, ToleranceGrade held, bool isLast)
     {
-        ToleranceGrade grade = step.Candidate.Process.Grade(step.Effort);
-        for (int i = 0; i < step.Candidate.GradesLost; i++)
-        {
-            grade = grade.Coarser ?? grade;
-        }
-
-        return grade;
-    }
-
-    private static bool MayPrecede(Candidate before, Step step, ToleranceGrade held)
-    {
-        Process process = step.Candidate.Process;
         if (process.SizedBy == ToolUse.Drill)
         {
-            return before.Process == process && step.Tool!.Stamped > LargestSingleDrill;
+            return before.Process == process && (tool is null || tool.Stamped > LargestSingleDrill);
         }
 
-        // A blind guess at a smooth ladder is not needed: coarser than what this step holds, and fine enough for it to start from.
-        bool coarser = before.LeftGrade > held;
-        bool enough = before.LeftGrade <= process.EnterGrade || process.StartsRough || before.GradesLost > 0 && before.Process.LeftGrade <= process.EnterGrade;
-        bool careful = process.Ability == "ream" && process.SizedBy == ToolUse.Ream && step.IsLast && held <= ToleranceGrade.It(7)
-            && step.Tool!.Stamped > LargestReamAfterDrill;
-        return coarser && enough && !(careful && before.Process.SizedBy == ToolUse.Drill);
+        if (before.Process == process || (before.Process.SizedBy == ToolUse.Ream && process.SizedBy == ToolUse.Ream))
+        {
+            return false;
+        }
+
+        bool drilled = before.Process.SizedBy == ToolUse.Drill;
+        bool coarser = before.LeftGrade > held || (process.StartsRough && before.LeftGrade == held && drilled);
+        bool fineEnough = before.Process.LeftGrade <= process.EnterGrade;
+        bool smallStep = process.SizedBy is not null || before.LeftGrade.Ordinal - held.Ordinal <= MostGradesGained;
+        bool tooFarForOneReamer = process.SizedBy == ToolUse.Ream && drilled && isLast && held <= ToleranceGrade.It(7) && tool!.Stamped > LargestReamAfterDrill;
+        return coarser && fineEnough && smallStep && !tooFarForOneReamer;
     }
 
     private void Precede(Step step, Candidate before, Machine machine, Change[] between, int changesLeft)
     {
         bool same = between.Length == 0 && machine == step.Machine;
         bool heat = Array.Exists(between, static change => change.Hardens);
-        Deviation tolerance = Iso286.TryWidth(MetalWindow.Size(step.Leaving.Most), before.LeftGrade, out Deviation width) ? width : before.RoutineWidth!.Value;
-        StockNeed need = Need(step, before.Process.Name, step.Leaving.Most, tolerance, same, heat);
+        Deviation tolerance = LeftTolerance(before, step, null);
+        Stock need = Need(step, before.Process.Name, step.Window.Most, tolerance, same, heat).Least;
         MetalWindow entering = Entering(step, need, between);
         if (before.Process.SizedBy is { } use)
         {
-            PrecedeWithTools(step, before, machine, between, changesLeft, need, entering, use);
+            PrecedeWithTools(step, before, machine, between, changesLeft, entering, use);
             return;
         }
 
@@ -365,7 +386,7 @@ internal sealed class RouteSearch
         MetalWindow leaving = new(least, least + tolerance.Picometres);
         if (entering.Holds(leaving))
         {
-            Push(Before(step, before, machine, null, leaving, between, changesLeft, need));
+            Push(Before(step, before, machine, null, leaving, between, changesLeft));
         }
         else
         {
@@ -373,8 +394,13 @@ internal sealed class RouteSearch
         }
     }
 
-    private void PrecedeWithTools(
-        Step step, Candidate before, Machine machine, Change[] between, int changesLeft, StockNeed need, MetalWindow entering, ToolUse use)
+    /// <summary>Tolerance that the step before leaves: its grade at the size of the joint, or the range of its tool.</summary>
+    private static Deviation LeftTolerance(Candidate before, Step step, MetalWindow? cut) =>
+        cut is { } range ? new Deviation(range.Width)
+        : Iso286.TryWidth(MetalWindow.Size(step.Window.Most), before.LeftGrade, out Deviation width) ? width
+        : before.RoutineWidth!.Value;
+
+    private void PrecedeWithTools(Step step, Candidate before, Machine machine, Change[] between, int changesLeft, MetalWindow entering, ToolUse use)
     {
         if (!entering.IsOpen)
         {
@@ -382,81 +408,90 @@ internal sealed class RouteSearch
             return;
         }
 
-        SizeWindow sizes = entering.Sizes(_job.IsInternal);
-        Step? best = null;
+        bool fits = false;
         long nearest = long.MaxValue;
-        foreach (Tool tool in ToolsFor(use, step, sizes))
+        (double Cost, Tool Tool, MetalWindow Leaving)? best = null;
+        foreach (Tool tool in _shop.ToolsNear(use, entering.Sizes(_job.IsInternal)))
         {
-            SizeWindow cut = SizedCut.Predict(tool, _job.Group, IsCareful(before, Effort.Routine)).Sizes;
-            MetalWindow leaving = MetalWindow.Of(cut, _job.IsInternal);
+            if (tool.Stamped > machine.Largest)
+            {
+                break;
+            }
+
+            MetalWindow leaving = MetalWindow.Of(SizedCut.Predict(tool, _job.Group, IsCareful(before, Effort.Routine)).Sizes, _job.IsInternal);
             if (!entering.Holds(leaving))
             {
                 nearest = Math.Min(nearest, Math.Max(entering.Least - leaving.Least, leaving.Most - entering.Most));
                 continue;
             }
 
-            Step candidate = Before(step, before, machine, tool, leaving, between, changesLeft, need);
+            fits = true;
             if (use != ToolUse.Drill)
             {
-                Push(candidate);
-                best = candidate;
-                continue;
+                Push(Before(step, before, machine, tool, leaving, between, changesLeft));
             }
-
-            // A drill ends the way back (alone, or with its pilot): of all sizes only the cheapest can belong to a best route.
-            Step? drilled = Drilled(candidate);
-            if (drilled is not null && (best is null || drilled.Cost < best.Cost))
+            else if (DrillingCost(step, before, machine, tool, leaving, between) is { } cost && (best is null || cost < best.Value.Cost))
             {
-                best = drilled;
+                // A drill ends the way back, alone or with its pilot: of all sizes only the cheapest can belong to a best route.
+                best = (cost, tool, leaving);
             }
         }
 
-        if (best is null)
+        if (!fits)
         {
             Miss(step, before.Process.Name, nearest);
         }
-        else if (use == ToolUse.Drill)
+        else if (best is { } drill)
         {
-            Push(best);
+            PushDrilled(Before(step, before, machine, drill.Tool, drill.Leaving, between, changesLeft));
         }
     }
 
-    /// <summary>A drill in solid metal, with a pilot where it needs one.</summary>
-    private Step? Drilled(Step drill)
+    /// <summary>What the step, the drill before it and its pilot cost, as far as it depends on the drill; null where the pilot is missing.</summary>
+    private double? DrillingCost(Step step, Candidate before, Machine machine, Tool tool, MetalWindow leaving, Change[] between)
     {
-        if (drill.ChangesLeft > 0 || _job.Start.Kind != StartKind.Solid || (_job.AsksForPosition && !drill.Places))
+        if (step.ChangesLeft > between.Length || _job.Start.Kind != StartKind.Solid || (tool.Stamped > LargestSingleDrill && PilotFor(tool) is null))
         {
             return null;
+        }
+
+        double cut = CutTime.For(new Cut(before.Process, _data, tool.Stamped, _job.Extent, null, before.Process.LeftRa, Effort.Routine)).Minutes;
+        double pilot = tool.Stamped > LargestSingleDrill ? machine.ToolChangeMinutes + CutTime.For(new Cut(before.Process, _data, PilotFor(tool)!.Stamped, _job.Extent, null, before.Process.LeftRa, Effort.Routine)).Minutes : 0;
+        return CostOf(step, Grown(leaving, between), machine != step.Machine || between.Length > 0).PerGoodPiece(step.YieldToEnd, _job.Quantity)
+            + (cut + pilot) * machine.RatePerMinute / step.YieldToEnd;
+    }
+
+    private void PushDrilled(Step drill)
+    {
+        if (_job.AsksForPosition && !drill.Places)
+        {
+            return;
         }
 
         if (drill.Tool!.Stamped <= LargestSingleDrill)
         {
-            return Settled(drill, null, new Blank("solid metal", null));
+            PushBlank(drill, null, "solid metal");
+            return;
         }
 
-        Tool? pilot = NearestTool(ToolUse.Drill, new Length((long)(drill.Tool.Stamped.Picometres * PilotShare)));
-        if (pilot is null)
-        {
-            return null;
-        }
-
-        MetalWindow leaving = MetalWindow.Of(SizedCut.Predict(pilot, _job.Group, false).Sizes, _job.IsInternal);
-        StockNeed need = Need(drill, drill.Candidate.Process.Name, drill.Leaving.Most, new Deviation(leaving.Width), sameClamping: true, afterHeat: false);
-        if (!Entering(drill, need, []).Holds(leaving))
-        {
-            return null;
-        }
-
-        Step first = Before(drill, drill.Candidate, drill.Machine, pilot, leaving, [], 0, need);
-        return Settled(first, null, new Blank("solid metal", null));
+        Tool pilot = PilotFor(drill.Tool)!;
+        MetalWindow leaving = MetalWindow.Of(SizedCut.Predict(pilot, _job.Group, careful: false).Sizes, _job.IsInternal);
+        PushBlank(Before(drill, drill.Candidate!, drill.Machine!, pilot, leaving, [], 0), null, "solid metal");
     }
 
-    private Tool? NearestTool(ToolUse use, Length size)
+    /// <summary>The drill nearest to the usual share of the size among those that go into solid metal.</summary>
+    private Tool? PilotFor(Tool drill)
     {
+        Length wanted = new((long)(drill.Stamped.Picometres * PilotShare));
         Tool? best = null;
-        foreach (Tool tool in _shop.Tools(use))
+        foreach (Tool tool in _shop.Tools(ToolUse.Drill))
         {
-            if (tool.Stamped <= LargestSingleDrill && (best is null || Distance(tool) < Distance(best)))
+            if (tool.Stamped > LargestSingleDrill)
+            {
+                break;
+            }
+
+            if (best is null || Distance(tool) < Distance(best))
             {
                 best = tool;
             }
@@ -464,36 +499,17 @@ internal sealed class RouteSearch
 
         return best;
 
-        long Distance(Tool tool) => Math.Abs(tool.Stamped.Picometres - size.Picometres);
-    }
-
-    /// <summary>Tools whose stamp is near enough to the window to cut inside it.</summary>
-    private IEnumerable<Tool> ToolsFor(ToolUse use, Step step, SizeWindow sizes)
-    {
-        Deviation reach = Deviation.FromMicrometres(500);
-        Length upTo = step.Tool is { } next && next.Stamped < sizes.Max ? next.Stamped : sizes.Max;
-        foreach (Tool tool in _shop.Tools(use))
-        {
-            if (tool.Stamped > upTo)
-            {
-                yield break;
-            }
-
-            if (tool.Stamped >= sizes.Min - reach)
-            {
-                yield return tool;
-            }
-        }
+        long Distance(Tool tool) => Math.Abs(tool.Stamped.Picometres - wanted.Picometres);
     }
 
     private StockNeed Need(Step step, string before, long metal, Deviation tolerance, bool sameClamping, bool afterHeat) =>
-        StockNeed.Between(step.Candidate.Process, before, _job, MetalWindow.Size(metal), tolerance, sameClamping, afterHeat);
+        StockNeed.Between(step.Process, before, _job, MetalWindow.Size(metal), tolerance, sameClamping, afterHeat);
 
     /// <summary>The window that must be left by the operation before, with the changes between taken off at their extremes; may be closed.</summary>
-    private static MetalWindow Entering(Step step, StockNeed need, Change[] between)
+    private static MetalWindow Entering(Step step, Stock least, Change[] between)
     {
-        Stock most = step.Candidate.Process.MostStockAt(MetalWindow.Size(step.Leaving.Least));
-        MetalWindow window = new(step.Leaving.Most + need.Least.Picometres, step.Leaving.Least + most.Picometres);
+        Stock most = step.Process.MostStockAt(MetalWindow.Size(step.Window.Least));
+        MetalWindow window = new(step.Window.Most + least.Picometres, step.Window.Least + most.Picometres);
         for (int i = between.Length - 1; i >= 0; i--)
         {
             window = between[i].Before(window);
@@ -502,23 +518,27 @@ internal sealed class RouteSearch
         return window;
     }
 
-    private Step Before(Step step, Candidate before, Machine machine, Tool? tool, MetalWindow leaving, Change[] between, int changesLeft, StockNeed need)
+    private Step Before(Step step, Candidate before, Machine machine, Tool? tool, MetalWindow leaving, Change[] between, int changesLeft)
     {
-        Step settled = Settle(step, Grown(leaving, between), machine, between.Length > 0);
+        MetalWindow entering = Grown(leaving, between);
+        bool arrives = machine != step.Machine || between.Length > 0;
+        double yield = tool is null ? Yield(before, null, Effort.Routine, leaving) : 1;
         return new Step
         {
             Candidate = before,
             Machine = machine,
             Tool = tool,
-            Effort = Effort.Routine,
             Leaving = leaving,
+            Next = step,
+            NextEntering = entering,
+            NextArrives = arrives,
             ChangesLeft = changesLeft,
             ChangesAfter = between,
-            Yield = tool is null ? Yield(before, null, Effort.Routine, leaving) : 1,
+            Yield = yield,
+            YieldToEnd = yield * step.YieldToEnd,
             Places = step.Places || !before.Process.Follows,
-            Cost = settled.Cost + ChangeCost(between),
-            NeedOfNext = need,
-        }.Chained(settled);
+            Settled = step.Settled + ChangeCost(between) + CostOf(step, entering, arrives).PerGoodPiece(step.YieldToEnd, _job.Quantity),
+        };
     }
 
     private static MetalWindow Grown(MetalWindow window, Change[] changes)
@@ -531,135 +551,11 @@ internal sealed class RouteSearch
         return window;
     }
 
-    private Step Settled(Step step, MetalWindow? blank, Blank start, StockNeed? need = null) =>
-        Settle(step, blank, null, false) with { Start = start, NeedFromBlank = need };
-
-    /// <summary>Adds what this step itself costs, now that the sizes it starts from are known.</summary>
-    private Step Settle(Step step, MetalWindow? entering, Machine? machineBefore, bool wasAway)
-    {
-        bool arrives = wasAway || machineBefore != step.Machine;
-        StepCost cost = CostOf(step, entering, arrives);
-        return step with { Entering = entering, Arrives = arrives, Own = cost, Cost = step.Cost + cost.PerGoodPiece };
-    }
-
-    private StepCost CostOf(Step step, MetalWindow? entering, bool arrives)
-    {
-        Cut cut = CutOf(step, entering);
-        CutTime time = CutTime.For(cut);
-        SizeWindow leaving = step.Leaving.Sizes(_job.IsInternal);
-        (Instrument instrument, _) = Instrument.For(_job.IsInternal, leaving.Max, leaving.Width);
-        double checking = instrument.MinutesPerCheck * (step.Effort == Effort.Special ? 1 : RoutineChecks);
-        double handling = arrives ? step.Machine.HandlingMinutes : 0;
-        double minutes = time.Minutes + step.Machine.ToolChangeMinutes + checking + handling;
-        double setUp = arrives ? step.Machine.SetUpMinutes : 0;
-        double rate = step.Machine.RatePerMinute;
-        return new StepCost(time, minutes, setUp, checking, handling, rate * minutes / step.YieldToEnd, rate * setUp / _job.Quantity);
-    }
-
-    public Cut CutOf(Step step, MetalWindow? entering)
-    {
-        Process process = step.Candidate.Process;
-        Stock? stock = entering is { } from ? new Stock(from.Most - step.Leaving.Least) : null;
-        Length diameter = step.Tool?.Stamped
-            ?? (_job.IsInternal ? MetalWindow.Size(step.Leaving.Least) : MetalWindow.Size(entering?.Most ?? step.Leaving.Most));
-        Roughness ra = step.IsLast ? process.Ra(step.Effort) : process.LeftRa;
-        return new Cut(process, _data, diameter, _job.Extent, stock, ra, step.Effort);
-    }
-
     private void Miss(Step step, string before, long shortBy)
     {
-        if (shortBy > 0 && (NearestMiss is null || shortBy < NearestMiss.ShortBy.Picometres))
+        if (shortBy is > 0 and < long.MaxValue && (NearestMiss is null || shortBy < NearestMiss.ShortBy.Picometres))
         {
-            NearestMiss = new Closure(step.Candidate.Process.Name, before, new Deviation(shortBy));
+            NearestMiss = new Closure(step.Process.Name, before, new Deviation(shortBy));
         }
-    }
-}
-
-/// <summary>What a route starts from.</summary>
-/// <param name="Name">In words.</param>
-/// <param name="Limits">Its limits at the feature; null for solid metal.</param>
-internal sealed record Blank(string Name, SizeWindow? Limits);
-
-/// <summary>A joint that could not be closed.</summary>
-/// <param name="Process">The operation.</param>
-/// <param name="Before">The operation or blank before it.</param>
-/// <param name="ShortBy">By how much the window is too narrow.</param>
-internal sealed record Closure(string Process, string Before, Deviation ShortBy);
-
-/// <summary>What one step costs.</summary>
-/// <param name="Cutting">The cut itself.</param>
-/// <param name="Minutes">Run time of a piece.</param>
-/// <param name="SetUp">Minutes once a lot.</param>
-/// <param name="Checking">Of the minutes, for measuring.</param>
-/// <param name="Handling">Of the minutes, for loading.</param>
-/// <param name="Run">Money for a good piece, run time.</param>
-/// <param name="Share">Money for a good piece, its share of the set-up.</param>
-internal readonly record struct StepCost(CutTime Cutting, double Minutes, double SetUp, double Checking, double Handling, double Run, double Share)
-{
-    public double PerGoodPiece => Run + Share;
-}
-
-/// <summary>One step of a chain that grows backwards from the drawing.</summary>
-internal sealed record Step
-{
-    public required Candidate Candidate { get; init; }
-
-    public required Machine Machine { get; init; }
-
-    public Tool? Tool { get; init; }
-
-    public Effort Effort { get; init; }
-
-    public required MetalWindow Leaving { get; init; }
-
-    /// <summary>Sizes that it starts from; null in solid metal, or while nothing stands before it.</summary>
-    public MetalWindow? Entering { get; init; }
-
-    public bool IsLast { get; init; }
-
-    /// <summary>Changes that still have to come before this step.</summary>
-    public int ChangesLeft { get; init; }
-
-    /// <summary>Changes between this step and the next.</summary>
-    public IReadOnlyList<Change> ChangesAfter { get; init; } = [];
-
-    public double Yield { get; init; }
-
-    /// <summary>Share of good pieces of this and all later steps.</summary>
-    public double YieldToEnd { get; private init; }
-
-    /// <summary>Whether this or a later step puts the axis right.</summary>
-    public bool Places { get; init; }
-
-    /// <summary>Cost of a good piece of all that is settled: the later steps, and this one once its start is known.</summary>
-    public double Cost { get; init; }
-
-    public StepCost Own { get; init; }
-
-    /// <summary>The part comes onto the machine for this step.</summary>
-    public bool Arrives { get; init; }
-
-    /// <summary>Why the next step removes at least what it does.</summary>
-    public StockNeed? NeedOfNext { get; init; }
-
-    public StockNeed? NeedFromBlank { get; init; }
-
-    public Step? Next { get; private init; }
-
-    /// <summary>The blank, once the chain reaches it.</summary>
-    public Blank? Start { get; init; }
-
-    public Step Chained(Step? next) => this with { Next = next, YieldToEnd = Yield * (next?.YieldToEnd ?? 1) };
-
-    /// <summary>The operations in words, by which two routes are the same or truly different.</summary>
-    public string Sequence()
-    {
-        System.Text.StringBuilder text = new();
-        for (Step? step = this; step is not null; step = step.Next)
-        {
-            text.Append(step.Candidate.Process.Name).Append('|');
-        }
-
-        return text.ToString();
     }
 }

@@ -1,6 +1,5 @@
 using System.Globalization;
 using ProcessPlan.Core.Capability;
-using ProcessPlan.Core.Costing;
 using ProcessPlan.Core.Features;
 using ProcessPlan.Core.Inspection;
 using ProcessPlan.Core.Shop;
@@ -15,17 +14,17 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
 {
     private int _number;
 
-    public Route Write(Step first, int rank)
+    /// <param name="blank">The chain, from its blank.</param>
+    /// <param name="rank">1 for the cheapest.</param>
+    public Route Write(Step blank, int rank)
     {
         _number = 0;
         List<Operation> operations = [];
-        double yield = 1;
-        Step? before = null;
+        double yield = blank.YieldToEnd;
         bool hard = false;
-        for (Step? step = first; step is not null; before = step, step = step.Next)
+        for (Step before = blank; before.Next is { } step; before = step)
         {
-            yield *= step.Yield;
-            operations.Add(Write(step, before, hard, first.Start!));
+            operations.Add(Write(step, before, hard));
             foreach (Change change in step.ChangesAfter)
             {
                 operations.Add(Write(change, step));
@@ -35,7 +34,7 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
 
         Money cost = Sum(operations);
         return new Route(rank, operations, cost, new Minutes(operations.Sum(static operation => operation.Minutes.Value)),
-            new Minutes(operations.Sum(static operation => operation.SetUp.Value)), yield, (int)Math.Ceiling(job.Quantity / yield - 1e-9), first.Start!.Name);
+            new Minutes(operations.Sum(static operation => operation.SetUp.Value)), yield, (int)Math.Ceiling(job.Quantity / yield - 1e-9), blank.BlankName!);
     }
 
     private Money Sum(List<Operation> operations)
@@ -51,15 +50,16 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
 
     private Money Price(double amount) => new((decimal)amount, shop.Currency);
 
-    private Operation Write(Step step, Step? before, bool hard, Blank blank)
+    private Operation Write(Step step, Step before, bool hard)
     {
-        Process process = step.Candidate.Process;
-        SizeWindow size = step.Leaving.Sizes(job.IsInternal);
-        SizeWindow? drawing = step.IsLast && step.ChangesAfter.Count == 0 ? job.Feature.Limits : null;
+        Process process = step.Process;
+        StepCost cost = search.CostOf(step, before.NextEntering, before.NextArrives);
+        SizeWindow size = step.Window.Sizes(job.IsInternal);
+        SizeWindow? drawing = step.IsLast && step.ChangesAfter.Length == 0 ? job.Feature.Limits : null;
         SizeWindow held = drawing ?? size;
-        ToleranceGrade? grade = Iso286.NearestGrade(held.Max, held.Width);
-        (Stock? least, Stock? most) = step.Entering is { } from
-            ? (new Stock(from.Least - step.Leaving.Most), new Stock(from.Most - step.Leaving.Least))
+        ToleranceGrade? grade = step.IsLast ? Iso286.NearestGrade(job.Nominal, held.Width) : step.Candidate!.LeftGrade;
+        (Stock? least, Stock? most) = before.NextEntering is { } from
+            ? (new Stock(from.Least - step.Window.Most), new Stock(from.Most - step.Window.Least))
             : ((Stock?)null, (Stock?)null);
         Length aim = held.Middle;
         (Instrument instrument, bool good) = Instrument.For(job.IsInternal, held.Max, held.Width);
@@ -68,7 +68,7 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
         {
             Number = _number += 10,
             Process = process.Name,
-            Machine = step.Machine.Name,
+            Machine = step.Machine!.Name,
             Condition = hard ? Condition.Hard : Condition.Soft,
             Effort = step.Effort,
             Tool = step.Tool,
@@ -78,13 +78,13 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
             Ra = ra,
             StockMin = least,
             StockMax = most,
-            Minutes = new Minutes(step.Own.Minutes),
-            SetUp = new Minutes(step.Own.SetUp),
-            Cost = Price(step.Own.PerGoodPiece),
+            Minutes = new Minutes(cost.Minutes),
+            SetUp = new Minutes(cost.SetUp),
+            Cost = Price(cost.PerGoodPiece(step.YieldToEnd, job.Quantity)),
             Inspection = Inspect(step, instrument, good, held),
-            Because = Because(step),
+            Because = Because(step, most),
             Cautions = Cautions(step, instrument, good, held),
-            Why = [.. Why(step, before, blank, held, aim, instrument)],
+            Why = [.. Why(step, before, cost, held, aim, instrument)],
         };
     }
 
@@ -93,7 +93,7 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
         Supplier? supplier = change.Supplier;
         decimal share = supplier is null ? 0 : supplier.ChargeFor(job.Quantity) / job.Quantity;
         string days = supplier is null ? "price and days to be asked" : $"{supplier.Days} days away";
-        SizeWindow after = new MetalWindow(step.Leaving.Least + change.LeastGrowth.Picometres, step.Leaving.Most + change.MostGrowth.Picometres).Sizes(job.IsInternal);
+        SizeWindow after = new MetalWindow(step.Window.Least + change.LeastGrowth.Picometres, step.Window.Most + change.MostGrowth.Picometres).Sizes(job.IsInternal);
         return new Operation
         {
             Number = _number += 10,
@@ -125,29 +125,32 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
 
     private static string Inspect(Step step, Instrument instrument, bool good, SizeWindow held)
     {
-        string how = step.Effort == Effort.Special ? "every piece" : "first piece, then 1 in 5";
+        string how = Checks.Words(step.Process, step.Effort);
         string ratio = instrument.RatioTo(held.Width).ToString("0.#", CultureInfo.InvariantCulture);
         string verdict = good ? "" : $", NOT GOOD ENOUGH (needs 1 : {Instrument.LeastRatio})";
         return $"{instrument.Name}, U {instrument.Uncertainty.Format()} µm = 1 : {ratio} of the tolerance{verdict}; {how}";
     }
 
-    private List<string> Because(Step step)
+    private List<string> Because(Step step, Stock? most)
     {
-        Candidate candidate = step.Candidate;
+        Candidate candidate = step.Candidate!;
         List<string> because = [];
         if (step.IsLast)
         {
             string effort = step.Effort == Effort.Routine ? "with routine effort" : "with special effort";
-            ToleranceGrade grade = Iso286.NearestGrade(job.Nominal, candidate.HeldWidth(step.Effort)) ?? candidate.Process.Grade(step.Effort);
             string lost = candidate.GradesLost > 0 ? $" ({candidate.LossReason}: {candidate.GradesLost} grade worse)" : "";
-            because.Add($"holds {grade} {effort}{lost}, leaves {candidate.Process.Ra(step.Effort)}");
+            because.Add($"holds {candidate.HeldGrade(step.Effort)} {effort}{lost}, leaves {step.Process.Ra(step.Effort)}");
+        }
+        else if (most is null)
+        {
+            because.Add($"opens the {job.Kind.Word()} in solid metal");
         }
         else
         {
-            because.Add($"leaves the next operation {(step.Next!.Entering is { } from ? $"{new Stock(from.Least - step.Next.Leaving.Most)} to {new Stock(from.Most - step.Next.Leaving.Least)}" : "its stock")} on {Across}");
+            because.Add($"leaves {candidate.LeftGrade}, which {step.Next!.Process.Name} can start from");
         }
 
-        if (job.AsksForPosition && !candidate.Process.Follows)
+        if (job.AsksForPosition && !step.Process.Follows)
         {
             because.Add("puts the axis right; drills and reamers only follow");
         }
@@ -158,12 +161,12 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
     private static List<string> Cautions(Step step, Instrument instrument, bool good, SizeWindow held)
     {
         List<string> cautions = [];
-        if (step.Candidate.Process.Ability == "ream")
+        if (step.Process.Ability == "ream")
         {
             cautions.Add("Never turn a reamer backwards. Make a trial hole with a reamer that is new to this material.");
         }
 
-        if (step.Candidate.Process.Ability.StartsWith("grind", StringComparison.Ordinal))
+        if (step.Process.Ability.StartsWith("grind", StringComparison.Ordinal))
         {
             cautions.Add("Guard, wheel rating and ring test; coolant on. Look for burn and cracks on hardened steel.");
         }
@@ -175,15 +178,17 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
 
         if (step.Effort == Effort.Special)
         {
-            cautions.Add("Special effort: slow cut, careful set-up, every piece checked.");
+            cautions.Add(step.Tool is null
+                ? "Special effort: slow cut, careful set-up, every piece measured before the last cut and after it."
+                : "Special effort: cutting oil, run-out of the reamer below 5 µm, slow cut, trial hole.");
         }
 
         return cautions;
     }
 
-    private IEnumerable<Reason> Why(Step step, Step? before, Blank blank, SizeWindow held, Length aim, Instrument instrument)
+    private IEnumerable<Reason> Why(Step step, Step before, StepCost cost, SizeWindow held, Length aim, Instrument instrument)
     {
-        Process process = step.Candidate.Process;
+        Process process = step.Process;
         yield return new Reason("size", SizeOrigin(step, held));
         yield return new Reason("aim", $"middle of {held.Min.Format(3)} and {held.Max.Format(3)} = {aim}");
         if (step.Tool is { } tool)
@@ -191,32 +196,27 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
             yield return new Reason("tool", ToolOrigin(step, tool));
         }
 
-        if (step.Entering is { } from)
+        if (before.NextEntering is { } from)
         {
-            string source = before is null ? blank.Name : before.Process();
             SizeWindow entering = from.Sizes(job.IsInternal);
-            yield return new Reason("stock", job.IsInternal
-                ? $"after {source}: least {held.Min.Format(3)} - {entering.Max.Format(3)}, most {held.Max.Format(3)} - {entering.Min.Format(3)}"
-                : $"after {source}: least {entering.Min.Format(3)} - {held.Max.Format(3)}, most {entering.Max.Format(3)} - {held.Min.Format(3)}");
-            StockNeed? need = before is null ? step.NeedFromBlank : before.NeedOfNext;
-            if (need is { } known)
+            yield return new Reason("stock", (job.IsInternal
+                ? $"least {held.Min.Format(3)} - {entering.Max.Format(3)}, most {held.Max.Format(3)} - {entering.Min.Format(3)}"
+                : $"least {entering.Min.Format(3)} - {held.Max.Format(3)}, most {entering.Max.Format(3)} - {held.Min.Format(3)}")
+                + $", after {(before.IsBlank ? before.BlankName : before.Process.Name)}");
+            foreach (string line in search.NeedOf(step, before).Explain())
             {
-                foreach (string line in known.Explain())
-                {
-                    yield return new Reason("stock", line);
-                }
+                yield return new Reason("stock", line);
             }
 
             yield return new Reason("stock", $"{process.Name} takes at most {process.MostStockAt(held.Max)} here [{process.Origin}]");
         }
 
         yield return new Reason("grade", $"{process.Name}: routine {process.RoutineGrade}, special {process.SpecialGrade?.ToString() ?? "none"}; leaves {process.LeftRa} on the way [{process.Origin}]");
-        Cut cut = search.CutOf(step, step.Entering);
-        yield return new Reason("minutes", $"cut: {step.Own.Cutting.Explain(cut)} [{cut.Data.Origin}]");
+        yield return new Reason("minutes", $"cut: {cost.Cutting.Explain(cost.Cut)} [{cost.Cut.Data.Origin}]");
         yield return new Reason("minutes", string.Create(CultureInfo.InvariantCulture,
-            $"sum: cut {step.Own.Cutting.Minutes:0.00} + tool change {step.Machine.ToolChangeMinutes:0.00} + checking {step.Own.Checking:0.00} + handling {step.Own.Handling:0.00} = {step.Own.Minutes:0.00} min"));
+            $"cut {cost.Cutting.Minutes:0.00} + tool change {cost.Machine.ToolChangeMinutes:0.00} + checking {cost.Checking:0.00} + handling {cost.Handling:0.00} = {cost.Minutes:0.00} min"));
         yield return new Reason("cost", string.Create(CultureInfo.InvariantCulture,
-            $"{step.Own.Minutes:0.00} min · {step.Machine.RatePerHour:0.##}/60 / yield to the end {step.YieldToEnd:0.0000} + set-up {step.Own.SetUp:0} min · {step.Machine.RatePerHour:0.##}/60 / {job.Quantity} = {step.Own.PerGoodPiece:0.00}"));
+            $"{cost.Machine.RatePerHour:0.##}/60 · ({cost.Minutes:0.00} min / yield to the end {step.YieldToEnd:0.0000} + set-up {cost.SetUp:0} min / {job.Quantity}) = {cost.PerGoodPiece(step.YieldToEnd, job.Quantity):0.00} {shop.Currency}"));
         yield return new Reason("inspection", $"{instrument.Name}: U {instrument.Uncertainty.Format()} µm against {held.Width.Format()} µm [{instrument.Origin}]");
     }
 
@@ -224,33 +224,28 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
     {
         if (step.IsLast)
         {
-            return job.Feature.Class is { } toleranceClass && step.ChangesAfter.Count == 0
+            return job.Feature.Class is { } toleranceClass && step.ChangesAfter.Length == 0
                 ? $"the drawing's limits, {toleranceClass} [{Iso286.Cite(job.Nominal, toleranceClass.Grade)}; {Iso286.Cite(job.Nominal, toleranceClass)}]"
-                : step.ChangesAfter.Count == 0 ? "the drawing's limits" : "the drawing's limits, less what comes after at its extremes";
+                : step.ChangesAfter.Length == 0 ? "the drawing's limits" : "the drawing's limits, less what comes after at its extremes";
         }
 
         if (step.Tool is { } tool)
         {
-            SizedCut cut = SizedCut.Predict(tool, job.Group, careful: step.Candidate.Process.EnterGrade <= ToleranceGrade.It(9));
+            SizedCut cut = SizedCut.Predict(tool, job.Group, RouteSearch.IsCareful(step.Candidate!, step.Effort));
             return $"what {tool.Label} is predicted to cut: {cut.Over.Least} to {cut.Over.Most} over its size [{cut.Origin}]";
         }
 
-        return $"the next operation's limit and least stock, then the tolerance {step.Candidate.LeftGrade} = {held.Width.Format()} µm into the metal [{Iso286.Cite(held.Max, step.Candidate.LeftGrade)}]";
+        return $"the next operation's limit and least stock, then the tolerance {step.Candidate!.LeftGrade} = {held.Width.Format()} µm into the metal [{Iso286.Cite(held.Max, step.Candidate!.LeftGrade)}]";
     }
 
     private static string ToolOrigin(Step step, Tool tool)
     {
         if (tool.Use == ToolUse.Ream && step.IsLast)
         {
-            ReamerChoice.Suits(tool, step.Leaving.Sizes(isInternal: true), out string because);
+            ReamerChoice.Suits(tool, step.Window.Sizes(isInternal: true), out string because);
             return $"{tool.Label}: {because} [{Din1420.Citation}]";
         }
 
         return $"{tool.Label}: the size of the shop's drawer that leaves the next operation its stock at the least cost";
     }
-}
-
-file static class StepWords
-{
-    public static string Process(this Step step) => step.Candidate.Process.Name;
 }

@@ -45,7 +45,7 @@ internal readonly record struct StockNeed
 
     private bool Flat { get; init; }
 
-    private Citation SurfaceOrigin { get; init; }
+    private SurfaceState Surface { get; init; }
 
     /// <summary>The analytical minimum, rounded up to the micrometre.</summary>
     public Stock Analytical { get; private init; }
@@ -95,7 +95,7 @@ internal readonly record struct StockNeed
             Error = error,
             Setting = setting,
             Flat = flat,
-            SurfaceOrigin = state.Origin,
+            Surface = state,
             Analytical = new Estimate(2 * (state.RzMicrometres + layer + spatial)).RoundUp(new Length(Length.PicometresPerMicrometre)),
             Table = table,
             TableOrigin = origin,
@@ -110,7 +110,7 @@ internal readonly record struct StockNeed
         string spatial = Error == 0 && Setting == 0 ? ""
             : Flat ? $" + ρ {Text(Error)} + ε {Text(Setting)}"
             : $" + √(ρ {Text(Error)}² + ε {Text(Setting)}²)";
-        yield return $"least stock, analytical: 2·(Rz {Text(Rz)} + h {Text(Layer)}{spatial}) = {Analytical.Picometres / Length.PicometresPerMicrometre} µm [{SurfaceOrigin}]";
+        yield return $"least stock, analytical: 2·(Rz {Text(Rz)} + h {Text(Layer)}{spatial}) = {Analytical.Picometres / Length.PicometresPerMicrometre} µm [{Surface.Origin}]";
         if (Table is { } table)
         {
             string used = Least == Analytical ? "not used" : $"used for lots up to {SmallLot}";

@@ -93,7 +93,7 @@ public static class HandbookShop
         foreach (TableRow row in table.Rows)
         {
             bars.Add(new BarSeries(Length.FromMillimetres(row.Decimal("over")), Length.FromMillimetres(row.Decimal("upto")),
-                Length.FromMillimetres(row.Decimal("step")), Length.FromMillimetres(row.Decimal("deviation")) - Length.Zero,
+                [.. row["sizes"].Split(',').Select(static size => Length.FromMillimetres(int.Parse(size, CultureInfo.InvariantCulture)))], Length.FromMillimetres(row.Decimal("deviation")) - Length.Zero,
                 table.Cite($"over {row["over"]} to {row["upto"]} mm")));
         }
 

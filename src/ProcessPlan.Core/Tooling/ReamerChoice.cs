@@ -32,13 +32,15 @@ public static class ReamerChoice
     }
 
     /// <summary>The best suited reamer: the one made for this class of hole first, else the largest, which has the longest life.</summary>
-    public static Tool? Best(IReadOnlyList<Tool> reamers, SizeWindow hole, ToleranceClass? asked)
+    /// <param name="near">Reamers of about this size.</param>
+    /// <param name="hole">Limits of the hole.</param>
+    /// <param name="asked">The class asked for, if any.</param>
+    public static Tool? Best(ReadOnlySpan<Tool> near, SizeWindow hole, ToleranceClass? asked)
     {
         Tool? best = null;
         bool bestIsMadeFor = false;
-        for (int i = FirstNotBelow(reamers, hole.Min); i < reamers.Count && reamers[i].Stamped <= hole.Max; i++)
+        foreach (Tool tool in near)
         {
-            Tool tool = reamers[i];
             bool madeFor = asked is { } toleranceClass && tool.Made == toleranceClass.ToString();
             bool better = best is null || (madeFor && !bestIsMadeFor) || (madeFor == bestIsMadeFor && tool.Own.Max > best.Own.Max);
             if (better && Suits(tool, hole, out _))
@@ -48,21 +50,6 @@ public static class ReamerChoice
         }
 
         return best;
-    }
-
-    /// <summary>Index of the first tool that could suit: stamps lie a little below or above the sizes that they cut.</summary>
-    private static int FirstNotBelow(IReadOnlyList<Tool> tools, Length size)
-    {
-        Length from = size - Deviation.FromMicrometres(500);
-        int low = 0;
-        int high = tools.Count;
-        while (low < high)
-        {
-            int middle = (low + high) / 2;
-            (low, high) = tools[middle].Stamped < from ? (middle + 1, high) : (low, middle);
-        }
-
-        return low;
     }
 
     /// <summary>A quarter of the hole tolerance whose 35 % is the reamer's own tolerance.</summary>

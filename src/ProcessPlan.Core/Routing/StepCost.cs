@@ -1,0 +1,47 @@
+using ProcessPlan.Core.Capability;
+using ProcessPlan.Core.Costing;
+using ProcessPlan.Core.Inspection;
+using ProcessPlan.Core.Shop;
+using ProcessPlan.Core.Values;
+
+namespace ProcessPlan.Core.Routing;
+
+/// <summary>What one step costs on one piece.</summary>
+/// <param name="Cut">What is cut.</param>
+/// <param name="Cutting">The time under the tool.</param>
+/// <param name="Checking">Minutes for measuring.</param>
+/// <param name="Handling">Minutes for loading; zero where the part is on the machine already.</param>
+/// <param name="Machine">The machine.</param>
+/// <param name="SetUp">Minutes once a lot; zero where the part is on the machine already.</param>
+internal readonly record struct StepCost(Cut Cut, CutTime Cutting, double Checking, double Handling, Machine Machine, double SetUp)
+{
+    /// <summary>Run time of a piece.</summary>
+    public double Minutes => Cutting.Minutes + Machine.ToolChangeMinutes + Checking + Handling;
+
+    /// <param name="step">The step.</param>
+    /// <param name="entering">Sizes that it starts from; null in solid metal.</param>
+    /// <param name="arrives">Whether the part comes onto the machine for it.</param>
+    /// <param name="job">The job.</param>
+    /// <param name="data">Speeds and feeds of its material.</param>
+    public static StepCost Of(Step step, MetalWindow? entering, bool arrives, Job job, CuttingData data)
+    {
+        Process process = step.Process;
+        MetalWindow window = step.Window;
+        SizeWindow leaving = window.Sizes(job.IsInternal);
+        Cut cut = new(
+            process,
+            data,
+            step.Tool?.Stamped ?? (job.IsInternal ? leaving.Max : MetalWindow.Size(entering?.Most ?? window.Most)),
+            job.Extent,
+            entering is { } from ? new Stock(from.Most - window.Least) : null,
+            step.IsLast ? process.Ra(step.Effort) : process.LeftRa,
+            step.Effort);
+        (Instrument instrument, _) = Instrument.For(job.IsInternal, leaving.Max, leaving.Width);
+        Machine machine = step.Machine!;
+        return new StepCost(cut, CutTime.For(cut), instrument.MinutesPerCheck * Checks.PerPiece(process, step.Effort),
+            arrives ? machine.HandlingMinutes : 0, machine, arrives ? machine.SetUpMinutes : 0);
+    }
+
+    /// <summary>Cost of a good piece: run time over the yield to the end of the route, and its share of the set-up.</summary>
+    public double PerGoodPiece(double yieldToEnd, int quantity) => Machine.RatePerMinute * (Minutes / yieldToEnd + SetUp / quantity);
+}
