@@ -30,5 +30,13 @@ internal static class LimitsCommand
         return limits;
     }
 
-    private static MaterialNames Materials() => new(HandbookShop.Materials().Select(static material => (material.Designation, material.Aliases)));
+    private static MaterialNames Materials() => new(Named());
+
+    private static IEnumerable<(string Designation, IReadOnlyList<string> Aliases)> Named()
+    {
+        foreach (Material material in HandbookShop.Materials())
+        {
+            yield return (material.Designation, material.Aliases);
+        }
+    }
 }
