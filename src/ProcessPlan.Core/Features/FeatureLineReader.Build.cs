@@ -10,6 +10,9 @@ internal ref partial struct FeatureLineReader
     /// <summary>A deviation of this size or more without a decimal mark was almost certainly meant in micrometres.</summary>
     private const long SuspiciousDeviation = Length.PicometresPerMillimetre;
 
+    private const long FinestNanometres = 6;
+    private const long CoarsestNanometres = 400_000;
+
     public Parsed<FeatureRequest> Build()
     {
         DecideEither();
@@ -203,9 +206,9 @@ internal ref partial struct FeatureLineReader
         }
         else if (_general.Is)
         {
-            if (Iso2768.Linear(nominal, _general.Value) is not { } permissible)
+            if (Iso2768.Find(nominal, _general.Value) is not { } permissible)
             {
-                return Refuse($"ISO 2768-1 gives no tolerance {_general.Value.Name()} for {nominal}.", _general.Place, "a class, deviations or limits");
+                return Refuse($"ISO 2768-1 gives no tolerance {Iso2768.Name(_general.Value)} for {nominal}.", _general.Place, "a class, deviations or limits");
             }
 
             limits = new SizeWindow(nominal - permissible, nominal + permissible);
@@ -222,11 +225,11 @@ internal ref partial struct FeatureLineReader
     private static string GeneralOffer(Length nominal)
     {
         string offer = "a class, deviations or limits";
-        foreach (GeneralTolerance general in GeneralTolerances.All)
+        foreach (GeneralTolerance general in Enum.GetValues<GeneralTolerance>())
         {
-            if (Iso2768.Linear(nominal, general) is { } permissible)
+            if (Iso2768.Find(nominal, general) is { } permissible)
             {
-                offer += $"{(offer.Contains("2768", StringComparison.Ordinal) ? "," : "; or by name")} {general.Name()} (±{DecimalText.Format(permissible.Picometres, Length.MillimetrePlaces)} mm)";
+                offer += $"{(offer.Contains("2768", StringComparison.Ordinal) ? "," : "; or by name")} {Iso2768.Name(general)} (±{DecimalText.Format(permissible.Picometres, Length.MillimetrePlaces)} mm)";
             }
         }
 
@@ -470,9 +473,9 @@ internal ref partial struct FeatureLineReader
         (FeatureWord word, Measured number) = _finish.Value;
         if (word == FeatureWord.None)
         {
-            if (number.Number.Places == 0 && number.Unit == WrittenUnit.None && Roughness.TryFromClass((int)number.Number.Units, out Roughness byClass))
+            if (number.Unit == WrittenUnit.None && number.Number is { Places: 0, Units: >= 1 and <= 12 } numbered)
             {
-                return byClass;
+                return Roughness.N((int)numbered.Units);
             }
 
             Report($"'{Show(_finish.Place)}' is no roughness class.", _finish.Place, "N1 to N12");
@@ -486,22 +489,16 @@ internal ref partial struct FeatureLineReader
             return null;
         }
 
-        long factor = number.Unit switch
+        // A microinch is 25.4 nm: the limit is held to the whole nanometre below.
+        bool microinch = number.Unit == WrittenUnit.Microinch;
+        if ((microinch || number.Unit is WrittenUnit.None or WrittenUnit.Micrometre)
+            && number.Number.TryScale(microinch ? 254_000 : 10_000, out long tenthNanometres)
+            && tenthNanometres / (microinch ? 10_000 : 10) is >= FinestNanometres and <= CoarsestNanometres and long nanometres)
         {
-            WrittenUnit.Microinch => Length.PicometresPerMicroinch,
-            WrittenUnit.None or WrittenUnit.Micrometre => Length.PicometresPerMicrometre,
-            _ => 0,
-        };
-        if (factor > 0 && number.Number.TryScale(factor, out long picometres))
-        {
-            if (word == FeatureWord.Ra && Roughness.TryFromRa(picometres, out Roughness ra))
+            Roughness asked = word == FeatureWord.Ra ? Roughness.Ra(nanometres) : Roughness.Rz(nanometres);
+            if (RoughnessPairs.ToRa(asked) is not null)
             {
-                return ra;
-            }
-
-            if (word == FeatureWord.Rz && RoughnessPairs.TryFromRz(picometres, out Roughness rz))
-            {
-                return rz;
+                return asked;
             }
         }
 

@@ -292,19 +292,19 @@ internal ref partial struct FeatureLineReader
 
     private bool TryScale(out HardnessScale scale)
     {
-        scale = HardnessScale.Hrc;
+        scale = HardnessScale.HRC;
         if (TrySuffix("hrc"))
         {
             return true;
         }
 
-        scale = HardnessScale.Hb;
+        scale = HardnessScale.HB;
         if (TrySuffix("hbw") || TrySuffix("hb"))
         {
             return true;
         }
 
-        scale = HardnessScale.Hv;
+        scale = HardnessScale.HV;
         return TrySuffix("hv");
     }
 

@@ -101,13 +101,20 @@ internal ref partial struct FeatureLineReader
     private bool TryHardness(Measured number, HardnessScale scale, Place place, out Hardness hardness)
     {
         hardness = default;
-        if (number.Unit == WrittenUnit.None && !number.IsFraction && Hardness.TryCreate(number.Number, scale, out hardness))
+        if (number.Unit == WrittenUnit.None && !number.IsFraction && TryHardness(number.Number, scale, out hardness))
         {
             return true;
         }
 
-        Report($"'{Show(place)}' is outside the scale.", place, Hardness.RangeOf(scale));
+        Report($"'{Show(place)}' is outside the scale.", place, $"{(scale == HardnessScale.HRC ? "20 to 70" : "30 to 1000")} {scale}");
         return false;
+    }
+
+    private static bool TryHardness(ExactDecimal points, HardnessScale scale, out Hardness hardness)
+    {
+        bool tenths = points.TryScale(10, out long whole);
+        hardness = new Hardness(whole, scale);
+        return tenths && (scale == HardnessScale.HRC ? hardness.Points is >= 20 and <= 70 : hardness.Points is >= 30 and <= 1000);
     }
 
     /// <summary>"hardness 28HRC", "hardness=28HRC", "HRC 28", "HRC28".</summary>
@@ -130,7 +137,7 @@ internal ref partial struct FeatureLineReader
         }
         else
         {
-            scale = name[1] is 'r' or 'R' ? HardnessScale.Hrc : name[1] is 'v' or 'V' ? HardnessScale.Hv : HardnessScale.Hb;
+            scale = name[1] is 'r' or 'R' ? HardnessScale.HRC : name[1] is 'v' or 'V' ? HardnessScale.HV : HardnessScale.HB;
         }
 
         Place place = new(word.At, _at - word.At);
@@ -182,8 +189,8 @@ internal ref partial struct FeatureLineReader
         if (NumberAt(_at) && DecimalText.TryRead(_text[_at..], out ExactDecimal number, out int length))
         {
             _at += length;
-            if (TryScale(out HardnessScale scale) && Hardness.TryCreate(number, scale, out Hardness hardness)
-                && number.ToDouble() >= (scale == HardnessScale.Hrc ? 45 : 450))
+            if (TryScale(out HardnessScale scale) && TryHardness(number, scale, out Hardness hardness)
+                && number.ToDouble() >= (scale == HardnessScale.HRC ? 45 : 450))
             {
                 return hardness;
             }

@@ -361,7 +361,7 @@ internal ref partial struct FeatureLineReader
                 break;
             case FeatureWord.GeneralTolerance:
                 char letter = char.ToLowerInvariant(_text[place.End - 1]);
-                Note(ref _general, GeneralTolerances.FromLetter(letter), place, "general tolerance");
+                Note(ref _general, (GeneralTolerance)"fmcv".IndexOf(letter), place, "general tolerance");
                 break;
             default:
                 throw new InvalidOperationException($"The word {word} is listed but nothing reads it{(assigned ? " with '='" : "")}.");

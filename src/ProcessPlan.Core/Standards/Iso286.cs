@@ -150,7 +150,7 @@ public static class Iso286
         {
             switch (c.Letter)
             {
-                case K when size > ThreeMillimetres:
+                case K when special:
                 case N when size <= OneMillimetre:
                     return ClassLookup.Refused(ClassGap.LetterNotInGrade);
                 case N when special:
