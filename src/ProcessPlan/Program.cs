@@ -1,0 +1,49 @@
+using System.CommandLine;
+using System.Globalization;
+using System.Text;
+
+namespace ProcessPlan;
+
+internal static class Program
+{
+    public static int Main(string[] args)
+    {
+        // Numbers are read and written alike on every machine, whatever its language.
+        CultureInfo.DefaultThreadCurrentCulture = CultureInfo.CurrentCulture = CultureInfo.InvariantCulture;
+        if (OperatingSystem.IsWindows() && !Console.IsOutputRedirected)
+        {
+            Console.OutputEncoding = Encoding.UTF8;
+        }
+
+        return Run(args, Streams.OfProcess());
+    }
+
+    /// <summary>The whole program but for its process. The one place that catches: whatever goes wrong ends in one sentence.</summary>
+    internal static int Run(string[] args, Streams streams)
+    {
+        try
+        {
+            return args.Length == 0 ? Screens.Open(streams) : Commands(streams).Answer(args, streams);
+        }
+        catch (IOException closed) when (ClosedPipe.Is(closed))
+        {
+            // Who reads has seen enough; there is nobody left to tell.
+            return ExitCode.World;
+        }
+        catch (Exception failure) when (failure is IOException or UnauthorizedAccessException)
+        {
+            streams.Error.WriteLine($"processplan: {failure.Message}");
+            return ExitCode.World;
+        }
+        catch (Exception defect)
+        {
+            streams.Error.WriteLine($"processplan: a defect of the program, please report it: {defect.GetType().Name}, {defect.Message}");
+            return ExitCode.World;
+        }
+    }
+
+    private static RootCommand Commands(Streams streams) => new("Plans how a machinist makes a hole, shaft, slot or tongue to its drawing.")
+    {
+        LimitsCommand.Create(streams),
+    };
+}
