@@ -45,5 +45,6 @@ internal static class Program
     private static RootCommand Commands(Streams streams) => new("Plans how a machinist makes a hole, shaft, slot or tongue to its drawing.")
     {
         LimitsCommand.Create(streams),
+        PlanCommand.Create(streams),
     };
 }
