@@ -16,16 +16,13 @@ namespace ProcessPlan.Core.Routing;
 internal sealed class RouteSearch
 {
     /// <summary>The largest hole drilled in solid metal with one drill; larger ones need a pilot (after the sizes of handbook table A1; from memory).</summary>
-    private static readonly Length LargestSingleDrill = Length.FromMillimetres(26);
+    public static readonly Length LargestSingleDrill = Length.FromMillimetres(26);
 
     /// <summary>Above this size a reamer is not asked to go from a drilled hole to IT7 in one pass (common practice, no source).</summary>
     private static readonly Length LargestReamAfterDrill = Length.FromMillimetres(12);
 
     /// <summary>A cut that the machinist sets gains at most this many grades (textbook rule: roughing 2 to 4, finishing 1 to 2; from memory).</summary>
     private const int MostGradesGained = 4;
-
-    /// <summary>Pilot over drill, in the middle of the handbook's pairs 15 for 28 to 25 for 48.</summary>
-    private const double PilotShare = 0.55;
 
     /// <summary>Permissible deviation of a cast size (ISO 8062-3, DCTG 10, 25 to 63 mm: 2.8 mm in all; from memory).</summary>
     private static readonly Deviation CastTolerance = Deviation.FromMicrometres(1400);
@@ -39,6 +36,7 @@ internal sealed class RouteSearch
     private readonly List<Change> _changes;
     private readonly CuttingData _data;
     private readonly CostBound _bound;
+    private readonly Drills _drills;
     private readonly PriorityQueue<Step, (double Cost, int Order)> _open = new();
     private int _order;
 
@@ -49,6 +47,7 @@ internal sealed class RouteSearch
         _candidates = candidates;
         _changes = Change.For(job, shop);
         _data = CuttingData.For(job.Group);
+        _drills = new Drills(job, shop, _data);
         _bound = new CostBound(job, candidates, (before, after) => MayPrecede(before, after.Process, null, after.LeftGrade, isLast: false));
     }
 
@@ -410,7 +409,7 @@ internal sealed class RouteSearch
 
         bool fits = false;
         long nearest = long.MaxValue;
-        (double Cost, Tool Tool, MetalWindow Leaving)? best = null;
+        (double Cost, Drill Drill)? best = null;
         foreach (Tool tool in _shop.ToolsNear(use, entering.Sizes(_job.IsInternal)))
         {
             if (tool.Stamped > machine.Largest)
@@ -418,7 +417,8 @@ internal sealed class RouteSearch
                 break;
             }
 
-            MetalWindow leaving = MetalWindow.Of(SizedCut.Predict(tool, _job.Group, IsCareful(before, Effort.Routine)).Sizes, _job.IsInternal);
+            Drill? drill = use == ToolUse.Drill ? _drills.Of(tool) : null;
+            MetalWindow leaving = drill?.Leaving ?? MetalWindow.Of(SizedCut.Predict(tool, _job.Group, IsCareful(before, Effort.Routine)).Sizes, _job.IsInternal);
             if (!entering.Holds(leaving))
             {
                 nearest = Math.Min(nearest, Math.Max(entering.Least - leaving.Least, leaving.Most - entering.Most));
@@ -426,14 +426,14 @@ internal sealed class RouteSearch
             }
 
             fits = true;
-            if (use != ToolUse.Drill)
+            if (drill is null)
             {
                 Push(Before(step, before, machine, tool, leaving, between, changesLeft));
             }
-            else if (DrillingCost(step, before, machine, tool, leaving, between) is { } cost && (best is null || cost < best.Value.Cost))
+            else if (CostWith(drill, step, machine, between) is { } cost && (best is null || cost < best.Value.Cost))
             {
                 // A drill ends the way back, alone or with its pilot: of all sizes only the cheapest can belong to a best route.
-                best = (cost, tool, leaving);
+                best = (cost, drill);
             }
         }
 
@@ -441,65 +441,34 @@ internal sealed class RouteSearch
         {
             Miss(step, before.Process.Name, nearest);
         }
-        else if (best is { } drill)
+        else if (best is { } chosen)
         {
-            PushDrilled(Before(step, before, machine, drill.Tool, drill.Leaving, between, changesLeft));
+            PushDrilled(Before(step, before, machine, chosen.Drill.Tool, chosen.Drill.Leaving, between, changesLeft), chosen.Drill);
         }
     }
 
-    /// <summary>What the step, the drill before it and its pilot cost, as far as it depends on the drill; null where the pilot is missing.</summary>
-    private double? DrillingCost(Step step, Candidate before, Machine machine, Tool tool, MetalWindow leaving, Change[] between)
+    /// <summary>What the step, the drill before it and its pilot cost, as far as it depends on the drill; null where the drill cannot end the way back.</summary>
+    private double? CostWith(Drill drill, Step step, Machine machine, Change[] between)
     {
-        if (step.ChangesLeft > between.Length || _job.Start.Kind != StartKind.Solid || (tool.Stamped > LargestSingleDrill && PilotFor(tool) is null))
+        if (step.ChangesLeft > between.Length || _job.Start.Kind != StartKind.Solid || (drill.Tool.Stamped > LargestSingleDrill && drill.Pilot is null))
         {
             return null;
         }
 
-        double cut = CutTime.For(new Cut(before.Process, _data, tool.Stamped, _job.Extent, null, before.Process.LeftRa, Effort.Routine)).Minutes;
-        double pilot = tool.Stamped > LargestSingleDrill ? machine.ToolChangeMinutes + CutTime.For(new Cut(before.Process, _data, PilotFor(tool)!.Stamped, _job.Extent, null, before.Process.LeftRa, Effort.Routine)).Minutes : 0;
-        return CostOf(step, Grown(leaving, between), machine != step.Machine || between.Length > 0).PerGoodPiece(step.YieldToEnd, _job.Quantity)
-            + (cut + pilot) * machine.RatePerMinute / step.YieldToEnd;
+        double drilling = drill.CutMinutes + (drill.Pilot is null ? 0 : drill.PilotMinutes + machine.ToolChangeMinutes);
+        return CostOf(step, Grown(drill.Leaving, between), machine != step.Machine || between.Length > 0).PerGoodPiece(step.YieldToEnd, _job.Quantity)
+            + drilling * machine.RatePerMinute / step.YieldToEnd;
     }
 
-    private void PushDrilled(Step drill)
+    private void PushDrilled(Step step, Drill drill)
     {
-        if (_job.AsksForPosition && !drill.Places)
+        if (_job.AsksForPosition && !step.Places)
         {
             return;
         }
 
-        if (drill.Tool!.Stamped <= LargestSingleDrill)
-        {
-            PushBlank(drill, null, "solid metal");
-            return;
-        }
-
-        Tool pilot = PilotFor(drill.Tool)!;
-        MetalWindow leaving = MetalWindow.Of(SizedCut.Predict(pilot, _job.Group, careful: false).Sizes, _job.IsInternal);
-        PushBlank(Before(drill, drill.Candidate!, drill.Machine!, pilot, leaving, [], 0), null, "solid metal");
-    }
-
-    /// <summary>The drill nearest to the usual share of the size among those that go into solid metal.</summary>
-    private Tool? PilotFor(Tool drill)
-    {
-        Length wanted = new((long)(drill.Stamped.Picometres * PilotShare));
-        Tool? best = null;
-        foreach (Tool tool in _shop.Tools(ToolUse.Drill))
-        {
-            if (tool.Stamped > LargestSingleDrill)
-            {
-                break;
-            }
-
-            if (best is null || Distance(tool) < Distance(best))
-            {
-                best = tool;
-            }
-        }
-
-        return best;
-
-        long Distance(Tool tool) => Math.Abs(tool.Stamped.Picometres - wanted.Picometres);
+        Step first = drill.Pilot is { } pilot ? Before(step, step.Candidate!, step.Machine!, pilot, _drills.Of(pilot).Leaving, [], 0) : step;
+        PushBlank(first, null, "solid metal");
     }
 
     private StockNeed Need(Step step, string before, long metal, Deviation tolerance, bool sameClamping, bool afterHeat) =>
