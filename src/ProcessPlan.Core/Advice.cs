@@ -71,7 +71,7 @@ internal static class Advice
     {
         yield return $"machines, rates and tools of the {shop.Name}, in {shop.Currency}; capability from the handbook, not proven here";
         yield return "sizes at 20 °C; stock and sizes on " + (job.Feature.IsRound ? "diameter" : "width");
-        yield return "price without material, tool wear and overhead outside the machine rates";
+        yield return "price without material and overhead outside the machine rates";
         yield return job.Quantity <= 50
             ? "small lot (up to 50): the handbook's stock where it is larger than the analytical one"
             : "lot over 50: least stock by the analytical method";

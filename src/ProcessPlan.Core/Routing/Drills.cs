@@ -12,7 +12,8 @@ namespace ProcessPlan.Core.Routing;
 /// <param name="CutMinutes">Time under the tool.</param>
 /// <param name="Pilot">The drill before it, or null.</param>
 /// <param name="PilotMinutes">Time under the pilot.</param>
-internal sealed record Drill(Tool Tool, MetalWindow Leaving, double CutMinutes, Tool? Pilot, double PilotMinutes);
+/// <param name="Wear">Cost of the wear of both on one piece.</param>
+internal sealed record Drill(Tool Tool, MetalWindow Leaving, double CutMinutes, Tool? Pilot, double PilotMinutes, double Wear);
 
 /// <summary>The shop's drills for one job, each worked out when it is first asked for.</summary>
 internal sealed class Drills(Job job, ShopFloor shop, CuttingData data)
@@ -29,14 +30,21 @@ internal sealed class Drills(Job job, ShopFloor shop, CuttingData data)
         {
             Tool? pilot = tool.Stamped > RouteSearch.LargestSingleDrill ? PilotFor(tool) : null;
             MetalWindow leaving = MetalWindow.Of(SizedCut.Predict(tool, job.Group, careful: false).Sizes, job.IsInternal);
-            drill = new Drill(tool, leaving, CutMinutes(tool), pilot, pilot is null ? 0 : CutMinutes(pilot));
+            (double minutes, double wear) = Work(tool);
+            (double pilotMinutes, double pilotWear) = pilot is null ? (0, 0) : Work(pilot);
+            drill = new Drill(tool, leaving, minutes, pilot, pilotMinutes, wear + pilotWear);
             _known.Add(tool, drill);
         }
 
         return drill;
     }
 
-    private double CutMinutes(Tool tool) => CutTime.For(new Cut(_drilling!, data, tool.Stamped, job.Extent, null, _drilling!.LeftRa, Effort.Routine)).Minutes;
+    private (double Minutes, double Wear) Work(Tool tool)
+    {
+        Cut cut = new(_drilling!, data, tool.Stamped, job.Extent, null, _drilling!.LeftRa, Effort.Routine);
+        double minutes = CutTime.For(cut).Minutes;
+        return (minutes, ToolWear.Of(cut, tool, minutes));
+    }
 
     /// <summary>The drill nearest to the usual share of the size among those that go into solid metal.</summary>
     private Tool? PilotFor(Tool drill)

@@ -18,8 +18,9 @@ internal sealed class RouteSearch
     /// <summary>The largest hole drilled in solid metal with one drill; larger ones need a pilot (after the sizes of handbook table A1; from memory).</summary>
     public static readonly Length LargestSingleDrill = Length.FromMillimetres(26);
 
-    /// <summary>Above this size a reamer is not asked to go from a drilled hole to IT7 in one pass (common practice, no source).</summary>
+    /// <summary>Above this size a reamer is not asked to go from a drilled or rough-bored hole to IT7 in one pass (common practice, no source).</summary>
     private static readonly Length LargestReamAfterDrill = Length.FromMillimetres(12);
+    private static readonly ToleranceGrade LeftForReamingToIt7 = ToleranceGrade.It(11);
 
     /// <summary>A cut that the machinist sets gains at most this many grades (textbook rule: roughing 2 to 4, finishing 1 to 2; from memory).</summary>
     private const int MostGradesGained = 4;
@@ -363,7 +364,8 @@ internal sealed class RouteSearch
         bool coarser = before.LeftGrade > held || (process.StartsRough && before.LeftGrade == held && drilled);
         bool fineEnough = before.Process.LeftGrade <= process.EnterGrade;
         bool smallStep = process.SizedBy is not null || before.LeftGrade.Ordinal - held.Ordinal <= MostGradesGained;
-        bool tooFarForOneReamer = process.SizedBy == ToolUse.Ream && drilled && isLast && held <= ToleranceGrade.It(7) && tool!.Stamped > LargestReamAfterDrill;
+        bool tooFarForOneReamer = process.SizedBy == ToolUse.Ream && before.LeftGrade > LeftForReamingToIt7 && isLast
+            && held <= ToleranceGrade.It(7) && tool!.Stamped > LargestReamAfterDrill;
         return coarser && fineEnough && smallStep && !tooFarForOneReamer;
     }
 
@@ -457,7 +459,7 @@ internal sealed class RouteSearch
 
         double drilling = drill.CutMinutes + (drill.Pilot is null ? 0 : drill.PilotMinutes + machine.ToolChangeMinutes);
         return CostOf(step, Grown(drill.Leaving, between), machine != step.Machine || between.Length > 0).PerGoodPiece(step.YieldToEnd, _job.Quantity)
-            + drilling * machine.RatePerMinute / step.YieldToEnd;
+            + (drilling * machine.RatePerMinute + drill.Wear) / step.YieldToEnd;
     }
 
     private void PushDrilled(Step step, Drill drill)

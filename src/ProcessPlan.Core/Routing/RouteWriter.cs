@@ -1,5 +1,6 @@
 using System.Globalization;
 using ProcessPlan.Core.Capability;
+using ProcessPlan.Core.Costing;
 using ProcessPlan.Core.Features;
 using ProcessPlan.Core.Inspection;
 using ProcessPlan.Core.Shop;
@@ -216,7 +217,12 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
         yield return new Reason("minutes", string.Create(CultureInfo.InvariantCulture,
             $"cut {cost.Cutting.Minutes:0.00} + tool change {cost.Machine.ToolChangeMinutes:0.00} + checking {cost.Checking:0.00} + handling {cost.Handling:0.00} = {cost.Minutes:0.00} min"));
         yield return new Reason("cost", string.Create(CultureInfo.InvariantCulture,
-            $"{cost.Machine.RatePerHour:0.##}/60 · ({cost.Minutes:0.00} min / yield to the end {step.YieldToEnd:0.0000} + set-up {cost.SetUp:0} min / {job.Quantity}) = {cost.PerGoodPiece(step.YieldToEnd, job.Quantity):0.00} {shop.Currency}"));
+            $"({cost.Machine.RatePerHour:0.##}/60 · {cost.Minutes:0.00} min + wear {cost.Wear:0.000}) / yield to the end {step.YieldToEnd:0.0000} + {cost.Machine.RatePerHour:0.##}/60 · set-up {cost.SetUp:0} min / {job.Quantity} = {cost.PerGoodPiece(step.YieldToEnd, job.Quantity):0.00} {shop.Currency}"));
+        if (cost.Wear > 0)
+        {
+            yield return new Reason("cost", $"wear: {ToolWear.Explain(cost.Cut, step.Tool, cost.Cutting.Minutes)} {shop.Currency} [{ToolWear.Citation}]");
+        }
+
         yield return new Reason("inspection", $"{instrument.Name}: U {instrument.Uncertainty.Format()} µm against {held.Width.Format()} µm [{instrument.Origin}]");
     }
 

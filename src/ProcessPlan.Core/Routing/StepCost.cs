@@ -13,7 +13,8 @@ namespace ProcessPlan.Core.Routing;
 /// <param name="Handling">Minutes for loading; zero where the part is on the machine already.</param>
 /// <param name="Machine">The machine.</param>
 /// <param name="SetUp">Minutes once a lot; zero where the part is on the machine already.</param>
-internal readonly record struct StepCost(Cut Cut, CutTime Cutting, double Checking, double Handling, Machine Machine, double SetUp)
+/// <param name="Wear">Cost of the wear on the tool.</param>
+internal readonly record struct StepCost(Cut Cut, CutTime Cutting, double Checking, double Handling, Machine Machine, double SetUp, double Wear)
 {
     /// <summary>Run time of a piece.</summary>
     public double Minutes => Cutting.Minutes + Machine.ToolChangeMinutes + Checking + Handling;
@@ -38,10 +39,11 @@ internal readonly record struct StepCost(Cut Cut, CutTime Cutting, double Checki
             step.Effort);
         (Instrument instrument, _) = Instrument.For(job.IsInternal, leaving.Max, leaving.Width);
         Machine machine = step.Machine!;
-        return new StepCost(cut, CutTime.For(cut), instrument.MinutesPerCheck * Checks.PerPiece(process, step.Effort),
-            arrives ? machine.HandlingMinutes : 0, machine, arrives ? machine.SetUpMinutes : 0);
+        CutTime time = CutTime.For(cut);
+        return new StepCost(cut, time, instrument.MinutesPerCheck * Checks.PerPiece(process, step.Effort),
+            arrives ? machine.HandlingMinutes : 0, machine, arrives ? machine.SetUpMinutes : 0, ToolWear.Of(cut, step.Tool, time.Minutes));
     }
 
-    /// <summary>Cost of a good piece: run time over the yield to the end of the route, and its share of the set-up.</summary>
-    public double PerGoodPiece(double yieldToEnd, int quantity) => Machine.RatePerMinute * (Minutes / yieldToEnd + SetUp / quantity);
+    /// <summary>Cost of a good piece: run time and wear over the yield to the end of the route, and its share of the set-up.</summary>
+    public double PerGoodPiece(double yieldToEnd, int quantity) => (Machine.RatePerMinute * Minutes + Wear) / yieldToEnd + Machine.RatePerMinute * SetUp / quantity;
 }

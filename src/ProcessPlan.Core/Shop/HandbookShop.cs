@@ -65,7 +65,8 @@ public static class HandbookShop
             for (decimal size = row.Decimal("from"); size <= to; size += step)
             {
                 Length stamped = Length.FromMillimetres(size);
-                tools.Add(new Tool(Spaced(row["name"]), use, stamped, OwnSize(stamped, row["made"]), row["made"], row["material"]));
+                tools.Add(new Tool(Spaced(row["name"]), use, stamped, OwnSize(stamped, row["made"]), row["made"], row["material"],
+                    row.Decimal("price") + row.Decimal("perMm") * size, row.Double("life")));
             }
         }
 
