@@ -42,6 +42,11 @@ public static class LimitsText
             return toleranceClass.ToString();
         }
 
+        if (feature.General is { } general)
+        {
+            return Iso2768.Name(general);
+        }
+
         bool symmetric = feature.Upper == -feature.Lower;
         if (feature.Unit == LengthUnit.Inch && scale.PlacesOf(feature.Nominal, feature.Limits.Max, feature.Limits.Min) is { } places)
         {
@@ -122,6 +127,11 @@ public static class LimitsText
         List<string> sources = [];
         foreach (Feature feature in request.Features)
         {
+            if (feature.General is { } general)
+            {
+                sources.Add(Iso2768.Cite(feature.Nominal, general).ToString());
+            }
+
             if ((feature.Class?.Grade ?? feature.NearestGrade) is { } grade)
             {
                 sources.Add(Iso286.Cite(feature.Nominal, grade).ToString());
