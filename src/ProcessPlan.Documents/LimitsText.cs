@@ -87,7 +87,7 @@ public static class LimitsText
     {
         Fit fit = new(inside.Limits, outside.Limits);
         (string hole, string shaft) = (inside.Kind.Word(), outside.Kind.Word());
-        (string loose, string close) = ($"the largest {hole} on the smallest {shaft}", $"the smallest {hole} on the largest {shaft}");
+        (string loose, string close) = ($"largest {hole} on smallest {shaft}", $"smallest {hole} on largest {shaft}");
         target.WriteLine();
         switch (fit.Character)
         {
@@ -118,7 +118,7 @@ public static class LimitsText
         const int InchPlaces = 5;
         string inches = UnitScale.Inch.Format(extreme, InchPlaces);
         string figure = scale.Unit == LengthUnit.Inch ? $"{inches} in = {extreme.Format()} µm" : $"{extreme.Format()} µm = {inches} in";
-        target.WriteLine($"  {name,-21}  {figure,-22}  {meeting}");
+        target.WriteLine($"  {name,-21} {figure,-24} {meeting}");
     }
 
     private static void WriteSources(TextWriter target, FeatureRequest request)
