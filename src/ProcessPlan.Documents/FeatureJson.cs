@@ -1,5 +1,6 @@
 using System.Text.Json;
 using ProcessPlan.Core.Features;
+using ProcessPlan.Core.Standards;
 using ProcessPlan.Core.Values;
 
 namespace ProcessPlan.Documents;
@@ -7,12 +8,16 @@ namespace ProcessPlan.Documents;
 /// <summary>Features as JSON: the fields of the limits always, whatever else was read where it was read.</summary>
 public static class FeatureJson
 {
+    private const int NanometrePlaces = 3;
+    private const int TenthPlaces = 1;
+
     private static readonly JsonEncodedText Features = JsonEncodedText.Encode("features");
     private static readonly JsonEncodedText Kind = JsonEncodedText.Encode("kind");
     private static readonly JsonEncodedText Nominal = JsonEncodedText.Encode("nominal");
     private static readonly JsonEncodedText Class = JsonEncodedText.Encode("toleranceClass");
     private static readonly JsonEncodedText Grade = JsonEncodedText.Encode("grade");
     private static readonly JsonEncodedText NearestGrade = JsonEncodedText.Encode("nearestGrade");
+    private static readonly JsonEncodedText General = JsonEncodedText.Encode("generalTolerance");
     private static readonly JsonEncodedText Tolerance = JsonEncodedText.Encode("toleranceUm");
     private static readonly JsonEncodedText Upper = JsonEncodedText.Encode("upperUm");
     private static readonly JsonEncodedText Lower = JsonEncodedText.Encode("lowerUm");
@@ -25,9 +30,12 @@ public static class FeatureJson
     private static readonly JsonEncodedText BottomRoom = JsonEncodedText.Encode("bottomRoom");
     private static readonly JsonEncodedText Wall = JsonEncodedText.Encode("wall");
     private static readonly JsonEncodedText Interrupted = JsonEncodedText.Encode("interrupted");
-    private static readonly JsonEncodedText Finish = JsonEncodedText.Encode("finish");
+    private static readonly JsonEncodedText RaUm = JsonEncodedText.Encode("raUm");
+    private static readonly JsonEncodedText RzUm = JsonEncodedText.Encode("rzUm");
     private static readonly JsonEncodedText Material = JsonEncodedText.Encode("material");
     private static readonly JsonEncodedText Hardness = JsonEncodedText.Encode("hardness");
+    private static readonly JsonEncodedText Value = JsonEncodedText.Encode("value");
+    private static readonly JsonEncodedText Scale = JsonEncodedText.Encode("scale");
     private static readonly JsonEncodedText Treatment = JsonEncodedText.Encode("treatment");
     private static readonly JsonEncodedText Depth = JsonEncodedText.Encode("depth");
     private static readonly JsonEncodedText Coating = JsonEncodedText.Encode("coating");
@@ -80,6 +88,11 @@ public static class FeatureJson
             json.WriteString(NearestGrade, feature.NearestGrade?.Text);
         }
 
+        if (feature.General is { } general)
+        {
+            json.WriteString(General, Iso2768.Name(general));
+        }
+
         json.WriteMicrometres(Tolerance, feature.Limits.Width);
         json.WriteMicrometres(Upper, feature.Upper);
         json.WriteMicrometres(Lower, feature.Lower);
@@ -106,7 +119,7 @@ public static class FeatureJson
 
         if (feature.Finish is { } finish)
         {
-            json.WriteString(Finish, finish.ToString());
+            json.WriteDecimal(finish.IsRa ? RaUm : RzUm, finish.Nanometres, NanometrePlaces);
         }
 
         if (feature.Geometry.Count > 0)
@@ -131,16 +144,12 @@ public static class FeatureJson
             json.WriteString(Material, material);
         }
 
-        if (feature.Hardness is { } hardness)
-        {
-            json.WriteString(Hardness, hardness.ToString());
-        }
-
+        WriteHardness(json, feature.Hardness);
         if (feature.Treatment is { } treatment)
         {
             json.WriteStartObject(Treatment);
             json.WriteString(Kind, Word(treatment.Kind));
-            json.WriteString(Hardness, treatment.Hardness?.ToString());
+            WriteHardness(json, treatment.Hardness);
             json.WriteMillimetresIfGiven(Depth, treatment.Depth);
             json.WriteEndObject();
         }
@@ -166,6 +175,17 @@ public static class FeatureJson
         if (feature.Quantity is { } quantity)
         {
             json.WriteNumber(Quantity, quantity);
+        }
+    }
+
+    private static void WriteHardness(Utf8JsonWriter json, Hardness? asked)
+    {
+        if (asked is { } hardness)
+        {
+            json.WriteStartObject(Hardness);
+            json.WriteDecimal(Value, hardness.Tenths, TenthPlaces);
+            json.WriteString(Scale, hardness.Scale switch { HardnessScale.HRC => "HRC", HardnessScale.HB => "HB", _ => "HV" });
+            json.WriteEndObject();
         }
     }
 

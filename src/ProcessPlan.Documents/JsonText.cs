@@ -1,6 +1,7 @@
 using System.Buffers;
 using System.Text.Encodings.Web;
 using System.Text.Json;
+using ProcessPlan.Core.Text;
 using ProcessPlan.Core.Values;
 
 namespace ProcessPlan.Documents;
@@ -41,5 +42,13 @@ public static class JsonText
         Span<byte> number = stackalloc byte[LongestNumber];
         json.WritePropertyName(name);
         json.WriteRawValue(number[..deviation.WriteMicrometres(number)], skipInputValidation: true);
+    }
+
+    /// <summary>A decimal, exact.</summary>
+    public static void WriteDecimal(this Utf8JsonWriter json, JsonEncodedText name, long units, int places)
+    {
+        Span<byte> number = stackalloc byte[LongestNumber];
+        json.WritePropertyName(name);
+        json.WriteRawValue(number[..DecimalText.Write(number, units, places)], skipInputValidation: true);
     }
 }

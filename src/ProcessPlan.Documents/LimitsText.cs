@@ -42,6 +42,11 @@ public static class LimitsText
             return toleranceClass.ToString();
         }
 
+        if (feature.General is { } general)
+        {
+            return Iso2768.Name(general);
+        }
+
         bool symmetric = feature.Upper == -feature.Lower;
         if (feature.Unit == LengthUnit.Inch && scale.PlacesOf(feature.Nominal, feature.Limits.Max, feature.Limits.Min) is { } places)
         {
@@ -82,7 +87,7 @@ public static class LimitsText
     {
         Fit fit = new(inside.Limits, outside.Limits);
         (string hole, string shaft) = (inside.Kind.Word(), outside.Kind.Word());
-        (string loose, string close) = ($"the largest {hole} on the smallest {shaft}", $"the smallest {hole} on the largest {shaft}");
+        (string loose, string close) = ($"largest {hole} on smallest {shaft}", $"smallest {hole} on largest {shaft}");
         target.WriteLine();
         switch (fit.Character)
         {
@@ -113,7 +118,7 @@ public static class LimitsText
         const int InchPlaces = 5;
         string inches = UnitScale.Inch.Format(extreme, InchPlaces);
         string figure = scale.Unit == LengthUnit.Inch ? $"{inches} in = {extreme.Format()} µm" : $"{extreme.Format()} µm = {inches} in";
-        target.WriteLine($"  {name,-21}  {figure,-22}  {meeting}");
+        target.WriteLine($"  {name,-21} {figure,-24} {meeting}");
     }
 
     private static void WriteSources(TextWriter target, FeatureRequest request)
@@ -122,6 +127,11 @@ public static class LimitsText
         List<string> sources = [];
         foreach (Feature feature in request.Features)
         {
+            if (feature.General is { } general)
+            {
+                sources.Add(Iso2768.Cite(feature.Nominal, general).ToString());
+            }
+
             if ((feature.Class?.Grade ?? feature.NearestGrade) is { } grade)
             {
                 sources.Add(Iso286.Cite(feature.Nominal, grade).ToString());

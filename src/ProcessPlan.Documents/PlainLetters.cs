@@ -26,7 +26,7 @@ public sealed class PlainLetters(TextWriter target) : TextWriter(target.FormatPr
             '×' => "x",
             '·' => "*",
             '…' => "...",
-            '°' => " deg ",
+            '°' => "deg ",
             'Δ' => "delta",
             '≤' => "<=",
             '≥' => ">=",

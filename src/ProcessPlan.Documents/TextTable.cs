@@ -7,7 +7,7 @@ internal sealed class TextTable
 
     private readonly string[] _lines;
 
-    public TextTable(params ReadOnlySpan<string> labels)
+    public TextTable(params string[] labels)
     {
         int width = 0;
         foreach (string label in labels)
@@ -24,7 +24,7 @@ internal sealed class TextTable
     }
 
     /// <summary>Adds a column with its unit above it.</summary>
-    public void Add(string head, params ReadOnlySpan<string> cells)
+    public void Add(string head, params string[] cells)
     {
         int fraction = 0;
         foreach (string cell in cells)

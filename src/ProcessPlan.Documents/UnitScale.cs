@@ -26,7 +26,7 @@ internal readonly record struct UnitScale(LengthUnit Unit)
     }
 
     /// <summary>The fewest places, from <see cref="UsualPlaces"/> on, that hold every one of the lengths exactly; null where none do.</summary>
-    public int? PlacesOf(params ReadOnlySpan<Length> lengths)
+    public int? PlacesOf(params Length[] lengths)
     {
         for (int places = UsualPlaces; places <= MostPlaces; places++)
         {

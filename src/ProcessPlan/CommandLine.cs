@@ -17,8 +17,7 @@ internal static class CommandLine
         ParseResult parsed = root.Parse(args, Reading);
         if (parsed.Errors.Count > 0)
         {
-            streams.Error.WriteLine($"processplan: {Sentence(root, parsed)}");
-            return ExitCode.NotUnderstood;
+            throw new UsageException(Sentence(root, parsed));
         }
 
         using StreamWriter output = streams.OutputText();

@@ -1,6 +1,5 @@
 using System.Buffers;
 using System.CommandLine;
-using System.CommandLine.Parsing;
 using System.Text.Json;
 using ProcessPlan.Core.Features;
 using ProcessPlan.Core.Text;
@@ -13,6 +12,8 @@ namespace ProcessPlan;
 internal sealed class FeatureQuestion
 {
     private const string StandardInput = "-";
+    private const string Millimetres = "mm";
+    private const string Inches = "in";
 
     public Argument<string[]> Feature { get; } = new("feature")
     {
@@ -22,12 +23,11 @@ internal sealed class FeatureQuestion
 
     public Option<bool> Json { get; } = new("--json") { Description = "Answer as one JSON document; - always answers as JSON, one document a line" };
 
-    public Option<LengthUnit?> Unit { get; } = new("--unit")
+    public Option<string> Unit { get; } = new("--unit")
     {
         Description = "Unit that comes first: mm or in; without it the one that was typed",
-        HelpName = "mm|in",
+        HelpName = Millimetres + "|" + Inches,
         Arity = ArgumentArity.ZeroOrOne,
-        CustomParser = ReadUnit,
     };
 
     public Option<bool> Ascii { get; } = new("--ascii") { Description = "Plain characters only: um, dia, +/-" };
@@ -50,30 +50,42 @@ internal sealed class FeatureQuestion
         Func<TextWriter, FeatureRequest, LengthUnit?, int> writeText)
     {
         string[] words = parsed.GetValue(Feature) ?? [];
+        RefuseMisuse(parsed.CommandResult.Command, words);
+        LengthUnit? unit = UnitAsked(parsed);
         if (words is [StandardInput])
         {
             return new FeatureStream(materials(), writeJson).Answer(streams);
-        }
-
-        if (words.Length == 0)
-        {
-            streams.Error.WriteLine($"processplan: {parsed.CommandResult.Command.Name} found no feature; expected one such as 25H7, or - for standard input.");
-            return ExitCode.NotUnderstood;
-        }
-
-        if (Array.Find(words, static word => word.StartsWith("--", StringComparison.Ordinal)) is { } unknown)
-        {
-            streams.Error.WriteLine(
-                $"processplan: '{unknown}' is no option of {parsed.CommandResult.Command.Name}; expected {string.Join(", ", parsed.CommandResult.Command.Options.Select(static option => option.Name))}.");
-            return ExitCode.NotUnderstood;
         }
 
         string line = string.Join(' ', words);
         Parsed<FeatureRequest> read = FeatureLine.Parse(line, materials());
         return parsed.GetValue(Json)
             ? AnswerAsJson(streams.Output, read, writeJson)
-            : AnswerAsText(streams, line, read, parsed.GetValue(Unit), parsed.GetValue(Ascii), writeText);
+            : AnswerAsText(streams, line, read, unit, parsed.GetValue(Ascii), writeText);
     }
+
+    private static void RefuseMisuse(Command command, string[] words)
+    {
+        if (words.Length == 0)
+        {
+            throw new UsageException($"{command.Name} found no feature; expected one such as 25H7, or - for standard input.");
+        }
+
+        // What is no option becomes part of the line: "+0.03 -0" must, "--jsn" must not.
+        if (Array.Find(words, static word => word.StartsWith("--", StringComparison.Ordinal)) is { } unknown)
+        {
+            string options = string.Join(", ", command.Options.Select(static option => option.Name));
+            throw new UsageException($"'{unknown}' is no option of {command.Name}; expected {options}.");
+        }
+    }
+
+    private LengthUnit? UnitAsked(ParseResult parsed) => parsed.GetResult(Unit) is null ? null : parsed.GetValue(Unit) switch
+    {
+        Millimetres => LengthUnit.Millimetre,
+        Inches => LengthUnit.Inch,
+        string other => throw new UsageException($"--unit found '{other}'; expected {Millimetres} or {Inches}."),
+        null => throw new UsageException($"--unit found nothing; expected {Millimetres} or {Inches}."),
+    };
 
     private static int AnswerAsJson(Stream output, Parsed<FeatureRequest> read, Func<Utf8JsonWriter, FeatureRequest, int> write)
     {
@@ -113,15 +125,4 @@ internal sealed class FeatureQuestion
     }
 
     private static TextWriter Letters(TextWriter target, bool ascii) => ascii ? new PlainLetters(target) : target;
-
-    private static LengthUnit? ReadUnit(ArgumentResult result)
-    {
-        string word = result.Tokens is [Token only] ? only.Value : "";
-        if (word is not "mm" and not "in")
-        {
-            result.AddError($"--unit found '{word}'; expected mm or in.");
-        }
-
-        return word == "in" ? LengthUnit.Inch : LengthUnit.Millimetre;
-    }
 }

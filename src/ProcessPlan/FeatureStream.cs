@@ -57,7 +57,7 @@ internal sealed class FeatureStream(MaterialNames materials, Func<Utf8JsonWriter
 
         if (passedOver > 0 && streams.IsErrorTerminal)
         {
-            streams.Error.WriteLine($"processplan: {passedOver} empty lines and remarks of {lines.Number} lines passed over.");
+            streams.Error.WriteLine($"processplan: {passedOver} of {lines.Number} lines passed over: empty, or a remark.");
         }
 
         return _exit;

@@ -25,6 +25,11 @@ internal static class Program
         {
             return args.Length == 0 ? Screens.Open(streams) : Commands(streams).Answer(args, streams);
         }
+        catch (UsageException usage)
+        {
+            streams.Error.WriteLine($"processplan: {usage.Message}");
+            return ExitCode.NotUnderstood;
+        }
         catch (IOException closed) when (ClosedPipe.Is(closed))
         {
             // Who reads has seen enough; there is nobody left to tell.
