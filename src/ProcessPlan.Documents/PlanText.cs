@@ -96,8 +96,7 @@ public sealed class PlanText(TextWriter target, LengthUnit? unit, WhyAsked? why)
     private void Write(Operation operation, UnitScale scale)
     {
         string condition = operation.Condition == Condition.Soft ? "" : operation.Condition == Condition.Hard ? ", hard" : ", coated";
-        string effort = operation.Effort == Effort.Special ? "  SPECIAL EFFORT" : "";
-        target.WriteLine($"{operation.Number,3}  {operation.Process,-26}{operation.Machine + condition,-22}{operation.Tool?.Label}{effort}".TrimEnd());
+        target.WriteLine($"{operation.Number,3}  {operation.Process,-26}{operation.Machine + condition,-22}{operation.Tool?.Label}".TrimEnd());
         if (operation.Size is { } size)
         {
             int places = scale.PlacesOf(size.Max, size.Min) ?? scale.UsualPlaces + 1;
