@@ -6,6 +6,12 @@ namespace ProcessPlan;
 
 internal static class Program
 {
+    private static readonly (string Name, Func<Streams, Command> Create)[] Commands =
+    [
+        ("limits", LimitsCommand.Create),
+        ("plan", PlanCommand.Create),
+    ];
+
     public static int Main(string[] args)
     {
         // Numbers are read and written alike on every machine, whatever its language.
@@ -23,7 +29,7 @@ internal static class Program
     {
         try
         {
-            return args.Length == 0 ? Screens.Open(streams) : Commands(streams).Answer(args, streams);
+            return args.Length == 0 ? Screens.Open(streams) : CommandsFor(args[0], streams).Answer(args, streams);
         }
         catch (UsageException usage)
         {
@@ -47,9 +53,16 @@ internal static class Program
         }
     }
 
-    private static RootCommand Commands(Streams streams) => new("Plans how a machinist makes a hole, shaft, slot or tongue to its drawing.")
+    /// <summary>The tree of commands; only the one that is meant is made, all of them where none is.</summary>
+    private static RootCommand CommandsFor(string first, Streams streams)
     {
-        LimitsCommand.Create(streams),
-        PlanCommand.Create(streams),
-    };
+        RootCommand root = new("Plans how a machinist makes a hole, shaft, slot or tongue to its drawing.");
+        (string Name, Func<Streams, Command> Create)[] meant = Array.FindAll(Commands, command => command.Name == first);
+        foreach ((_, Func<Streams, Command> create) in meant.Length > 0 ? meant : Commands)
+        {
+            root.Subcommands.Add(create(streams));
+        }
+
+        return root;
+    }
 }
