@@ -17,6 +17,9 @@ internal readonly record struct StockNeed
 
     private const double SameClampingShare = 0.06;
     private const double TurretIndex = 50;
+
+    /// <summary>The handbook leaves so much more for grinding hardened metal.</summary>
+    private const long GrindingAfterHeat = 100;
     private const double BarBendPerMm = 1.0;
     private const double CentresFromRatio = 4;
     private const double HeatBendPerMm = 0.5;
@@ -88,6 +91,8 @@ internal readonly record struct StockNeed
         bool flat = !job.Feature.IsRound;
         double spatial = flat ? error + setting : Math.Sqrt(error * error + setting * setting);
         (Stock? table, Citation? origin) = HandbookStock(process.Name, before, size);
+        bool grinds = process.Ability.StartsWith("grind", StringComparison.Ordinal);
+        table = afterHeat && grinds ? table + Stock.FromMicrometres(GrindingAfterHeat) : table;
         return new StockNeed
         {
             Rz = state.RzMicrometres,
@@ -157,13 +162,14 @@ internal readonly record struct StockNeed
 
     private static double SettingError(Process process, Job job, Length size, bool sameClamping, bool blank)
     {
-        if (IsOnCentres(job))
+        // Cylindrical grinding runs on dead centres whatever the length: no radial error.
+        if (IsOnCentres(job) || process.Ability == "grind-round")
         {
             return 0;
         }
 
         (double Hot, double Pre, double Finish) row = Chuck.TryFind(size, out (double Hot, double Pre, double Finish) found) ? found : (600, 140, 70);
         double fresh = blank ? row.Hot : process.RoutineGrade <= ToleranceGrade.It(8) ? row.Finish : row.Pre;
-        return sameClamping ? SameClampingShare * row.Pre + TurretIndex : fresh;
+        return sameClamping ? SameClampingShare * row.Pre + (process.Ability == "grind-hole" ? 0 : TurretIndex) : fresh;
     }
 }
