@@ -76,7 +76,7 @@ internal static class RefusalWriter
         List<string> open = [];
         SizeWindow hole = job.Feature.Limits;
         if (candidates.Any(static candidate => candidate is { Finishes: not null, Process.SizedBy: ToolUse.Ream })
-            && ReamerChoice.Best(shop.ToolsNear(ToolUse.Ream, hole), hole, job.Feature.Class) is null)
+            && shop.Tools(ToolUse.Ream).All(tool => !ReamerChoice.Suits(tool, hole, out _)))
         {
             SizeWindow reamer = Din1420.ReamerFor(hole);
             open.Add($"a reamer whose own size is {reamer.Min.Format(3)} to {reamer.Max.Format(3)} mm (DIN 1420)");

@@ -10,6 +10,10 @@ public sealed class Candidate
 {
     private const double DeepForBoring = 4;
     private const double DeepForDrilling = 5;
+
+    /// <summary>Over this a turned shaft needs a steady and gives a grade away (common practice, no source).</summary>
+    private const double SlenderForTurning = 12;
+
     private static readonly Length Small = Length.FromMillimetres(3);
     private static readonly Length Large = Length.FromMillimetres(250);
 
@@ -199,6 +203,11 @@ public sealed class Candidate
         if (job.Kind == FeatureKind.Hole && (drillsOrReams || process.Ability == "bore") && job.LengthRatio > deep)
         {
             lose($"{job.LengthRatio:0.#} times the diameter deep");
+        }
+
+        if (process.Ability == "turn" && job.LengthRatio > SlenderForTurning)
+        {
+            lose($"{job.LengthRatio:0.#} times the diameter long");
         }
 
         if (drillsOrReams && job.Group is "M" or "S1" or "S2")

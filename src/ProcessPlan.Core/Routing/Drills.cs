@@ -2,7 +2,6 @@ using ProcessPlan.Core.Capability;
 using ProcessPlan.Core.Costing;
 using ProcessPlan.Core.Shop;
 using ProcessPlan.Core.Tooling;
-using ProcessPlan.Core.Values;
 
 namespace ProcessPlan.Core.Routing;
 
@@ -13,13 +12,18 @@ namespace ProcessPlan.Core.Routing;
 /// <param name="Pilot">The drill before it, or null.</param>
 /// <param name="PilotMinutes">Time under the pilot.</param>
 /// <param name="Wear">Cost of the wear of both on one piece.</param>
-internal sealed record Drill(Tool Tool, MetalWindow Leaving, double CutMinutes, Tool? Pilot, double PilotMinutes, double Wear);
+internal sealed record Drill(Tool Tool, MetalWindow Leaving, double CutMinutes, Tool? Pilot, double PilotMinutes, double Wear)
+{
+    /// <summary>Whether it goes into solid metal, alone or after its pilot.</summary>
+    public bool CanOpen => Pilot is not null || Tool.Stamped <= RouteSearch.LargestSingleDrill;
+}
 
 /// <summary>The shop's drills for one job, each worked out when it is first asked for.</summary>
 internal sealed class Drills(Job job, ShopFloor shop, CuttingData data)
 {
-    /// <summary>Pilot over drill, in the middle of the handbook's pairs 15 for 28 to 25 for 48 (table A1; from memory).</summary>
-    private const double PilotShare = 0.55;
+    // Pilot over drill, from the handbook's pairs: 15 for 30 is the smallest share, 25 for 40 the largest (table A1; from memory).
+    private const double LeastPilotShare = 0.5;
+    private const double MostPilotShare = 0.625;
 
     private readonly Dictionary<Tool, Drill> _known = new(ReferenceEqualityComparer.Instance);
     private readonly Process? _drilling = ProcessCatalogue.Handbook.FirstOrDefault(static process => process.SizedBy == ToolUse.Drill);
@@ -46,26 +50,21 @@ internal sealed class Drills(Job job, ShopFloor shop, CuttingData data)
         return (minutes, ToolWear.Of(cut, tool, minutes));
     }
 
-    /// <summary>The drill nearest to the usual share of the size among those that go into solid metal.</summary>
+    /// <summary>The quickest pilot within the handbook's share of the drill; null where the crib has none. What comes later does not matter to it.</summary>
     private Tool? PilotFor(Tool drill)
     {
-        Length wanted = new((long)(drill.Stamped.Picometres * PilotShare));
-        Tool? best = null;
+        Tool? quickest = null;
+        double least = double.PositiveInfinity;
         foreach (Tool tool in shop.Tools(ToolUse.Drill))
         {
-            if (tool.Stamped > RouteSearch.LargestSingleDrill)
+            double share = tool.Stamped.Picometres / (double)drill.Stamped.Picometres;
+            if (tool.Stamped <= RouteSearch.LargestSingleDrill && share is >= LeastPilotShare and <= MostPilotShare)
             {
-                break;
-            }
-
-            if (best is null || Distance(tool) < Distance(best))
-            {
-                best = tool;
+                double minutes = Work(tool).Minutes;
+                (quickest, least) = minutes < least ? (tool, minutes) : (quickest, least);
             }
         }
 
-        return best;
-
-        long Distance(Tool tool) => Math.Abs(tool.Stamped.Picometres - wanted.Picometres);
+        return quickest;
     }
 }

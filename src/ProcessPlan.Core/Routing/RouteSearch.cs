@@ -20,10 +20,12 @@ internal sealed class RouteSearch
 
     /// <summary>Above this size a reamer is not asked to go from a drilled or rough-bored hole to IT7 in one pass (common practice, no source).</summary>
     private static readonly Length LargestReamAfterDrill = Length.FromMillimetres(12);
-    private static readonly ToleranceGrade LeftForReamingToIt7 = ToleranceGrade.It(11);
 
     /// <summary>A cut that the machinist sets gains at most this many grades (textbook rule: roughing 2 to 4, finishing 1 to 2; from memory).</summary>
     private const int MostGradesGained = 4;
+
+    /// <summary>What drilling and rough boring leave.</summary>
+    private static readonly ToleranceGrade RoughGrade = ToleranceGrade.It(12);
 
     /// <summary>Permissible deviation of a cast size (ISO 8062-3, DCTG 10, 25 to 63 mm: 2.8 mm in all; from memory).</summary>
     private static readonly Deviation CastTolerance = Deviation.FromMicrometres(1400);
@@ -49,7 +51,8 @@ internal sealed class RouteSearch
         _changes = Change.For(job, shop);
         _data = CuttingData.For(job.Group);
         _drills = new Drills(job, shop, _data);
-        _bound = new CostBound(job, candidates, (before, after) => MayPrecede(before, after.Process, null, after.LeftGrade, isLast: false));
+        _bound = new CostBound(job, candidates, (before, after) => MayPrecede(before, after, null, after.LeftGrade, isLast: false) || MayPrecede(before, after, null, after.HeldGrade(Effort.Routine), isLast: true)
+            || MayPrecede(before, after, null, after.HeldGrade(Effort.Special), isLast: true));
     }
 
     /// <summary>Steps whose ways back were looked through; pinned in tests.</summary>
@@ -150,7 +153,8 @@ internal sealed class RouteSearch
 
             foreach (Tool? tool in LastTools(candidate, window, effort))
             {
-                double yield = Yield(candidate, tool, effort, window);
+                double yield = Yield(candidate, tool, effort, window, window);
+                long leastHeld = LeastHeld(candidate, tool, effort, window);
                 foreach (Machine machine in candidate.Machines)
                 {
                     if (tool is null || tool.Stamped <= machine.Largest)
@@ -162,6 +166,7 @@ internal sealed class RouteSearch
                             Tool = tool,
                             Effort = effort,
                             Leaving = window,
+                            LeastHeld = leastHeld,
                             ChangesLeft = changesLeft,
                             ChangesAfter = after,
                             Yield = yield,
@@ -196,7 +201,7 @@ internal sealed class RouteSearch
         SizeWindow sizes = window.Sizes(_job.IsInternal);
         if (use == ToolUse.Ream)
         {
-            return ReamerChoice.Best(_shop.ToolsNear(use, sizes), sizes, _job.Feature.Class) is { } reamer ? [reamer] : [];
+            return ReamerChoice.Best(_shop.ToolsNear(use, sizes), sizes, _job.Feature.Class, tool => Yield(candidate, tool, effort, window, window)) is { } reamer ? [reamer] : [];
         }
 
         List<Tool?> fitting = [];
@@ -228,17 +233,25 @@ internal sealed class RouteSearch
     }
 
     /// <summary>Spread from the grade held (a sixth of it), or from the tool's predicted range; the share of it inside the window.</summary>
-    private double Yield(Candidate candidate, Tool? tool, Effort effort, MetalWindow window)
+    /// <param name="candidate">The process.</param>
+    /// <param name="tool">Its tool, or null.</param>
+    /// <param name="effort">With how much care.</param>
+    /// <param name="held">What the machinist aims into.</param>
+    /// <param name="good">What counts as good.</param>
+    private double Yield(Candidate candidate, Tool? tool, Effort effort, MetalWindow held, MetalWindow good)
     {
-        if (tool is null)
-        {
-            double half = window.Width / 2.0;
-            return NormalYield.Of(-half, half, 0, candidate.HeldWidth(effort).Picometres / 6.0);
-        }
-
-        MetalWindow cut = MetalWindow.Of(SizedCut.Predict(tool, _job.Group, IsCareful(candidate, effort)).Sizes, _job.IsInternal);
-        return NormalYield.Of(window.Least, window.Most, (cut.Least + cut.Most) / 2.0, cut.Width / 6.0);
+        MetalWindow aim = tool is null ? held : Cut(candidate, tool, effort);
+        double spread = tool is null ? candidate.HeldWidth(effort).Picometres : aim.Width;
+        return NormalYield.Of(good.Least, good.Most, (aim.Least + aim.Most) / 2.0, spread / 6.0);
     }
+
+    /// <summary>What a tool of fixed size is predicted to leave.</summary>
+    private MetalWindow Cut(Candidate candidate, Tool tool, Effort effort) =>
+        MetalWindow.Of(SizedCut.Predict(tool, _job.Group, IsCareful(candidate, effort)).Sizes, _job.IsInternal);
+
+    /// <summary>The part of the drawing's window that the last step needs, from the end with the most metal.</summary>
+    private long LeastHeld(Candidate candidate, Tool? tool, Effort effort, MetalWindow window) => Math.Max(window.Least,
+        tool is null ? window.Most - candidate.HeldWidth(effort).Picometres : Cut(candidate, tool, effort).Least);
 
     /// <summary>Tries to begin the route with this step.</summary>
     private void Start(Step step)
@@ -251,9 +264,13 @@ internal sealed class RouteSearch
         switch (_job.Start.Kind)
         {
             case StartKind.Solid when _job.IsInternal:
-                if (step.Process.SizedBy == ToolUse.Drill ? step.Tool!.Stamped <= LargestSingleDrill : _job.Kind == FeatureKind.Slot)
+                if (step.Process.SizedBy == ToolUse.Drill && _drills.Of(step.Tool!) is { CanOpen: true } drill)
                 {
-                    PushBlank(step, null, "solid metal");
+                    PushDrilled(step, drill);
+                }
+                else if (_job.Kind == FeatureKind.Slot)
+                {
+                    Push(Blank(step, null, "solid metal"));
                 }
 
                 break;
@@ -273,7 +290,7 @@ internal sealed class RouteSearch
         MetalWindow entering = Entering(step, need.Least, []);
         if (entering.Holds(blank))
         {
-            PushBlank(step, blank, name);
+            Push(Blank(step, blank, name));
         }
         else
         {
@@ -298,7 +315,7 @@ internal sealed class RouteSearch
             need = Need(step, "bar", blank.Most, new Deviation(blank.Width), sameClamping: false, afterHeat: false).Least;
             if (Entering(step, need, []).Holds(blank))
             {
-                PushBlank(step, blank, $"bar {bar.Size}");
+                Push(Blank(step, blank, $"bar {bar.Size}"));
                 return;
             }
 
@@ -309,10 +326,11 @@ internal sealed class RouteSearch
         }
     }
 
-    private void PushBlank(Step first, MetalWindow? sizes, string name)
+    private Step Blank(Step first, MetalWindow? sizes, string name)
     {
+        first = sizes is { } entering ? Held(first, entering) : first;
         double cost = first.Settled + CostOf(first, sizes, arrives: true).PerGoodPiece(first.YieldToEnd, _job.Quantity);
-        Push(new Step { Leaving = sizes, Next = first, NextEntering = sizes, NextArrives = true, Settled = cost, YieldToEnd = first.YieldToEnd, BlankName = name });
+        return new Step { Leaving = sizes, Next = first, NextEntering = sizes, NextArrives = true, Settled = cost, YieldToEnd = first.YieldToEnd, BlankName = name };
     }
 
     /// <summary>Puts every possible operation before this step.</summary>
@@ -321,7 +339,7 @@ internal sealed class RouteSearch
         ToleranceGrade held = step.IsLast ? step.Candidate!.HeldGrade(step.Effort) : step.Candidate!.LeftGrade;
         foreach (Candidate before in _candidates)
         {
-            if (before.NoAtAll is not null || !MayPrecede(before, step.Process, step.Tool, held, step.IsLast))
+            if (before.NoAtAll is not null || !MayPrecede(before, step.Candidate!, step.Tool, held, step.IsLast))
             {
                 continue;
             }
@@ -344,15 +362,16 @@ internal sealed class RouteSearch
 
     /// <summary>Whether one process makes sense before another, before any size is looked at.</summary>
     /// <param name="before">The process before.</param>
-    /// <param name="process">The process after it.</param>
+    /// <param name="after">The process after it.</param>
     /// <param name="tool">Its tool; null where the machinist sets the size, or for any tool.</param>
     /// <param name="held">The grade that it holds.</param>
     /// <param name="isLast">Whether it finishes the feature.</param>
-    private static bool MayPrecede(Candidate before, Process process, Tool? tool, ToleranceGrade held, bool isLast)
+    private static bool MayPrecede(Candidate before, Candidate after, Tool? tool, ToleranceGrade held, bool isLast)
     {
+        Process process = after.Process;
         if (process.SizedBy == ToolUse.Drill)
         {
-            return before.Process == process && (tool is null || tool.Stamped > LargestSingleDrill);
+            return false;
         }
 
         if (before.Process == process || (before.Process.SizedBy == ToolUse.Ream && process.SizedBy == ToolUse.Ream))
@@ -361,11 +380,13 @@ internal sealed class RouteSearch
         }
 
         bool drilled = before.Process.SizedBy == ToolUse.Drill;
-        bool coarser = before.LeftGrade > held || (process.StartsRough && before.LeftGrade == held && drilled);
+        // What it can hold with care counts, so that less care never asks for another operation before.
+        ToleranceGrade finest = isLast ? after.HeldGrade(Effort.Special) : held;
+        bool coarser = before.LeftGrade > finest || (process.StartsRough && before.LeftGrade == finest && drilled);
         bool fineEnough = before.Process.LeftGrade <= process.EnterGrade;
         bool smallStep = process.SizedBy is not null || before.LeftGrade.Ordinal - held.Ordinal <= MostGradesGained;
-        bool tooFarForOneReamer = process.SizedBy == ToolUse.Ream && before.LeftGrade > LeftForReamingToIt7 && isLast
-            && held <= ToleranceGrade.It(7) && tool!.Stamped > LargestReamAfterDrill;
+        bool tooFarForOneReamer = process.SizedBy == ToolUse.Ream && before.LeftGrade >= RoughGrade && isLast && held <= ToleranceGrade.It(7)
+            && tool?.Stamped > LargestReamAfterDrill;
         return coarser && fineEnough && smallStep && !tooFarForOneReamer;
     }
 
@@ -374,14 +395,24 @@ internal sealed class RouteSearch
         bool same = between.Length == 0 && machine == step.Machine;
         bool heat = Array.Exists(between, static change => change.Hardens);
         Deviation tolerance = LeftTolerance(before, step, null);
-        Stock need = Need(step, before.Process.Name, step.Window.Most, tolerance, same, heat).Least;
-        MetalWindow entering = Entering(step, need, between);
+        StockNeed need = Need(step, before.Process.Name, step.Window.Most, tolerance, same, heat);
+        MetalWindow entering = Entering(step, need.Least, between);
         if (before.Process.SizedBy is { } use)
         {
             PrecedeWithTools(step, before, machine, between, changesLeft, entering, use);
             return;
         }
 
+        PrecedeWithSetting(step, before, machine, between, changesLeft, entering, tolerance);
+        if (need.Larger is { } larger)
+        {
+            // The handbook's larger stock stays open to a large lot: more on a finishing cut can save a roughing pass.
+            PrecedeWithSetting(step, before, machine, between, changesLeft, Entering(step, larger, between), tolerance);
+        }
+    }
+
+    private void PrecedeWithSetting(Step step, Candidate before, Machine machine, Change[] between, int changesLeft, MetalWindow entering, Deviation tolerance)
+    {
         Length resolution = tolerance >= Deviation.FromMicrometres(50) ? Hundredth : Micrometre;
         long least = new Length(entering.Least).RoundUp(resolution).Picometres;
         MetalWindow leaving = new(least, least + tolerance.Picometres);
@@ -411,7 +442,7 @@ internal sealed class RouteSearch
 
         bool fits = false;
         long nearest = long.MaxValue;
-        (double Cost, Drill Drill)? best = null;
+        (double Cost, Drill Drill)? cheapest = null;
         foreach (Tool tool in _shop.ToolsNear(use, entering.Sizes(_job.IsInternal)))
         {
             if (tool.Stamped > machine.Largest)
@@ -420,7 +451,7 @@ internal sealed class RouteSearch
             }
 
             Drill? drill = use == ToolUse.Drill ? _drills.Of(tool) : null;
-            MetalWindow leaving = drill?.Leaving ?? MetalWindow.Of(SizedCut.Predict(tool, _job.Group, IsCareful(before, Effort.Routine)).Sizes, _job.IsInternal);
+            MetalWindow leaving = drill?.Leaving ?? Cut(before, tool, Effort.Routine);
             if (!entering.Holds(leaving))
             {
                 nearest = Math.Min(nearest, Math.Max(entering.Least - leaving.Least, leaving.Most - entering.Most));
@@ -432,10 +463,10 @@ internal sealed class RouteSearch
             {
                 Push(Before(step, before, machine, tool, leaving, between, changesLeft));
             }
-            else if (CostWith(drill, step, machine, between) is { } cost && (best is null || cost < best.Value.Cost))
+            else if (CostWith(drill, step, machine, between) is { } cost && (cheapest is null || cost < cheapest.Value.Cost))
             {
                 // A drill ends the way back, alone or with its pilot: of all sizes only the cheapest can belong to a best route.
-                best = (cost, drill);
+                cheapest = (cost, drill);
             }
         }
 
@@ -443,16 +474,16 @@ internal sealed class RouteSearch
         {
             Miss(step, before.Process.Name, nearest);
         }
-        else if (best is { } chosen)
+        else if (cheapest is { Drill: var chosen })
         {
-            PushDrilled(Before(step, before, machine, chosen.Drill.Tool, chosen.Drill.Leaving, between, changesLeft), chosen.Drill);
+            PushDrilled(Before(step, before, machine, chosen.Tool, chosen.Leaving, between, changesLeft), chosen);
         }
     }
 
     /// <summary>What the step, the drill before it and its pilot cost, as far as it depends on the drill; null where the drill cannot end the way back.</summary>
     private double? CostWith(Drill drill, Step step, Machine machine, Change[] between)
     {
-        if (step.ChangesLeft > between.Length || _job.Start.Kind != StartKind.Solid || (drill.Tool.Stamped > LargestSingleDrill && drill.Pilot is null))
+        if (step.ChangesLeft > between.Length || _job.Start.Kind != StartKind.Solid || !drill.CanOpen)
         {
             return null;
         }
@@ -470,7 +501,7 @@ internal sealed class RouteSearch
         }
 
         Step first = drill.Pilot is { } pilot ? Before(step, step.Candidate!, step.Machine!, pilot, _drills.Of(pilot).Leaving, [], 0) : step;
-        PushBlank(first, null, "solid metal");
+        Push(Blank(first, null, "solid metal"));
     }
 
     private StockNeed Need(Step step, string before, long metal, Deviation tolerance, bool sameClamping, bool afterHeat) =>
@@ -479,8 +510,7 @@ internal sealed class RouteSearch
     /// <summary>The window that must be left by the operation before, with the changes between taken off at their extremes; may be closed.</summary>
     private static MetalWindow Entering(Step step, Stock least, Change[] between)
     {
-        Stock most = step.Process.MostStockAt(MetalWindow.Size(step.Window.Least));
-        MetalWindow window = new(step.Window.Most + least.Picometres, step.Window.Least + most.Picometres);
+        MetalWindow window = new(step.Window.Most + least.Picometres, step.LeastHeld + MostStock(step));
         for (int i = between.Length - 1; i >= 0; i--)
         {
             window = between[i].Before(window);
@@ -489,17 +519,38 @@ internal sealed class RouteSearch
         return window;
     }
 
+    private static long MostStock(Step step) => step.Process.MostStockAt(MetalWindow.Size(step.Window.Most)).Picometres;
+
+    /// <summary>
+    /// The last step held so far inside the drawing's window that it never takes more than it can: a hone that leaves 0.1 mm at most does not open a
+    /// bore right through a wide tolerance. Any other step as it is; a tool of fixed size cuts what it cuts.
+    /// </summary>
+    private Step Held(Step step, MetalWindow entering)
+    {
+        long least = entering.Most - MostStock(step);
+        if (step.Tool is not null || least <= step.Window.Least)
+        {
+            return step;
+        }
+
+        MetalWindow held = new(least, step.Window.Most);
+        double yield = Yield(step.Candidate!, step.Tool, step.Effort, held, step.Window);
+        return step with { Leaving = held, Yield = yield, YieldToEnd = yield };
+    }
+
     private Step Before(Step step, Candidate before, Machine machine, Tool? tool, MetalWindow leaving, Change[] between, int changesLeft)
     {
         MetalWindow entering = Grown(leaving, between);
+        step = Held(step, entering);
         bool arrives = machine != step.Machine || between.Length > 0;
-        double yield = tool is null ? Yield(before, null, Effort.Routine, leaving) : 1;
+        double yield = tool is null ? Yield(before, null, Effort.Routine, leaving, leaving) : 1;
         return new Step
         {
             Candidate = before,
             Machine = machine,
             Tool = tool,
             Leaving = leaving,
+            LeastHeld = leaving.Least,
             Next = step,
             NextEntering = entering,
             NextArrives = arrives,

@@ -55,9 +55,7 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
     {
         Process process = step.Process;
         StepCost cost = search.CostOf(step, before.NextEntering, before.NextArrives);
-        SizeWindow size = step.Window.Sizes(job.IsInternal);
-        SizeWindow? drawing = step.IsLast && step.ChangesAfter.Length == 0 ? job.Feature.Limits : null;
-        SizeWindow held = drawing ?? size;
+        SizeWindow held = step.Window.Sizes(job.IsInternal);
         ToleranceGrade? grade = step.IsLast ? Iso286.NearestGrade(job.Nominal, held.Width) : step.Candidate!.LeftGrade;
         (Stock? least, Stock? most) = before.NextEntering is { } from
             ? (new Stock(from.Least - step.Window.Most), new Stock(from.Most - step.Window.Least))
@@ -140,6 +138,11 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
         {
             string effort = step.Effort == Effort.Routine ? "with routine effort" : "with special effort";
             string lost = candidate.GradesLost > 0 ? $" ({candidate.LossReason}: {candidate.GradesLost} grade worse)" : "";
+            if (step.ChangesAfter.Length == 0 && step.Window.Sizes(job.IsInternal) != job.Feature.Limits)
+            {
+                because.Add("held inside the drawing's limits, so that it never has to take more than it can");
+            }
+
             because.Add($"holds {candidate.HeldGrade(step.Effort)} {effort}{lost}, leaves {step.Process.Ra(step.Effort)}");
         }
         else if (most is null)
@@ -209,7 +212,12 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
                 yield return new Reason("stock", line);
             }
 
-            yield return new Reason("stock", $"{process.Name} takes at most {process.MostStockAt(held.Max)} here [{process.Origin}]");
+            if (step.Tool is not null && step.LeastHeld > step.Window.Least)
+            {
+                yield return new Reason("stock", $"at most {new Stock(from.Most - step.LeastHeld)} as {step.Tool.Label} is predicted to cut");
+            }
+
+            yield return new Reason("stock", $"{process.Name} takes at most {process.MostStockAt(MetalWindow.Size(step.Window.Most))} here [{process.Origin}]");
         }
 
         yield return new Reason("grade", $"{process.Name}: routine {process.RoutineGrade}, special {process.SpecialGrade?.ToString() ?? "none"}; leaves {process.LeftRa} on the way [{process.Origin}]");
@@ -230,9 +238,10 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
     {
         if (step.IsLast)
         {
-            return job.Feature.Class is { } toleranceClass && step.ChangesAfter.Length == 0
+            string inside = step.ChangesAfter.Length == 0 && held != job.Feature.Limits ? $"inside {job.Feature.Limits}, by the greatest stock of {step.Process.Name}: " : "";
+            return inside + (job.Feature.Class is { } toleranceClass && step.ChangesAfter.Length == 0
                 ? $"the drawing's limits, {toleranceClass} [{Iso286.Cite(job.Nominal, toleranceClass.Grade)}; {Iso286.Cite(job.Nominal, toleranceClass)}]"
-                : step.ChangesAfter.Length == 0 ? "the drawing's limits" : "the drawing's limits, less what comes after at its extremes";
+                : step.ChangesAfter.Length == 0 ? "the drawing's limits" : "the drawing's limits, less what comes after at its extremes");
         }
 
         if (step.Tool is { } tool)

@@ -5,7 +5,7 @@ using ProcessPlan.Core.Values;
 namespace ProcessPlan.Core.Routing;
 
 /// <summary>One step of a chain that grows backwards from the drawing; the last to be put on is the blank.</summary>
-internal sealed class Step
+internal sealed record Step
 {
     /// <summary>The process, or null for the blank.</summary>
     public Candidate? Candidate { get; init; }
@@ -18,6 +18,12 @@ internal sealed class Step
 
     /// <summary>What it leaves; for a blank its own limits, null in solid metal.</summary>
     public MetalWindow? Leaving { get; init; }
+
+    /// <summary>
+    /// Least metal that the step must be able to leave: the window's own end for a step on the way; for the last one only what its process or tool
+    /// needs of the drawing's window, so that a wider tolerance asks for nothing more.
+    /// </summary>
+    public long LeastHeld { get; init; }
 
     /// <summary>The step after it; null for the last one.</summary>
     public Step? Next { get; init; }

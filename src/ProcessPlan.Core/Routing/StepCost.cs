@@ -34,7 +34,7 @@ internal readonly record struct StepCost(Cut Cut, CutTime Cutting, double Checki
             data,
             step.Tool?.Stamped ?? (job.IsInternal ? leaving.Max : MetalWindow.Size(entering?.Most ?? window.Most)),
             job.Extent,
-            entering is { } from ? new Stock(from.Most - window.Least) : null,
+            entering is { } from ? new Stock(from.Most - step.LeastHeld) : null,
             step.IsLast ? process.Ra(step.Effort) : process.LeftRa,
             step.Effort);
         (Instrument instrument, _) = Instrument.For(job.IsInternal, leaving.Max, leaving.Width);

@@ -31,21 +31,31 @@ public static class ReamerChoice
         return true;
     }
 
-    /// <summary>The best suited reamer: the one made for this class of hole first, else the largest, which has the longest life.</summary>
+    /// <summary>
+    /// The best suited reamer: the one that leaves the largest share of good holes, to a ten-thousandth; among equals the one made for this class of
+    /// hole, else the largest, which has the longest life.
+    /// </summary>
     /// <param name="near">Reamers of about this size.</param>
     /// <param name="hole">Limits of the hole.</param>
     /// <param name="asked">The class asked for, if any.</param>
-    public static Tool? Best(ReadOnlySpan<Tool> near, SizeWindow hole, ToleranceClass? asked)
+    /// <param name="yield">Share of good holes that a reamer leaves.</param>
+    public static Tool? Best(ReadOnlySpan<Tool> near, SizeWindow hole, ToleranceClass? asked, Func<Tool, double> yield)
     {
+        const int YieldPlaces = 4;
         Tool? best = null;
-        bool bestIsMadeFor = false;
+        (double Yield, bool MadeFor, Length Size) merit = default;
         foreach (Tool tool in near)
         {
-            bool madeFor = asked is { } toleranceClass && tool.Made == toleranceClass.ToString();
-            bool better = best is null || (madeFor && !bestIsMadeFor) || (madeFor == bestIsMadeFor && tool.Own.Max > best.Own.Max);
-            if (better && Suits(tool, hole, out _))
+            if (!Suits(tool, hole, out _))
             {
-                (best, bestIsMadeFor) = (tool, madeFor);
+                continue;
+            }
+
+            (double Yield, bool MadeFor, Length Size) own =
+                (Math.Round(yield(tool), YieldPlaces), asked is { } toleranceClass && tool.Made == toleranceClass.ToString(), tool.Own.Max);
+            if (best is null || own.CompareTo(merit) > 0)
+            {
+                (best, merit) = (tool, own);
             }
         }
 
