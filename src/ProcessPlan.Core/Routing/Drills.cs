@@ -43,6 +43,19 @@ internal sealed class Drills(Job job, ShopFloor shop, CuttingData data)
         return drill;
     }
 
+    /// <summary>The least that any drill of the shop costs under the tool, time and wear.</summary>
+    public double LeastCost(Machine machine)
+    {
+        double least = double.PositiveInfinity;
+        foreach (Tool tool in shop.Tools(ToolUse.Drill))
+        {
+            (double minutes, double wear) = Work(tool);
+            least = Math.Min(least, machine.RatePerMinute * minutes + wear);
+        }
+
+        return least;
+    }
+
     private (double Minutes, double Wear) Work(Tool tool)
     {
         Cut cut = new(_drilling!, data, tool.Stamped, job.Extent, null, _drilling!.LeftRa, Effort.Routine);

@@ -51,7 +51,9 @@ internal sealed class RouteSearch
         _changes = Change.For(job, shop);
         _data = CuttingData.For(job.Group);
         _drills = new Drills(job, shop, _data);
-        _bound = new CostBound(job, candidates, (before, after) => MayPrecede(before, after, null, after.LeftGrade, isLast: false) || MayPrecede(before, after, null, after.HeldGrade(Effort.Routine), isLast: true)
+        _bound = new CostBound(job, _data, _drills, candidates, MayStart, static (before, after) =>
+            MayPrecede(before, after, null, after.LeftGrade, isLast: false)
+            || MayPrecede(before, after, null, after.HeldGrade(Effort.Routine), isLast: true)
             || MayPrecede(before, after, null, after.HeldGrade(Effort.Special), isLast: true));
     }
 
@@ -101,8 +103,19 @@ internal sealed class RouteSearch
 
     private void Push(Step step)
     {
-        double rest = step.IsBlank ? 0 : _bound.Of(step);
-        _open.Enqueue(step, (step.Settled + rest, _order++));
+        double cost = step.Settled;
+        if (!step.IsBlank)
+        {
+            // At least: this step with as little stock as its own window, on a machine that the part must come to once, and what must stand before it.
+            MetalWindow nearest = new(step.Window.Most, step.Window.Most);
+            cost += CostOf(step, nearest, arrives: true).PerGoodPiece(step.YieldToEnd, _job.Quantity);
+            cost += MayStart(step.Candidate!) ? 0 : _bound.Before(step.Candidate!);
+        }
+
+        if (cost < double.PositiveInfinity)
+        {
+            _open.Enqueue(step, (cost, _order++));
+        }
     }
 
     /// <summary>Operations that can finish the feature; changes that come after the last cut have moved the window already.</summary>
@@ -253,10 +266,14 @@ internal sealed class RouteSearch
     private long LeastHeld(Candidate candidate, Tool? tool, Effort effort, MetalWindow window) => Math.Max(window.Least,
         tool is null ? window.Most - candidate.HeldWidth(effort).Picometres : Cut(candidate, tool, effort).Least);
 
+    /// <summary>Whether a process can cut the blank of this job, before any size is looked at.</summary>
+    private bool MayStart(Candidate candidate) => candidate.Process.StartsRough
+        && (_job.Start.Kind != StartKind.Solid || _job.Kind != FeatureKind.Hole || candidate.Process.SizedBy == ToolUse.Drill);
+
     /// <summary>Tries to begin the route with this step.</summary>
     private void Start(Step step)
     {
-        if (step.ChangesLeft > 0 || !step.Process.StartsRough || (_job.AsksForPosition && !step.Places))
+        if (step.ChangesLeft > 0 || !MayStart(step.Candidate!) || (_job.AsksForPosition && !step.Places))
         {
             return;
         }
@@ -443,11 +460,13 @@ internal sealed class RouteSearch
         bool fits = false;
         long nearest = long.MaxValue;
         (double Cost, Drill Drill)? cheapest = null;
-        foreach (Tool tool in _shop.ToolsNear(use, entering.Sizes(_job.IsInternal)))
+        ReadOnlySpan<Tool> tools = _shop.ToolsNear(use, entering.Sizes(_job.IsInternal));
+        for (int i = tools.Length - 1; i >= 0; i--)
         {
+            Tool tool = tools[i];
             if (tool.Stamped > machine.Largest)
             {
-                break;
+                continue;
             }
 
             Drill? drill = use == ToolUse.Drill ? _drills.Of(tool) : null;
@@ -463,10 +482,19 @@ internal sealed class RouteSearch
             {
                 Push(Before(step, before, machine, tool, leaving, between, changesLeft));
             }
-            else if (CostWith(drill, step, machine, between) is { } cost && (cheapest is null || cost < cheapest.Value.Cost))
+            else if (CanDrill(drill, step, between))
             {
                 // A drill ends the way back, alone or with its pilot: of all sizes only the cheapest can belong to a best route.
-                cheapest = (cost, drill);
+                double after = CostOf(step, Grown(leaving, between), machine != step.Machine || between.Length > 0).PerGoodPiece(step.YieldToEnd, _job.Quantity);
+                if (after >= cheapest?.Cost)
+                {
+                    // A smaller drill leaves this step still more to cut.
+                    break;
+                }
+
+                double drilling = drill.CutMinutes + (drill.Pilot is null ? 0 : drill.PilotMinutes + machine.ToolChangeMinutes);
+                double cost = after + (drilling * machine.RatePerMinute + drill.Wear) / step.YieldToEnd;
+                cheapest = cheapest is null || cost < cheapest.Value.Cost ? (cost, drill) : cheapest;
             }
         }
 
@@ -480,18 +508,8 @@ internal sealed class RouteSearch
         }
     }
 
-    /// <summary>What the step, the drill before it and its pilot cost, as far as it depends on the drill; null where the drill cannot end the way back.</summary>
-    private double? CostWith(Drill drill, Step step, Machine machine, Change[] between)
-    {
-        if (step.ChangesLeft > between.Length || _job.Start.Kind != StartKind.Solid || !drill.CanOpen)
-        {
-            return null;
-        }
-
-        double drilling = drill.CutMinutes + (drill.Pilot is null ? 0 : drill.PilotMinutes + machine.ToolChangeMinutes);
-        return CostOf(step, Grown(drill.Leaving, between), machine != step.Machine || between.Length > 0).PerGoodPiece(step.YieldToEnd, _job.Quantity)
-            + (drilling * machine.RatePerMinute + drill.Wear) / step.YieldToEnd;
-    }
+    private bool CanDrill(Drill drill, Step step, Change[] between) =>
+        step.ChangesLeft <= between.Length && _job.Start.Kind == StartKind.Solid && drill.CanOpen;
 
     private void PushDrilled(Step step, Drill drill)
     {

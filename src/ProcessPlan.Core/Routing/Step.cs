@@ -1,4 +1,5 @@
 using ProcessPlan.Core.Capability;
+using ProcessPlan.Core.Inspection;
 using ProcessPlan.Core.Shop;
 using ProcessPlan.Core.Values;
 
@@ -7,6 +8,8 @@ namespace ProcessPlan.Core.Routing;
 /// <summary>One step of a chain that grows backwards from the drawing; the last to be put on is the blank.</summary>
 internal sealed record Step
 {
+    private (MetalWindow? Window, double Minutes) _checking;
+
     /// <summary>The process, or null for the blank.</summary>
     public Candidate? Candidate { get; init; }
 
@@ -54,6 +57,18 @@ internal sealed record Step
 
     /// <summary>What a blank is, in words.</summary>
     public string? BlankName { get; init; }
+
+    /// <summary>Minutes for measuring one piece; it depends on the step's own window only, and is asked for often.</summary>
+    public double Checking(bool isInternal)
+    {
+        if (_checking.Window != Leaving)
+        {
+            SizeWindow sizes = Window.Sizes(isInternal);
+            _checking = (Leaving, Instrument.For(isInternal, sizes.Max, sizes.Width).Instrument.MinutesPerCheck * Checks.PerPiece(Process, Effort));
+        }
+
+        return _checking.Minutes;
+    }
 
     public Process Process => Candidate!.Process;
 

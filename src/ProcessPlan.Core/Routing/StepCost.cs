@@ -1,6 +1,5 @@
 using ProcessPlan.Core.Capability;
 using ProcessPlan.Core.Costing;
-using ProcessPlan.Core.Inspection;
 using ProcessPlan.Core.Shop;
 using ProcessPlan.Core.Values;
 
@@ -28,19 +27,17 @@ internal readonly record struct StepCost(Cut Cut, CutTime Cutting, double Checki
     {
         Process process = step.Process;
         MetalWindow window = step.Window;
-        SizeWindow leaving = window.Sizes(job.IsInternal);
         Cut cut = new(
             process,
             data,
-            step.Tool?.Stamped ?? (job.IsInternal ? leaving.Max : MetalWindow.Size(entering?.Most ?? window.Most)),
+            step.Tool?.Stamped ?? MetalWindow.Size(job.IsInternal ? window.Least : entering?.Most ?? window.Most),
             job.Extent,
             entering is { } from ? new Stock(from.Most - step.LeastHeld) : null,
             step.IsLast ? process.Ra(step.Effort) : process.LeftRa,
             step.Effort);
-        (Instrument instrument, _) = Instrument.For(job.IsInternal, leaving.Max, leaving.Width);
         Machine machine = step.Machine!;
         CutTime time = CutTime.For(cut);
-        return new StepCost(cut, time, instrument.MinutesPerCheck * Checks.PerPiece(process, step.Effort),
+        return new StepCost(cut, time, step.Checking(job.IsInternal),
             arrives ? machine.HandlingMinutes : 0, machine, arrives ? machine.SetUpMinutes : 0, ToolWear.Of(cut, step.Tool, time.Minutes));
     }
 
