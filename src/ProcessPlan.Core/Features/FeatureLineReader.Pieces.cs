@@ -62,7 +62,7 @@ internal ref partial struct FeatureLineReader
         }
 
         Place place = new(start, length);
-        if (isClass && number.IsUnitApart)
+        if (isClass && number.IsUnitApart && SpaceAt(place.End))
         {
             // "1 N7 in": the unit is that of the line.
             _at = place.End;

@@ -624,6 +624,7 @@ public sealed partial class FeatureLineTests
     [InlineData("hole 1-1/2 H7 in x 3/4 off 5", 1.5, 0.75)]
     [InlineData("hole 1 N7 in x6", 1, 6)]
     [InlineData("hole 1H7 off 5 in x .5", 1, 0.5)]
+    [InlineData("hole 1H7 x15.618 in", 1, 15.618)]
     [InlineData("hole 1H7 HRC 28 in x .5", 1, 0.5)]
     [InlineData("hole 1H7 x .5 in", 1, 0.5)]
     [InlineData("hole 1H7 Ra 0.8 in C45 x .5", 1, 0.5)]
