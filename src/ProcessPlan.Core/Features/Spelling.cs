@@ -1,0 +1,62 @@
+namespace ProcessPlan.Core.Features;
+
+/// <summary>Finds what a mistyped word was probably meant to be.</summary>
+internal static class Spelling
+{
+    private const int Longest = 40;
+
+    /// <summary>The known word with the fewest changed letters, if there are at most two and fewer than half of the word; of equals the first.</summary>
+    public static string? Nearest(ReadOnlySpan<char> text, params ReadOnlySpan<IReadOnlyCollection<string>> lists)
+    {
+        string? best = null;
+        int limit = Math.Min(2, (text.Length - 1) / 2) + 1;
+        foreach (IReadOnlyCollection<string> list in lists)
+        {
+            foreach (string known in list)
+            {
+                int changes = Changes(text, known, limit);
+                if (changes < limit)
+                {
+                    (best, limit) = (known, changes);
+                }
+            }
+        }
+
+        return best;
+    }
+
+    /// <summary>Levenshtein distance without regard to case, or <paramref name="limit"/> where it is not below that.</summary>
+    private static int Changes(ReadOnlySpan<char> a, ReadOnlySpan<char> b, int limit)
+    {
+        if (a.Length > Longest || b.Length > Longest || Math.Abs(a.Length - b.Length) >= limit)
+        {
+            return limit;
+        }
+
+        Span<int> row = stackalloc int[Longest + 1];
+        for (int j = 0; j <= b.Length; j++)
+        {
+            row[j] = j;
+        }
+
+        for (int i = 1; i <= a.Length; i++)
+        {
+            int diagonal = row[0];
+            row[0] = i;
+            int least = i;
+            for (int j = 1; j <= b.Length; j++)
+            {
+                int same = char.ToLowerInvariant(a[i - 1]) == char.ToLowerInvariant(b[j - 1]) ? 0 : 1;
+                (row[j], diagonal) = (Math.Min(Math.Min(row[j] + 1, row[j - 1] + 1), diagonal + same), row[j]);
+                least = Math.Min(least, row[j]);
+            }
+
+            if (least >= limit)
+            {
+                return limit;
+            }
+        }
+
+        return Math.Min(row[b.Length], limit);
+    }
+}
