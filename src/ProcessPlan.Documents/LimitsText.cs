@@ -83,7 +83,7 @@ public static class LimitsText
         table.Write(target, exact ? "" : "rounded inwards");
     }
 
-    private static void WriteFit(TextWriter target, Feature inside, Feature outside, UnitScale scale)
+    internal static void WriteFit(TextWriter target, Feature inside, Feature outside, UnitScale scale)
     {
         Fit fit = new(inside.Limits, outside.Limits);
         (string hole, string shaft) = (inside.Kind.Word(), outside.Kind.Word());

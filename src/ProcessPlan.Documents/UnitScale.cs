@@ -58,6 +58,13 @@ internal readonly record struct UnitScale(LengthUnit Unit)
     public string FormatSigned(Deviation deviation, int places) =>
         deviation == default ? "0" : (deviation > default(Deviation) ? "+" : "") + Format(deviation, places);
 
+    /// <summary>As few places as the length needs, none for a whole number.</summary>
+    public string FormatShort(Length length)
+    {
+        int places = PlacesOf(length) ?? MostPlaces;
+        return DecimalText.Format(length.RoundNearest(Step(places)).Picometres / Step(places).Picometres, places);
+    }
+
     /// <summary>As many places as the length needs.</summary>
     public string FormatExact(Length length) => Format(length, PlacesOf(length) ?? MostPlaces);
 }

@@ -9,6 +9,7 @@ internal static class Program
     private static readonly (string Name, Func<Streams, Command> Create)[] Commands =
     [
         ("limits", LimitsCommand.Create),
+        ("plan", PlanCommand.Create),
     ];
 
     public static int Main(string[] args)

@@ -70,7 +70,7 @@ public class BadInputTests
     }
 
     [Theory]
-    [InlineData("'lmits' is no command; expected limits or --help.", "lmits", "25H7")]
+    [InlineData("'lmits' is no command; expected limits, plan or --help.", "lmits", "25H7")]
     [InlineData("limits found no feature; expected one such as 25H7, or - for standard input.", "limits")]
     [InlineData("limits found no feature; expected one such as 25H7, or - for standard input.", "limits", "--json")]
     [InlineData("--unit found 'cm'; expected mm or in.", "limits", "25H7", "--unit", "cm")]

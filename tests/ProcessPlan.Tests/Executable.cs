@@ -12,6 +12,9 @@ internal static class Executable
 
     public static string Program { get; } = Path.Combine(AppContext.BaseDirectory, "processplan.dll");
 
+    /// <summary>The top of the repository.</summary>
+    public static string Root { get; } = FindRoot();
+
     public static Process Start(params string[] words) => Start(words, []);
 
     public static Process Start(string[] words, params ReadOnlySpan<(string Name, string Value)> environment)
@@ -31,5 +34,18 @@ internal static class Executable
         }
 
         return Process.Start(start) ?? throw new InvalidOperationException($"'{Dotnet}' did not start.");
+    }
+
+    private static string FindRoot()
+    {
+        for (DirectoryInfo? folder = new(AppContext.BaseDirectory); folder is not null; folder = folder.Parent)
+        {
+            if (File.Exists(Path.Combine(folder.FullName, "ProcessPlan.sln")))
+            {
+                return folder.FullName;
+            }
+        }
+
+        throw new DirectoryNotFoundException($"There is no ProcessPlan.sln above {AppContext.BaseDirectory}.");
     }
 }

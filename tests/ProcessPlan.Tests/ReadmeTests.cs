@@ -8,12 +8,10 @@ public partial class ReadmeTests
 {
     private const string RunFromSource = "dotnet run --project src/ProcessPlan -c Release --";
 
-    private static readonly string Root = FindRoot();
-
     public static TheoryData<string, string?> Commands()
     {
         TheoryData<string, string?> commands = [];
-        foreach (Match block in Block().Matches(File.ReadAllText(Path.Combine(Root, "README.md"))))
+        foreach (Match block in Block().Matches(File.ReadAllText(Path.Combine(Executable.Root, "README.md"))))
         {
             string command = block.Groups["command"].Value.Trim();
             if (!command.StartsWith("dotnet test ", StringComparison.Ordinal) && !command.StartsWith("alias ", StringComparison.Ordinal))
@@ -36,7 +34,7 @@ public partial class ReadmeTests
 
         // Both names of the program in the README are the one that is built already; what it tells on standard error is shown too.
         string script = $"processplan() {{ \"{Executable.Dotnet}\" \"{Executable.Program}\" \"$@\"; }}\n{command.Replace(RunFromSource, "processplan", StringComparison.Ordinal)}";
-        using Process shell = Process.Start(new ProcessStartInfo("/bin/sh", ["-c", $"{{ {script}\n}} 2>&1"]) { RedirectStandardOutput = true, WorkingDirectory = Root })!;
+        using Process shell = Process.Start(new ProcessStartInfo("/bin/sh", ["-c", $"{{ {script}\n}} 2>&1"]) { RedirectStandardOutput = true, WorkingDirectory = Executable.Root })!;
         string said = await shell.StandardOutput.ReadToEndAsync();
         await shell.WaitForExitAsync();
 
@@ -53,23 +51,10 @@ public partial class ReadmeTests
     [Fact]
     public void The_README_has_the_test_command_and_outputs_to_compare()
     {
-        string text = File.ReadAllText(Path.Combine(Root, "README.md"));
+        string text = File.ReadAllText(Path.Combine(Executable.Root, "README.md"));
 
         text.Should().Contain("\ndotnet test ProcessPlan.sln -c Release\n");
         Block().Matches(text).Count(block => block.Groups["output"].Success).Should().BeGreaterThan(3);
-    }
-
-    private static string FindRoot()
-    {
-        for (DirectoryInfo? folder = new(AppContext.BaseDirectory); folder is not null; folder = folder.Parent)
-        {
-            if (File.Exists(Path.Combine(folder.FullName, "ProcessPlan.sln")))
-            {
-                return folder.FullName;
-            }
-        }
-
-        throw new DirectoryNotFoundException($"There is no ProcessPlan.sln above {AppContext.BaseDirectory}.");
     }
 
     [GeneratedRegex(@"^```sh\n(?<command>.*?)^```\n(?:\n```text\n(?<output>.*?)^```\n)?", RegexOptions.Singleline | RegexOptions.Multiline)]

@@ -10,6 +10,10 @@ public sealed class Candidate
 {
     private const double DeepForBoring = 4;
     private const double DeepForDrilling = 5;
+
+    /// <summary>Over this a turned shaft needs a steady and gives a grade away (common practice, no source).</summary>
+    private const double SlenderForTurning = 12;
+
     private static readonly Length Small = Length.FromMillimetres(3);
     private static readonly Length Large = Length.FromMillimetres(250);
 
@@ -41,13 +45,13 @@ public sealed class Candidate
     public ToleranceGrade LeftGrade { get; }
 
     /// <summary>Why it is out altogether, or null.</summary>
-    public string? NoAtAll { get; private init; }
+    public string? NoAtAll { get; private set; }
 
     /// <summary>The least effort that finishes the feature; null where it cannot.</summary>
-    public Effort? Finishes { get; private init; }
+    public Effort? Finishes { get; private set; }
 
     /// <summary>Why it cannot finish the feature, or null.</summary>
-    public string? NoToFinish { get; private init; }
+    public string? NoToFinish { get; private set; }
 
     public bool CutsSoft { get; private init; }
 
@@ -57,6 +61,9 @@ public sealed class Candidate
 
     /// <summary>The tolerance held with an effort.</summary>
     public Deviation HeldWidth(Effort effort) => effort == Effort.Special && SpecialWidth is { } special ? special : RoutineWidth!.Value;
+
+    /// <summary>The grade held with an effort, with the grades lost taken off.</summary>
+    public ToleranceGrade HeldGrade(Effort effort) => Worse(Process.Grade(effort));
 
     /// <summary>Every process for the job's kind of feature, in the order of the catalogue.</summary>
     public static List<Candidate> Judge(Job job, ShopFloor shop)
@@ -84,7 +91,8 @@ public sealed class Candidate
                 continue;
             }
 
-            if (machine.Smallest <= job.Nominal && job.Nominal <= machine.Largest)
+            // On the way to a large hole a small machine can still drill; its own largest size is held against the tool.
+            if (machine.Smallest <= job.Nominal && (job.Nominal <= machine.Largest || process.SizedBy is not null))
             {
                 machines.Add(machine);
             }
@@ -94,32 +102,28 @@ public sealed class Candidate
             }
         }
 
-        Candidate candidate = new(process, job, machines);
-        bool soft = Cuts(process, job.Hrc);
-        bool hard = Cuts(process, job.HrcAfterTreatment);
-        string? out_ = OutAltogether(process, job, candidate, soft, hard) ?? (machines.Count == 0 ? noMachine ?? $"no machine of this shop does it" : null);
-        (Effort? effort, string? no) = out_ is null ? ToFinish(candidate, job) : (null, null);
-        return new Candidate(process, job, machines)
+        Candidate candidate = new(process, job, machines) { CutsSoft = Cuts(process, job.Hrc), CutsHard = Cuts(process, job.HrcAfterTreatment) };
+        candidate.NoAtAll = OutAltogether(candidate, job) ?? (machines.Count == 0 ? noMachine ?? "no machine of this shop does it" : null);
+        if (candidate.NoAtAll is null)
         {
-            NoAtAll = out_,
-            Finishes = effort,
-            NoToFinish = no,
-            CutsSoft = soft,
-            CutsHard = hard,
-        };
+            (candidate.Finishes, candidate.NoToFinish) = ToFinish(candidate, job);
+        }
+
+        return candidate;
     }
 
     private static bool Cuts(Process process, double? hrc) => hrc is not { } hardness || process.HardestHrc is not { } hardest || hardness <= hardest;
 
-    private static string? OutAltogether(Process process, Job job, Candidate candidate, bool soft, bool hard)
+    private static string? OutAltogether(Candidate candidate, Job job)
     {
+        Process process = candidate.Process;
         string word = job.Kind.Word();
         if (process.Groups.Count > 0 && !process.Groups.Contains(job.Group))
         {
             return $"not for {job.Material.Designation} (group {job.Group})";
         }
 
-        if (job.Nominal < process.Smallest || job.Nominal > process.Largest)
+        if (job.Nominal < process.Smallest || (job.Nominal > process.Largest && process.SizedBy is null))
         {
             return $"for {process.Smallest.Format()} to {process.Largest}, the {word} has {job.Nominal}";
         }
@@ -129,7 +133,7 @@ public sealed class Candidate
             return $"up to {process.LongestRatio:0} times the size long, the {word} is {job.LengthRatio:0.#} times";
         }
 
-        if (!soft && !hard)
+        if (!candidate.CutsSoft && !candidate.CutsHard)
         {
             return $"up to {process.HardestHrc:0} HRC, the metal has {job.Hrc:0}";
         }
@@ -146,6 +150,11 @@ public sealed class Candidate
     {
         Process process = candidate.Process;
         Deviation asked = job.Feature.Limits.Width;
+        if (job.Nominal > process.Largest)
+        {
+            return (null, $"for {process.Smallest.Format()} to {process.Largest}, the {job.Kind.Word()} has {job.Nominal}");
+        }
+
         bool smoothEnough(Effort effort) => job.Ra is not { } asked || process.Ra(effort).Nanometres <= asked.Nanometres;
         foreach (Effort effort in (ReadOnlySpan<Effort>)[Effort.Routine, Effort.Special])
         {
@@ -155,7 +164,7 @@ public sealed class Candidate
             }
         }
 
-        ToleranceGrade finest = candidate.Worse(process.Grade(Effort.Special));
+        ToleranceGrade finest = candidate.HeldGrade(Effort.Special);
         if (candidate.HeldWidth(Effort.Special) > asked)
         {
             string lost = candidate.GradesLost > 0 ? $" ({candidate.LossReason})" : "";
@@ -194,6 +203,11 @@ public sealed class Candidate
         if (job.Kind == FeatureKind.Hole && (drillsOrReams || process.Ability == "bore") && job.LengthRatio > deep)
         {
             lose($"{job.LengthRatio:0.#} times the diameter deep");
+        }
+
+        if (process.Ability == "turn" && job.LengthRatio > SlenderForTurning)
+        {
+            lose($"{job.LengthRatio:0.#} times the diameter long");
         }
 
         if (drillsOrReams && job.Group is "M" or "S1" or "S2")

@@ -29,6 +29,8 @@ public readonly record struct CutTime(double Minutes, double Speed, double Feed,
     private const double Overrun = 2;
     private const double ReamerOverrun = 12;
     private const double CoreDrillFeed = 1.5;
+
+    /// <summary>Reaming over drilling feed at half of the greatest stock; more stock takes a smaller feed, less a larger one.</summary>
     private const double ReamFeed = 2.5;
 
     // Depth of cut per side and pass, and feed, of rough and medium cuts: common practice, no source.
@@ -40,6 +42,12 @@ public readonly record struct CutTime(double Minutes, double Speed, double Feed,
 
     /// <summary>Real over ideal roughness at finishing speeds in ductile metal (Groover; from memory).</summary>
     private const double RealRoughness = 1.25;
+
+    /// <summary>A bar overhangs and chatters: boring at this share of the turning speed (common practice, no source).</summary>
+    private const double BoringSpeed = 0.6;
+
+    /// <summary>Bores of this grade and finer get a spring pass (common practice, no source).</summary>
+    private static readonly ToleranceGrade SpringPassTo = ToleranceGrade.It(8);
 
     private const double TurningNose = 0.8;
     private const double BoringNose = 0.4;
@@ -57,7 +65,7 @@ public readonly record struct CutTime(double Minutes, double Speed, double Feed,
             "drill" => Drilling(cut),
             "ream" => Reaming(cut),
             "turn" or "diamond" => Turning(cut, RoughTurningDepth, RoughTurningFeed, TurningNose),
-            "bore" => Turning(cut, RoughBoringDepth, RoughBoringFeed, BoringNose),
+            "bore" or "fine-bore" => Turning(cut, RoughBoringDepth, RoughBoringFeed, BoringNose),
             "mill" => Milling(cut),
             "grind-round" or "centreless" => Grinding(cut, wheelWidth: 40),
             "grind-hole" => Grinding(cut, wheelWidth: 20),
@@ -106,7 +114,8 @@ public readonly record struct CutTime(double Minutes, double Speed, double Feed,
 
     private static CutTime Reaming(in Cut cut)
     {
-        double feed = CuttingData.DrillFeed(cut.Diameter) * cut.Data.FeedFactor * ReamFeed;
+        double stock = cut.Stock is { } removed ? removed.Picometres / (double)cut.Process.MostStockAt(cut.Diameter).Picometres : 1;
+        double feed = CuttingData.DrillFeed(cut.Diameter) * cut.Data.FeedFactor * ReamFeed / (0.75 + 0.5 * stock);
         return Revolving(cut.Diameter.ToMillimetres(), cut.Data.Ream, feed, 1, cut.Extent.ToMillimetres() + ReamerOverrun);
     }
 
@@ -116,8 +125,9 @@ public readonly record struct CutTime(double Minutes, double Speed, double Feed,
         bool rough = cut.Process.StartsRough;
         double feedForRa = Math.Sqrt(32 * cut.Ra.ToMicrometres() / RealRoughness * nose / 1000);
         double feed = Math.Min(feedForRa, roughFeed);
-        int passes = Math.Max(1, (int)Math.Ceiling(perSide / (rough ? roughDepth : MediumDepth) - 1e-9));
-        double speed = rough ? cut.Data.TurnRough : cut.Data.TurnFinish;
+        bool boring = nose == BoringNose;
+        int passes = Math.Max(1, (int)Math.Ceiling(perSide / (rough ? roughDepth : MediumDepth) - 1e-9)) + (boring && cut.Process.RoutineGrade <= SpringPassTo ? 1 : 0);
+        double speed = (rough ? cut.Data.TurnRough : cut.Data.TurnFinish) * (boring ? BoringSpeed : 1);
         return Revolving(cut.Diameter.ToMillimetres(), speed, feed, passes, cut.Extent.ToMillimetres() + 2 * Overrun);
     }
 

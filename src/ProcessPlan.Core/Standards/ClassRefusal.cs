@@ -5,7 +5,7 @@ namespace ProcessPlan.Core.Standards;
 /// <summary>Why a tolerance class does not exist at a nominal size, and which do.</summary>
 /// <param name="Gap">The reason by kind.</param>
 /// <param name="Message">One sentence to the person at the machine: what is missing, why, and the nearest classes.</param>
-/// <param name="Nearest">The nearest classes that the standard gives at the size, at most two; empty outside the sizes of the standard.</param>
+/// <param name="Nearest">The nearest classes that exist at the size, at most two; none outside the sizes of the standard.</param>
 public sealed record ClassRefusal(ClassGap Gap, string Message, IReadOnlyList<ToleranceClass> Nearest)
 {
     internal static ClassRefusal For(Length nominal, ToleranceClass c)

@@ -3,7 +3,8 @@ using ProcessPlan.Core.Values;
 namespace ProcessPlan.Core.Standards;
 
 /// <summary>
-/// Conversion between scales of hardness by ISO 18265, Table A.1: unalloyed and low-alloy steel and cast steel only. A converted hardness is an estimate.
+/// Conversion between scales of hardness by ISO 18265, Table A.1: unalloyed and low-alloy steel and cast steel only.
+/// A converted hardness is an estimate.
 /// </summary>
 public static class HardnessConversion
 {
@@ -12,7 +13,7 @@ public static class HardnessConversion
     public static Citation Citation => Table.Cite();
 
     /// <summary>
-    /// The hardness in another scale, interpolated linearly between the rows, to the tenth for HRC and to the whole point for HB and HV, a half up.
+    /// The hardness in another scale, linear between the rows, rounded to the tenth for HRC and to the point for HB and HV, a half up.
     /// </summary>
     /// <returns>Null outside the rows that give both scales; the ends are included. The same scale gives the hardness unchanged.</returns>
     public static Hardness? Convert(Hardness from, HardnessScale to)

@@ -11,7 +11,7 @@ public enum GeneralTolerance
     VeryCoarse,
 }
 
-/// <summary>ISO 2768-1:1989: general tolerances of linear sizes without a tolerance of their own, from 0.5 to 4000 mm, both included.</summary>
+/// <summary>ISO 2768-1:1989: tolerances of linear sizes that have none of their own, from 0.5 to 4000 mm, both included.</summary>
 public static class Iso2768
 {
     private static readonly string[] Letters = ["f", "m", "c", "v"];
@@ -25,7 +25,7 @@ public static class Iso2768
     public static Deviation? Find(Length nominal, GeneralTolerance tolerance)
     {
         string column = Letters[(int)tolerance];
-        return Row(nominal) is { } row && !row.IsEmpty(column) ? new Deviation(Length.FromMillimetres(row.Decimal(column)).Picometres) : null;
+        return Row(nominal) is { } row && !row.IsEmpty(column) ? Length.FromMillimetres(row.Decimal(column)) - Length.Zero : null;
     }
 
     /// <summary>Where the deviation stands, as "ISO 2768-1:1989, Table 1, over 30 to 120 mm, m".</summary>

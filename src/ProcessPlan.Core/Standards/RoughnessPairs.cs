@@ -8,13 +8,14 @@ public static class RoughnessPairs
     private static readonly PublishedTable Table = PublishedTable.Load("ra-rz-pairs.txt");
 
     /// <summary>What has to be said wherever an Rz was turned into an Ra.</summary>
-    public static string Remark => "There is no exact law between Ra and Rz: the pairs are a maker's table, so measure the one that the drawing asks for.";
+    public static string Remark =>
+        "There is no exact law between Ra and Rz: the pairs are a maker's table, so measure the one that the drawing asks for.";
 
     public static Citation Citation => Table.Cite();
 
     /// <summary>
-    /// The Ra to hold for <paramref name="asked"/>: itself where it is an Ra; for an Rz the largest Ra of the table whose Rz, the larger figure where
-    /// two are printed, does not exceed the asked Rz. Null for an Rz finer than the table.
+    /// The Ra to hold for what is asked: itself where it is an Ra; for an Rz the largest Ra of the table whose Rz, the larger figure
+    /// where two are printed, does not exceed the asked Rz. Null for an Rz finer than the table.
     /// </summary>
     public static Roughness? ToRa(Roughness asked)
     {

@@ -17,6 +17,9 @@ public readonly record struct ExactDecimal(long Units, int Places)
 
     public double ToDouble() => Units / (double)PowerOfTen(Places);
 
+    /// <summary>The number without trailing zeros, with a point.</summary>
+    public override string ToString() => DecimalText.Format(Units, Places);
+
     /// <summary>This number times <paramref name="factor"/>, where that is a whole number within the range of <see cref="long"/>.</summary>
     /// <param name="factor">Above zero.</param>
     /// <param name="whole">The product; zero where there is none.</param>

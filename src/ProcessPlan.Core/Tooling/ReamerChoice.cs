@@ -31,38 +31,35 @@ public static class ReamerChoice
         return true;
     }
 
-    /// <summary>The best suited reamer: the one made for this class of hole first, else the largest, which has the longest life.</summary>
-    public static Tool? Best(IReadOnlyList<Tool> reamers, SizeWindow hole, ToleranceClass? asked)
+    /// <summary>
+    /// The best suited reamer: the one that leaves the largest share of good holes, to a ten-thousandth; among equals the one made for this class of
+    /// hole, else the largest, which has the longest life.
+    /// </summary>
+    /// <param name="near">Reamers of about this size.</param>
+    /// <param name="hole">Limits of the hole.</param>
+    /// <param name="asked">The class asked for, if any.</param>
+    /// <param name="yield">Share of good holes that a reamer leaves.</param>
+    public static Tool? Best(ReadOnlySpan<Tool> near, SizeWindow hole, ToleranceClass? asked, Func<Tool, double> yield)
     {
+        const int YieldPlaces = 4;
         Tool? best = null;
-        bool bestIsMadeFor = false;
-        for (int i = FirstNotBelow(reamers, hole.Min); i < reamers.Count && reamers[i].Stamped <= hole.Max; i++)
+        (double Yield, bool MadeFor, Length Size) merit = default;
+        foreach (Tool tool in near)
         {
-            Tool tool = reamers[i];
-            bool madeFor = asked is { } toleranceClass && tool.Made == toleranceClass.ToString();
-            bool better = best is null || (madeFor && !bestIsMadeFor) || (madeFor == bestIsMadeFor && tool.Own.Max > best.Own.Max);
-            if (better && Suits(tool, hole, out _))
+            if (!Suits(tool, hole, out _))
             {
-                (best, bestIsMadeFor) = (tool, madeFor);
+                continue;
+            }
+
+            (double Yield, bool MadeFor, Length Size) own =
+                (Math.Round(yield(tool), YieldPlaces), asked is { } toleranceClass && tool.Made == toleranceClass.ToString(), tool.Own.Max);
+            if (best is null || own.CompareTo(merit) > 0)
+            {
+                (best, merit) = (tool, own);
             }
         }
 
         return best;
-    }
-
-    /// <summary>Index of the first tool that could suit: stamps lie a little below or above the sizes that they cut.</summary>
-    private static int FirstNotBelow(IReadOnlyList<Tool> tools, Length size)
-    {
-        Length from = size - Deviation.FromMicrometres(500);
-        int low = 0;
-        int high = tools.Count;
-        while (low < high)
-        {
-            int middle = (low + high) / 2;
-            (low, high) = tools[middle].Stamped < from ? (middle + 1, high) : (low, middle);
-        }
-
-        return low;
     }
 
     /// <summary>A quarter of the hole tolerance whose 35 % is the reamer's own tolerance.</summary>

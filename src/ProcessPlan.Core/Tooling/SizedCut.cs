@@ -15,7 +15,8 @@ public readonly record struct SizedCut(SizeWindow Sizes, (Deviation Least, Devia
         (Micrometres(row, "least"), Micrometres(row, "most"), DrillTable.Cite($"over {row["over"]} to {row["upto"]} mm")));
 
     private static readonly PublishedTable ReamerTable = PublishedTable.Load("reamer-cut.txt");
-    private static readonly Dictionary<string, TableRow> Reamers = ReamerTable.Rows.ToDictionary(static row => row["group"]);
+    private static readonly Dictionary<string, ReamerRow> Reamers = ReamerTable.Rows.ToDictionary(static row => row["group"], static row => new ReamerRow(
+        Micrometres(row, "ordinaryLeast"), Micrometres(row, "ordinaryMost"), Micrometres(row, "carefulLeast"), Micrometres(row, "carefulMost"), ReamerTable.Cite($"group {row["group"]}")));
 
     private static readonly Citation CoreDrillRule = new("common practice", "a core drill cuts its own size up to a grade IT10 over", Standing.CommonPractice);
 
@@ -38,12 +39,18 @@ public readonly record struct SizedCut(SizeWindow Sizes, (Deviation Least, Devia
                     : throw new InvalidDataException($"There is no IT10 at {tool.Stamped}.");
                 return new SizedCut(new SizeWindow(tool.Stamped, tool.Stamped + grade), (default, grade), CoreDrillRule);
             default:
-                TableRow cut = Reamers[group];
-                Deviation under = Micrometres(cut, careful ? "carefulLeast" : "ordinaryLeast");
-                Deviation over = Micrometres(cut, careful ? "carefulMost" : "ordinaryMost");
-                return new SizedCut(new SizeWindow(tool.Own.Min + under, tool.Own.Max + over), (under, over), ReamerTable.Cite($"group {group}"));
+                ReamerRow cut = Reamers[group];
+                Deviation under = careful ? cut.CarefulLeast : cut.OrdinaryLeast;
+                Deviation over = careful ? CarefulMost(cut, tool.Stamped) : cut.OrdinaryMost;
+                return new SizedCut(new SizeWindow(tool.Own.Min + under, tool.Own.Max + over), (under, over), cut.Origin);
         }
     }
 
+    /// <summary>With little run-out the oversize stays within the 15 % that DIN 1420 keeps free in an IT7 hole, rounded up, or the table's figure if that is less.</summary>
+    private static Deviation CarefulMost(ReamerRow cut, Length size) =>
+        Iso286.TryWidth(size, ToleranceGrade.It(7), out Deviation width) && Din1420.Reserve(width) < cut.CarefulMost ? Din1420.Reserve(width) : cut.CarefulMost;
+
     private static Deviation Micrometres(TableRow row, string column) => Deviation.FromMicrometres((long)row.Decimal(column));
+
+    private sealed record ReamerRow(Deviation OrdinaryLeast, Deviation OrdinaryMost, Deviation CarefulLeast, Deviation CarefulMost, Citation Origin);
 }

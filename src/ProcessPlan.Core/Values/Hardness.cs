@@ -29,7 +29,8 @@ public readonly record struct Hardness(long Tenths, HardnessScale Scale)
     public double Points => Tenths / 10.0;
 
     /// <summary>
-    /// Reads <c>58HRC</c>, <c>28,5 HRC</c>, <c>240 HB</c>, <c>240 HBW</c> or <c>700 HV</c>, in any case of letters, from the start of <paramref name="text"/>.
+    /// Reads <c>58HRC</c>, <c>28,5 HRC</c>, <c>240 HB</c>, <c>240 HBW</c> or <c>700 HV</c>, in any case of letters, from the start of
+    /// <paramref name="text"/>.
     /// </summary>
     /// <param name="text">The text; a letter or digit right behind the scale makes it no hardness.</param>
     /// <param name="value">The hardness read, over zero.</param>

@@ -15,7 +15,7 @@ public enum RoughnessParameter
     Number,
 }
 
-/// <summary>A limit of surface roughness, exact to the nanometre, as the drawing states it. The default, Ra 0, is one that no drawing states.</summary>
+/// <summary>A limit of surface roughness as the drawing states it, exact to the nanometre. The default, Ra 0, is none.</summary>
 public readonly record struct Roughness
 {
     private const long NanometresPerMicrometre = 1000;
@@ -54,8 +54,8 @@ public readonly record struct Roughness
         : throw new ArgumentOutOfRangeException(nameof(number), number, "ISO 1302 has the roughness numbers N1 to N12.");
 
     /// <summary>
-    /// Reads <c>Ra0.8</c>, <c>Rz 6,3</c> (µm, over zero, to the nanometre; in any case of letters) or <c>N6</c> (capital: a small n begins the class
-    /// of a shaft) from the start of <paramref name="text"/>.
+    /// Reads <c>Ra0.8</c>, <c>Rz 6,3</c> (µm, over zero, to the nanometre; in any case of letters) or <c>N6</c> (capital: a small n
+    /// begins the class of a shaft) from the start of <paramref name="text"/>.
     /// </summary>
     /// <param name="text">The text; a letter or digit right behind the roughness makes it none.</param>
     /// <param name="value">The roughness read.</param>

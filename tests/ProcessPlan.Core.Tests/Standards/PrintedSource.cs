@@ -5,7 +5,8 @@ using ProcessPlan.Core.Values;
 namespace ProcessPlan.Core.Tests.Standards;
 
 /// <summary>
-/// Rows read from an independent publication, in <c>Sources/*.csv</c>: a head of <c>#</c> lines that names the source, one line of columns, the rows.
+/// Rows read from an independent publication, in <c>Sources/*.csv</c>: a head of <c>#</c> lines that names the source, one line of
+/// columns, then the rows.
 /// </summary>
 internal sealed class PrintedSource
 {
@@ -32,11 +33,12 @@ internal sealed class PrintedRow(string[] columns, string line)
     public decimal? Number(string column) =>
         this[column] is { Length: > 0 } cell ? decimal.Parse(cell, NumberStyles.Float, CultureInfo.InvariantCulture) : null;
 
-    public Deviation? Micrometres(string column) => Number(column) is { } um ? new Deviation((long)(um * Length.PicometresPerMicrometre)) : null;
+    public Deviation? Micrometres(string column) =>
+        Number(column) is { } um ? new Deviation((long)(um * Length.PicometresPerMicrometre)) : null;
 
     /// <summary>
-    /// Sizes to look the row up at: just over its lower end, between, and its upper end, which belongs to it. The row up to 3 mm is looked up
-    /// over 1 mm, because the publications print its footnotes for sizes up to 1 mm apart.
+    /// Sizes to look the row up at: just over its lower end, between, and its upper end, which belongs to it. The row up to 3 mm is
+    /// looked up over 1 mm, because the publications print its footnotes for sizes up to 1 mm apart.
     /// </summary>
     public IEnumerable<Length> Sizes()
     {
