@@ -1,10 +1,13 @@
 using System.CommandLine;
+using System.CommandLine.Help;
 
 namespace ProcessPlan;
 
 /// <summary>Takes the words that the program was called with to the command that is meant.</summary>
 internal static class CommandLine
 {
+    private const int HelpWidth = 80;
+
     private static readonly ParserConfiguration Reading = new()
     {
         // A feature is free text: no bundles of letters, no response files.
@@ -18,6 +21,11 @@ internal static class CommandLine
         if (parsed.Errors.Count > 0)
         {
             throw new UsageException(Sentence(root, parsed));
+        }
+
+        if (parsed.Action is HelpAction help)
+        {
+            help.MaxWidth = HelpWidth;
         }
 
         using StreamWriter output = streams.OutputText();

@@ -33,8 +33,7 @@ internal static class Program
         }
         catch (UsageException usage)
         {
-            streams.Error.WriteLine($"processplan: {usage.Message}");
-            return ExitCode.NotUnderstood;
+            return Tell(streams, usage.Message, ExitCode.NotUnderstood);
         }
         catch (IOException closed) when (ClosedPipe.Is(closed))
         {
@@ -43,12 +42,24 @@ internal static class Program
         }
         catch (Exception failure) when (failure is IOException or UnauthorizedAccessException)
         {
-            streams.Error.WriteLine($"processplan: {failure.Message}");
-            return ExitCode.World;
+            return Tell(streams, failure.Message, ExitCode.World);
         }
         catch (Exception defect)
         {
-            streams.Error.WriteLine($"processplan: a defect of the program, please report it: {defect.GetType().Name}, {defect.Message}");
+            return Tell(streams, $"a defect of the program, please report it: {defect.GetType().Name}, {defect.Message}", ExitCode.World);
+        }
+    }
+
+    private static int Tell(Streams streams, string sentence, int exit)
+    {
+        try
+        {
+            streams.Error.WriteLine($"processplan: {sentence}");
+            return exit;
+        }
+        catch (IOException)
+        {
+            // There is no place left to say it; the exit code still does.
             return ExitCode.World;
         }
     }

@@ -95,6 +95,7 @@ public class BadInputTests
 
         answer.Exit.Should().Be(0);
         answer.Output.Should().Contain("--unit <mm|in>").And.Contain("--json").And.Contain("--ascii");
+        answer.Output.Split('\n').Should().OnlyContain(line => line.Length <= 80);
         Answer.To("--help").Output.Should().Contain("limits");
     }
 }

@@ -35,6 +35,15 @@ public class WorldTests
         error.ToString().Should().BeEmpty();
     }
 
+    [Fact]
+    public void Where_nothing_can_be_told_the_exit_code_still_says_it()
+    {
+        using Failing full = new(new IOException("No space left on device."));
+        using StreamWriter error = new(full) { AutoFlush = true };
+
+        Program.Run(["limits", "25 H7 thruu"], new Streams(() => Stream.Null, () => full, () => error, () => false)).Should().Be(3);
+    }
+
     private sealed class Failing(IOException failure) : MemoryStream
     {
         public override int Read(byte[] buffer, int offset, int count) => throw failure;
