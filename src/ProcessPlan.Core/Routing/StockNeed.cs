@@ -95,7 +95,6 @@ internal readonly record struct StockNeed
         double setting = process.SelfGuided || process.Ability == "drill" ? 0 : SettingError(process, job, size, sameClamping, blank);
         double layer = keepLayer ? state.LayerMicrometres : 0;
         bool flat = !job.Feature.IsRound;
-        double spatial = flat ? error + setting : Math.Sqrt(error * error + setting * setting);
         (Stock? table, Citation? origin) = HandbookStock(process.Name, before, job.Nominal);
         bool grinds = process.Ability.StartsWith("grind", StringComparison.Ordinal);
         table = afterHeat && grinds ? table + Stock.FromMicrometres(GrindingAfterHeat) : table;
@@ -107,13 +106,17 @@ internal readonly record struct StockNeed
             Setting = setting,
             Flat = flat,
             Surface = state,
-            Analytical = new Estimate(2 * (state.RzMicrometres + layer + spatial)).RoundUp(new Length(Length.PicometresPerMicrometre)),
+            Analytical = Twice(state.RzMicrometres, layer, error, setting, flat).RoundUp(new Length(Length.PicometresPerMicrometre)),
             Table = table,
             TableOrigin = origin,
             TableLeast = table is { } basic && basic.Picometres > toleranceBefore.Picometres ? new Stock(basic.Picometres - toleranceBefore.Picometres) : null,
             Quantity = job.Quantity,
         };
     }
+
+    /// <summary>2·(Rz + h + √(ρ² + ε²)) on a round feature; on a flat one the errors lie in one line, 2·(Rz + h + ρ + ε).</summary>
+    internal static Estimate Twice(double rz, double layer, double error, double setting, bool flat) =>
+        new(2 * (rz + layer + (flat ? error + setting : Math.Sqrt(error * error + setting * setting))));
 
     /// <summary>The sum with its figures and where they come from.</summary>
     public IEnumerable<string> Explain()
