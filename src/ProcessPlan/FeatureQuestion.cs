@@ -12,8 +12,6 @@ namespace ProcessPlan;
 internal sealed class FeatureQuestion
 {
     private const string StandardInput = "-";
-    private const string Millimetres = "mm";
-    private const string Inches = "in";
 
     public Argument<string[]> Feature { get; } = new("feature")
     {
@@ -23,21 +21,18 @@ internal sealed class FeatureQuestion
 
     public Option<bool> Json { get; } = new("--json") { Description = "Answer as one JSON document; - always answers as JSON, one document a line" };
 
-    public Option<string> Unit { get; } = new("--unit")
-    {
-        Description = "Unit that comes first: mm or in; without it the one that was typed",
-        HelpName = Millimetres + "|" + Inches,
-        Arity = ArgumentArity.ZeroOrOne,
-    };
+    private UnitChoice Unit { get; } = new("the one that was typed");
 
-    public Option<bool> Ascii { get; } = new("--ascii") { Description = "Plain characters only: um, dia, +/-" };
+    public Option<bool> Ascii { get; } = PlainLettersOption();
+
+    public static Option<bool> PlainLettersOption() => new("--ascii") { Description = "Plain characters only: um, dia, +/-" };
 
     /// <summary>Adds the line and the choices to a command.</summary>
     public void AddTo(Command command)
     {
         command.Arguments.Add(Feature);
         command.Options.Add(Json);
-        command.Options.Add(Unit);
+        command.Options.Add(Unit.Option);
         command.Options.Add(Ascii);
     }
 
@@ -51,7 +46,7 @@ internal sealed class FeatureQuestion
     {
         string[] words = parsed.GetValue(Feature) ?? [];
         RefuseMisuse(parsed.CommandResult.Command, words);
-        LengthUnit? unit = UnitAsked(parsed);
+        LengthUnit? unit = Unit.In(parsed);
         if (words is [StandardInput])
         {
             return new FeatureStream(materials(), writeJson).Answer(streams);
@@ -78,14 +73,6 @@ internal sealed class FeatureQuestion
             throw new UsageException($"'{unknown}' is no option of {command.Name}; expected {options}.");
         }
     }
-
-    private LengthUnit? UnitAsked(ParseResult parsed) => parsed.GetResult(Unit) is null ? null : parsed.GetValue(Unit) switch
-    {
-        Millimetres => LengthUnit.Millimetre,
-        Inches => LengthUnit.Inch,
-        string other => throw new UsageException($"--unit found '{other}'; expected {Millimetres} or {Inches}."),
-        null => throw new UsageException($"--unit found nothing; expected {Millimetres} or {Inches}."),
-    };
 
     private static int AnswerAsJson(Stream output, Parsed<FeatureRequest> read, Func<Utf8JsonWriter, FeatureRequest, int> write)
     {

@@ -29,7 +29,7 @@ internal static class Program
     {
         try
         {
-            return args.Length == 0 ? Screens.Open(streams) : CommandsFor(args[0], streams).Answer(args, streams);
+            return CommandsFor(args.FirstOrDefault(), streams).Answer(args, streams);
         }
         catch (UsageException usage)
         {
@@ -65,9 +65,10 @@ internal static class Program
     }
 
     /// <summary>The tree of commands; only the one that is meant is made, all of them where none is.</summary>
-    private static RootCommand CommandsFor(string first, Streams streams)
+    private static RootCommand CommandsFor(string? first, Streams streams)
     {
-        RootCommand root = new("Plans how a machinist makes a hole, shaft, slot or tongue to its drawing.");
+        RootCommand root = new("Plans how a machinist makes a hole, shaft, slot or tongue to its drawing. Without a command it opens the screens.");
+        Screens.AddTo(root);
         (string Name, Func<Streams, Command> Create)[] meant = Array.FindAll(Commands, command => command.Name == first);
         foreach ((_, Func<Streams, Command> create) in meant.Length > 0 ? meant : Commands)
         {

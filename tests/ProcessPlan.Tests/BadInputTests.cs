@@ -76,7 +76,6 @@ public class BadInputTests
     [InlineData("--unit found 'cm'; expected mm or in.", "limits", "25H7", "--unit", "cm")]
     [InlineData("--unit found nothing; expected mm or in.", "limits", "25H7", "--unit")]
     [InlineData("'--jsn' is no option of limits; expected --json, --unit, --ascii.", "limits", "25H7", "--jsn")]
-    [InlineData("a command is needed, such as limits 25H7; processplan --help shows them all.")]
     public void A_call_that_is_not_understood_is_answered_in_one_sentence(string sentence, params string[] words)
     {
         Answer.To(words).Should().Be(new Answer(2, "", $"processplan: {sentence}\n"));

@@ -86,4 +86,15 @@ public class ExecutableTests
 
         output.Should().Be(Answer.To("limits", "--json", "25.5H7").Output);
     }
+
+    [Fact]
+    public async Task Without_a_command_and_without_a_terminal_it_says_that_the_screen_needs_one()
+    {
+        using Process program = Executable.Start([], ("TERM", "dumb"));
+        string error = await program.StandardError.ReadToEndAsync();
+        await program.WaitForExitAsync();
+
+        program.ExitCode.Should().Be(3);
+        error.Should().Be("This terminal cannot show a screen (TERM is not set, or dumb); the commands work without one: see --help.\n");
+    }
 }
