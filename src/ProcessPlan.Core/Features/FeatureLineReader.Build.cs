@@ -411,7 +411,7 @@ internal ref partial struct FeatureLineReader
     private bool TryGeneralLimits(Length nominal, out SizeWindow limits)
     {
         limits = default;
-        if (Iso2768.Find(nominal, _general.Value) is not { } permissible)
+        if (Iso2768.Find(nominal, _general.Value) is not { } permissible || nominal - permissible <= Length.Zero)
         {
             Report($"ISO 2768-1 gives no tolerance {Iso2768.Name(_general.Value)} for {nominal}.", _general.Place, "a class, deviations or limits");
             return false;

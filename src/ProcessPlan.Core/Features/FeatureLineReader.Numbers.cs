@@ -1,3 +1,4 @@
+using ProcessPlan.Core.Standards;
 using ProcessPlan.Core.Text;
 using ProcessPlan.Core.Values;
 
@@ -152,12 +153,12 @@ internal ref partial struct FeatureLineReader
     private bool TryMeasured(FeatureWord word, Place place, out Measured number)
     {
         SkipToValue();
+        int start = _at;
         if (NumberAt(_at))
         {
-            return TryNumber(out number);
+            return TryNumber(out number) && (word is FeatureWord.Size or FeatureWord.Diameter || !HasClass(place, number));
         }
 
-        int start = _at;
         if (Sign(CharAt(_at)) != 0 && NumberAt(AfterSpaces(_at + 1)))
         {
             _at = AfterSpaces(_at + 1);
@@ -172,6 +173,21 @@ internal ref partial struct FeatureLineReader
         number = default;
         Report($"'{Show(place)}' needs a number behind it.", place, $"a number, such as {Show(place)} {FeatureWords.Example(word)}");
         return false;
+    }
+
+    /// <summary>Whether a tolerance class is glued to the number behind a word: "2 deep 25H7" says something else than its words. Tells it.</summary>
+    private bool HasClass(Place word, Measured number)
+    {
+        if (number.Unit != WrittenUnit.None || CharAt(_at) is 'x' or 'X' || !ToleranceClass.TryRead(_text[_at..], out _, out int length))
+        {
+            return false;
+        }
+
+        Place place = new(number.Place.At, number.Place.Length + length);
+        _at = _classes.Count == 0 ? _at : place.End;
+        _sizeTold = true;
+        Report($"'{Show(place)}' behind '{Show(word)}' is a size with its tolerance class.", place, $"{Show(number.Place)} alone, and the class behind the size");
+        return true;
     }
 
     private void TakeMeasured(ref Noted<Measured> slot, FeatureWord word, Place place, string what)

@@ -73,7 +73,7 @@ internal ref partial struct FeatureLineReader
         {
             AddEither(new EitherNote(asClass, kind.Value, number, "", place));
         }
-        else
+        else if (kind != EitherKind.Extent || !HasClass(new Place(start, 1), number))
         {
             TakeOther(new EitherNote(default, kind.Value, number, "", PlaceFrom(start)));
         }
@@ -204,6 +204,10 @@ internal ref partial struct FeatureLineReader
         {
             NoteQuantity(number, PlaceFrom(number.Place.At));
         }
+        else if (TrySuffix("deep") || TrySuffix("long"))
+        {
+            TakeExtentBefore(number);
+        }
         else if (number.IsZero && SecondDeviationFollows())
         {
             TakeSecondDeviation(number, 1);
@@ -224,6 +228,22 @@ internal ref partial struct FeatureLineReader
         {
             _sizes.Add(number);
         }
+    }
+
+    /// <summary>"40 deep", "40 long"; in "40 deep 25" either number could be meant.</summary>
+    private void TakeExtentBefore(Measured number)
+    {
+        Place place = PlaceFrom(number.Place.At);
+        SkipToValue();
+        if (NumberAt(_at) && TryNumber(out Measured second))
+        {
+            Place both = number.Place.To(second.Place);
+            _sizeTold = true;
+            Report($"'{Show(both)}' has a number before and behind.", both, "x before the length or depth, such as x 40");
+            return;
+        }
+
+        Note(ref _extent, number, place, "length or depth");
     }
 
     private bool TryPieces() => TrySuffix("off") || TrySuffix("pcs") || TrySuffix("pieces");

@@ -134,7 +134,7 @@ internal ref partial struct FeatureLineReader
             case FeatureWord.Size or FeatureWord.Diameter:
                 TakeSize(word, place);
                 break;
-            case FeatureWord.Extent:
+            case FeatureWord.Extent or FeatureWord.Deep:
                 TakeMeasured(ref _extent, word, place, "length or depth");
                 break;
             case FeatureWord.Bottom:

@@ -13,6 +13,7 @@ internal enum FeatureWord
     Diameter,
     Tolerance,
     Extent,
+    Deep,
     Through,
     Blind,
     End,
@@ -80,9 +81,9 @@ internal static class FeatureWords
         ["×"] = FeatureWord.Extent,
         ["*"] = FeatureWord.Extent,
         ["depth"] = FeatureWord.Extent,
-        ["deep"] = FeatureWord.Extent,
+        ["deep"] = FeatureWord.Deep,
         ["length"] = FeatureWord.Extent,
-        ["long"] = FeatureWord.Extent,
+        ["long"] = FeatureWord.Deep,
         ["thru"] = FeatureWord.Through,
         ["through"] = FeatureWord.Through,
         ["blind"] = FeatureWord.Blind,
@@ -151,7 +152,7 @@ internal static class FeatureWords
     /// <summary>What a word that needs a number is followed by, for example.</summary>
     public static string Example(FeatureWord word) => word switch
     {
-        FeatureWord.Extent => "40",
+        FeatureWord.Extent or FeatureWord.Deep => "40",
         FeatureWord.Bottom => "5",
         FeatureWord.Wall => "2",
         FeatureWord.OuterDiameter => "50",

@@ -42,7 +42,9 @@ public sealed class MaterialNames
 
         Span<char> folded = stackalloc char[LongestName];
         int length = Fold(name, folded);
-        return length > 0 && _bySpan.TryGetValue(folded[..length], out designation!);
+        bool found = _bySpan.TryGetValue(folded[..length], out string? known);
+        designation = known ?? "";
+        return found;
     }
 
     private void Add(string name, string designation)

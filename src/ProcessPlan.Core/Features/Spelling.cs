@@ -41,14 +41,19 @@ internal static class Spelling
 
         for (int i = 1; i <= a.Length; i++)
         {
-            int diagonal = row[0];
-            row[0] = i;
-            int least = i;
-            for (int j = 1; j <= b.Length; j++)
+            // Cells further from the diagonal than the limit cannot come below it.
+            int from = Math.Max(1, i - limit + 1);
+            int to = Math.Min(b.Length, i + limit - 1);
+            int diagonal = row[from - 1];
+            int left = from == 1 ? i : limit;
+            int least = left;
+            row[from - 1] = left;
+            for (int j = from; j <= to; j++)
             {
-                int same = char.ToLowerInvariant(a[i - 1]) == char.ToLowerInvariant(b[j - 1]) ? 0 : 1;
-                (row[j], diagonal) = (Math.Min(Math.Min(row[j] + 1, row[j - 1] + 1), diagonal + same), row[j]);
-                least = Math.Min(least, row[j]);
+                int above = row[j];
+                left = Math.Min(Math.Min(above, left) + 1, diagonal + (IsSame(a[i - 1], b[j - 1]) ? 0 : 1));
+                (diagonal, row[j]) = (above, left);
+                least = Math.Min(least, left);
             }
 
             if (least >= limit)
@@ -59,4 +64,6 @@ internal static class Spelling
 
         return Math.Min(row[b.Length], limit);
     }
+
+    private static bool IsSame(char a, char b) => a == b || ((a ^ b) == ('a' ^ 'A') && char.IsAsciiLetter(a));
 }

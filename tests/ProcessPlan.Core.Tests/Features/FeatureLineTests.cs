@@ -654,7 +654,10 @@ public sealed partial class FeatureLineTests
     [InlineData("25H7x40thru;Ra0.8;C45;200off", "hole 25 H7 x 40 thru Ra 0.8 C45 200 off")]
     [InlineData("hole25H7x40C45", "hole 25 H7 x 40 C45")]
     [InlineData("60+0.03/0x50wall2", "hole 60 +0.03/0 x 50 wall 2", "hole ")]
-    [InlineData("25mmx40H7", "hole 25 H7 x 40")]
+    [InlineData("25mmx40", "hole 25 H7 x 40", "H7 ")]
+    [InlineData("hole 25H7 40 deep", "hole 25 H7 x 40")]
+    [InlineData("25 h6 40 long", "shaft 25 h6 x 40")]
+    [InlineData("25H7 40mm deep", "hole 25 H7 x 40")]
     [InlineData("25H7, x40, thru, C45.", "hole 25H7 x40 thru C45")]
     [InlineData("kind=hole size=25 tol=H7 depth=40 end=thru ra=0.8 mat=C45 hardness=28HRC hardened=58HRC cyl=0.01 start=cast 20 qty=12 unit=mm interrupted=yes wall=3 coat=zinc 5-8um limits=before",
         "hole 25H7 x40 thru Ra0.8 C45 28HRC hardened 58HRC cyl 0.01 cast 20 12off interrupted wall 3 coat zinc 5-8um before")]
