@@ -5,19 +5,28 @@ namespace ProcessPlan.Documents;
 /// <summary>
 /// Passes text on in the ninety-five characters that every terminal and printer has: µ as u, ± as +/-, Ø as dia, anything else unknown as a question mark.
 /// </summary>
-public sealed class PlainLetters(TextWriter target) : TextWriter(target.FormatProvider)
+public sealed class PlainLetters : TextWriter
 {
-    public override Encoding Encoding => target.Encoding;
+    private readonly TextWriter _target;
+
+    public PlainLetters(TextWriter target)
+        : base(target.FormatProvider)
+    {
+        _target = target;
+        NewLine = target.NewLine;
+    }
+
+    public override Encoding Encoding => _target.Encoding;
 
     public override void Write(char value)
     {
         if (value < '\u0080')
         {
-            target.Write(value);
+            _target.Write(value);
             return;
         }
 
-        target.Write(value switch
+        _target.Write(value switch
         {
             'Ø' or 'ø' or '⌀' => "dia ",
             'µ' or 'μ' => "u",
@@ -40,5 +49,5 @@ public sealed class PlainLetters(TextWriter target) : TextWriter(target.FormatPr
         });
     }
 
-    public override void Flush() => target.Flush();
+    public override void Flush() => _target.Flush();
 }

@@ -6,6 +6,9 @@ namespace ProcessPlan;
 /// <summary>The three streams of a process, UTF-8 without a byte order mark; each is opened when it is first used.</summary>
 internal sealed class Streams(Func<Stream> input, Func<Stream> output, Func<TextWriter> error, Func<bool> isErrorTerminal)
 {
+    /// <summary>The same bytes on every machine.</summary>
+    private const string NewLine = "\n";
+
     private static readonly UTF8Encoding Utf8 = new(encoderShouldEmitUTF8Identifier: false);
 
     public Stream Input => field ??= input();
@@ -18,10 +21,10 @@ internal sealed class Streams(Func<Stream> input, Func<Stream> output, Func<Text
     public bool IsErrorTerminal => isErrorTerminal();
 
     public static Streams OfProcess() =>
-        new(Console.OpenStandardInput, OpenOutput, () => new StreamWriter(Console.OpenStandardError(), Utf8) { AutoFlush = true }, () => !Console.IsErrorRedirected);
+        new(Console.OpenStandardInput, OpenOutput, () => new StreamWriter(Console.OpenStandardError(), Utf8) { AutoFlush = true, NewLine = NewLine }, () => !Console.IsErrorRedirected);
 
     /// <summary>Text for a person; written when it is disposed.</summary>
-    public StreamWriter OutputText() => new(Output, Utf8, leaveOpen: true);
+    public StreamWriter OutputText() => new(Output, Utf8, leaveOpen: true) { NewLine = NewLine };
 
     /// <remarks>
     /// The console's own stream takes a closed pipe for success, and an endless input would never end. A stream over the handle reports it,
