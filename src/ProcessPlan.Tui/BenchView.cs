@@ -59,7 +59,6 @@ internal sealed class BenchView : Runnable
         if (mouse.Flags.HasFlag(MouseFlags.WheeledDown) || mouse.Flags.HasFlag(MouseFlags.WheeledUp))
         {
             _bench.ScrollBy(mouse.Flags.HasFlag(MouseFlags.WheeledDown) ? 1 : -1);
-            Show();
         }
         else if (mouse.Flags.HasFlag(MouseFlags.LeftButtonPressed) && mouse.Position is { } place && _bench.Page == Page.Bench)
         {
@@ -72,10 +71,10 @@ internal sealed class BenchView : Runnable
                 _bench.GoTo(Hand.Route);
                 _bench.ChooseOperation(operation);
             }
-
-            Show();
         }
 
+        Show();
+        SetNeedsDraw();
         return true;
     }
 
@@ -149,6 +148,7 @@ internal sealed class BenchView : Runnable
             Show();
         }
 
+        SetNeedsDraw();
         KeyCode bare = key.NoShift.NoCtrl.NoAlt.KeyCode;
         return taken || IsTooSmall || key.IsAlt || bare == KeyCode.Tab || bare is >= KeyCode.F1 and <= KeyCode.F24;
     }
@@ -191,7 +191,6 @@ internal sealed class BenchView : Runnable
         }
 
         ShowField();
-        SetNeedsDraw();
     }
 
     /// <summary>The field is there on the bench only, and has the keys only while the hand is on the line.</summary>

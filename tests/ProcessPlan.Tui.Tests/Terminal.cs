@@ -50,12 +50,17 @@ internal sealed class Terminal : IDisposable
         return this;
     }
 
+    public bool IsRunning => !_view.StopRequested;
+
+    /// <summary>A key by its name, without painting after it.</summary>
+    public void Inject(string key) => _app.InjectKey(Named(key));
+
     /// <summary>Presses keys by the names that the help prints.</summary>
     public Terminal Press(params string[] keys)
     {
         foreach (string key in keys)
         {
-            _app.InjectKey(Named(key));
+            Inject(key);
             Settle();
         }
 
@@ -122,6 +127,9 @@ internal sealed class Terminal : IDisposable
         "Down" => Key.CursorDown,
         "Left" => Key.CursorLeft,
         "Right" => Key.CursorRight,
+        "Insert" => Key.InsertChar,
+        "Shift+Left" => Key.CursorLeft.WithShift,
+        "Ctrl+Left" => Key.CursorLeft.WithCtrl,
         { Length: 1 } letter => new Key(letter[0]),
         _ => Key.TryParse(name, out Key? key) ? key : throw new ArgumentException($"There is no key '{name}'.", nameof(name)),
     };

@@ -96,13 +96,11 @@ internal static class BenchPage
 
     private static void DrawMarks(Sheet sheet, Problem problem, LineSight line)
     {
-        for (int at = problem.At; at < problem.At + Math.Max(1, problem.Length); at++)
+        int from = line.ColumnOf(problem.At);
+        int to = Math.Max(from + 1, line.ColumnOf(problem.At + problem.Length));
+        for (int column = Math.Max(from, line.From); column < Math.Min(to, line.To); column++)
         {
-            int column = line.ColumnOf(at);
-            if (column >= line.From && column < line.To)
-            {
-                sheet.Put(column, 1, '^', Ink.Problem);
-            }
+            sheet.Put(column, 1, '^', Ink.Problem);
         }
     }
 
