@@ -17,6 +17,7 @@ internal sealed class BenchView : Runnable
     private readonly Reckoner _reckoner;
     private readonly Palette _palette;
     private readonly Pen _pen;
+    private Sheet? _shown;
 
     /// <param name="bench">What is shown.</param>
     /// <param name="options">How it is shown, and the line it starts with.</param>
@@ -52,6 +53,31 @@ internal sealed class BenchView : Runnable
         return true;
     }
 
+    /// <summary>A click on an operation looks at it, a click on the line goes there, the wheel turns the lower text.</summary>
+    protected override bool OnMouseEvent(Mouse mouse)
+    {
+        if (mouse.Flags.HasFlag(MouseFlags.WheeledDown) || mouse.Flags.HasFlag(MouseFlags.WheeledUp))
+        {
+            _bench.ScrollBy(mouse.Flags.HasFlag(MouseFlags.WheeledDown) ? 1 : -1);
+        }
+        else if (mouse.Flags.HasFlag(MouseFlags.LeftButtonPressed) && mouse.Position is { } place && _bench.Page == Page.Bench)
+        {
+            if (place.Y == 0)
+            {
+                _bench.GoTo(Hand.Line);
+            }
+            else if (_shown?.OperationAt(place.Y) is { } operation)
+            {
+                _bench.GoTo(Hand.Route);
+                _bench.ChooseOperation(operation);
+            }
+        }
+
+        Show();
+        SetNeedsDraw();
+        return true;
+    }
+
     /// <summary>Every cell is painted, so nothing needs to be cleared before.</summary>
     protected override bool OnClearingViewport() => true;
 
@@ -59,6 +85,7 @@ internal sealed class BenchView : Runnable
     {
         Sheet sheet = new(Viewport.Width, Viewport.Height, _pen);
         Paint(sheet);
+        _shown = sheet;
         for (int y = 0; y < sheet.Height; y++)
         {
             ReadOnlySpan<Ink> inks = sheet.Inks(y);
@@ -121,6 +148,7 @@ internal sealed class BenchView : Runnable
             Show();
         }
 
+        SetNeedsDraw();
         KeyCode bare = key.NoShift.NoCtrl.NoAlt.KeyCode;
         return taken || IsTooSmall || key.IsAlt || bare == KeyCode.Tab || bare is >= KeyCode.F1 and <= KeyCode.F24;
     }
@@ -160,11 +188,9 @@ internal sealed class BenchView : Runnable
         if (_field.Text != _bench.Text)
         {
             _field.Replace(_bench.Text);
-            Read(_bench.Text);
         }
 
         ShowField();
-        SetNeedsDraw();
     }
 
     /// <summary>The field is there on the bench only, and has the keys only while the hand is on the line.</summary>

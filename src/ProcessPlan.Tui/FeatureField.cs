@@ -21,16 +21,6 @@ internal sealed class FeatureField : TextField
     /// <summary>Characters of the text before the caret; the field itself counts what the eye sees as one.</summary>
     public int Caret => StartOf(InsertionPoint);
 
-    public override int InsertionPoint
-    {
-        get => base.InsertionPoint;
-        set
-        {
-            base.InsertionPoint = value;
-            SuperView?.SetNeedsDraw();
-        }
-    }
-
     /// <summary>Column of a character of the text within the field; negative or beyond its width where it is scrolled away.</summary>
     public int ColumnOf(int character)
     {
@@ -61,9 +51,11 @@ internal sealed class FeatureField : TextField
     protected override bool OnKeyDown(Key key) => _take(key) || base.OnKeyDown(key);
 
     /// <summary>The library opens a menu of its own on the right button: it knows nothing of our keys, so it stays shut.</summary>
-    protected override bool OnMouseEvent(Mouse mouse) =>
-        mouse.Flags.HasFlag(MouseFlags.RightButtonPressed) || mouse.Flags.HasFlag(MouseFlags.RightButtonClicked) || mouse.Flags.HasFlag(MouseFlags.RightButtonReleased)
-        || base.OnMouseEvent(mouse);
+    protected override bool OnMouseEvent(Mouse mouse)
+    {
+        SuperView?.SetNeedsDraw();
+        return (mouse.Flags & (MouseFlags.RightButtonPressed | MouseFlags.RightButtonClicked | MouseFlags.RightButtonReleased)) != 0 || base.OnMouseEvent(mouse);
+    }
 
     /// <summary>The library marks the whole text when the field is entered, and the next letter would wipe it out.</summary>
     protected override void OnHasFocusChanged(bool newHasFocus, View? previousFocusedView, View? focusedView)

@@ -15,6 +15,8 @@ public static class Screen
 
     private const int Routes = 5;
 
+    private static readonly TimeSpan LongestLeave = TimeSpan.FromSeconds(2);
+
     /// <summary>Runs the screen until it is left.</summary>
     /// <param name="shop">What the plans are made from.</param>
     /// <param name="options">How the screen looks and starts.</param>
@@ -52,18 +54,20 @@ public static class Screen
             return Refuse("The screen needs a terminal, and there is none here; the commands work without one: see --help.");
         }
 
-        using IApplication app = Application.Create();
-        app.Init();
-        app.Driver!.Force16Colors = true;
-        using BenchView view = new(new Bench(shop.Names, options.Unit), options, feature => Planner.Plan(feature, shop, Routes), static work => Task.Run(work));
+        IApplication app = Application.Create();
+        bool hungUp = false;
         List<PosixSignalRegistration> signals = [];
         try
         {
+            app.Init();
+            app.Driver!.Force16Colors = true;
+            using BenchView view = new(new Bench(shop.Names, options.Unit), options, feature => Planner.Plan(feature, shop, Routes), static work => Task.Run(work));
             foreach (PosixSignal signal in (PosixSignal[])[PosixSignal.SIGTERM, PosixSignal.SIGHUP, PosixSignal.SIGINT, PosixSignal.SIGQUIT])
             {
                 signals.Add(PosixSignalRegistration.Create(signal, context =>
                 {
                     context.Cancel = true;
+                    hungUp |= context.Signal == PosixSignal.SIGHUP;
                     app.Invoke(_ => app.RequestStop(view));
                 }));
             }
@@ -74,6 +78,23 @@ public static class Screen
         finally
         {
             signals.ForEach(static signal => signal.Dispose());
+            Leave(app, hungUp);
+        }
+    }
+
+    /// <summary>
+    /// Gives the terminal back. Where it has hung up there is none to give back, and the library's reader would wait for its end for ever: only then
+    /// the wait is limited.
+    /// </summary>
+    private static void Leave(IApplication app, bool hungUp)
+    {
+        if (hungUp)
+        {
+            Task.Run(app.Dispose).Wait(LongestLeave);
+        }
+        else
+        {
+            app.Dispose();
         }
     }
 }

@@ -56,7 +56,7 @@ internal static class BenchPage
                 DrawMarks(sheet, marked, line);
             }
 
-            string others = bench.Problems.Count > 1 ? $" (1 of {bench.Problems.Count})" : "";
+            string others = bench.Problems.Count > 1 ? $" (and {bench.Problems.Count - 1} more)" : "";
             string text = $"{problem.Message} Expected: {problem.Expected}{others}";
             List<string> lines = [.. sheet.Wrap(text, sheet.Width)];
             for (int i = 0; i < lines.Count && i < 2; i++)
@@ -96,13 +96,11 @@ internal static class BenchPage
 
     private static void DrawMarks(Sheet sheet, Problem problem, LineSight line)
     {
-        for (int at = problem.At; at < problem.At + Math.Max(1, problem.Length); at++)
+        int from = line.ColumnOf(problem.At);
+        int to = Math.Max(from + 1, line.ColumnOf(problem.At + problem.Length));
+        for (int column = Math.Max(from, line.From); column < Math.Min(to, line.To); column++)
         {
-            int column = line.ColumnOf(at);
-            if (column >= line.From && column < line.To)
-            {
-                sheet.Put(column, 1, '^', Ink.Problem);
-            }
+            sheet.Put(column, 1, '^', Ink.Problem);
         }
     }
 
@@ -120,10 +118,6 @@ internal static class BenchPage
         {
             DrawRoute(sheet, row, room.Operations, bench, plan, route, ruler);
             row += room.Operations + 3;
-        }
-        else if (plan.Refusal is { } refusal)
-        {
-            row = DrawRefusal(sheet, row, refusal);
         }
 
         DrawBelow(sheet, row, sheet.Height - 1 - row, bench, plan);
@@ -148,23 +142,24 @@ internal static class BenchPage
     private static void DrawSize(Sheet sheet, int row, int rows, Bench bench, Answer answer, Feature feature, Ruler ruler)
     {
         string grade = feature.Class is { } toleranceClass ? toleranceClass.Grade.ToString() : feature.NearestGrade is { } near ? $"as {near}" : "beyond IT18";
-        sheet.Rule(row, $"{ReadBack.Name(feature, ruler)}{(feature.IsRound ? "" : ", width")}");
+        string fit = answer.Request.Mate is { } mate ? FitText(new Fit(answer.Request.First.Limits, mate.Limits), ruler) : "";
+        bool fitHasRow = rows > 5;
+        sheet.Rule(row, $"{ReadBack.Name(feature, ruler)}{(feature.IsRound ? "" : ", width")}{(fit.Length > 0 && !fitHasRow ? ", " + fit : "")}");
         (string max, string min) = ruler.Limits(feature.Limits);
         string aim = ruler.Aim(Aim(bench, feature), feature.Limits);
         WriteSize(sheet, row + 1, "max", max, ruler, ruler.Upper(feature.Upper));
         WriteSize(sheet, row + 2, "aim", aim, ruler, "");
         WriteSize(sheet, row + 3, "min", min, ruler, ruler.Lower(feature.Lower));
         sheet.Write(1, row + 4, $"tolerance {ruler.Width(feature.Limits.Width)}, {grade}");
-        int free = row + 5;
-        if (answer.Request.Mate is { } mate)
+        if (fitHasRow)
         {
-            Fit fit = new(answer.Request.First.Limits, mate.Limits);
-            sheet.Write(1, free++, $"{fit.Character.ToString().ToLowerInvariant()}: {ruler.Clearances(fit)}", Ink.Strong);
+            sheet.Write(1, row + 5, fit, Ink.Strong);
         }
 
-        if (free < row + rows)
+        int count = row + (fit.Length > 0 ? 6 : 5);
+        if (count < row + rows)
         {
-            sheet.Write(1, free, LowerText.Count(bench.Plan!), Ink.Caution);
+            sheet.Write(1, count, LowerText.Count(bench.Plan!), Ink.Caution);
         }
 
         int width = sheet.Width - NumbersWidth - 1;
@@ -177,6 +172,8 @@ internal static class BenchPage
         }
     }
 
+    private static string FitText(Fit fit, Ruler ruler) => $"{fit.Character.ToString().ToLowerInvariant()}: {ruler.Clearances(fit)}";
+
     private static void WriteSize(Sheet sheet, int row, string name, string size, Ruler ruler, string deviation)
     {
         sheet.Write(1, row, name);
@@ -186,7 +183,7 @@ internal static class BenchPage
     }
 
     /// <summary>The aim of the operation that makes the drawing's size, or the middle where none is planned.</summary>
-    private static Length Aim(Bench bench, Feature feature) =>
+    internal static Length Aim(Bench bench, Feature feature) =>
         bench.Route?.Operations.LastOrDefault(operation => operation.Aim is not null && operation.Size == feature.Limits)?.Aim ?? feature.Limits.Middle;
 
     private static void DrawRoute(Sheet sheet, int row, int rows, Bench bench, Plan plan, Route route, Ruler ruler)
@@ -209,6 +206,7 @@ internal static class BenchPage
             bool chosen = at == bench.OperationAt;
             Ink ink = chosen ? bench.Hand == Hand.Route ? Ink.Chosen : Ink.Strong : Ink.Plain;
             table.WriteRow(sheet, 2, row + 2 + at - first, at, ink);
+            sheet.Mark(row + 2 + at - first, at);
             if (chosen)
             {
                 sheet.Put(0, row + 2 + at - first, sheet.Pen.Pointer, Ink.Strong);
@@ -225,11 +223,11 @@ internal static class BenchPage
     [
         new("no", 2, true, 0),
         new("process", 17, false, 0),
-        new("machine", 10, false, 3),
-        new("tool", 12, false, 2),
+        new("machine", 10, false, 4),
+        new("tool", 12, false, 3),
         new($"size {ruler.Name}", 13, true, 0),
-        new("aim", 7, true, 1),
-        new("stock", 11, true, 0),
+        new("aim", 7, true, 2),
+        new("stock", 11, true, 1),
         new(ruler.IsInch ? "Ra µin" : "Ra", 4, true, 0),
         new("min", 5, true, 0),
         new(currency, 5, true, 0),
@@ -249,29 +247,7 @@ internal static class BenchPage
         operation.Cost.Format(),
     ];
 
-    private static int DrawRefusal(Sheet sheet, int row, Refusal refusal)
-    {
-        sheet.Rule(row++, "no route", Ink.Problem);
-        (string Head, string Text)[] parts =
-        [
-            ("asked", refusal.Requirement),
-            ("why", refusal.Message),
-            ("best", refusal.Best),
-            .. refusal.WouldOpen.Select(static (way, at) => (at == 0 ? "opens" : "", way)),
-        ];
-        foreach ((string head, string text) in parts)
-        {
-            sheet.Write(1, row, head, Ink.Strong);
-            foreach (string line in sheet.Wrap(text, sheet.Width - 8))
-            {
-                sheet.Write(7, row++, line);
-            }
-        }
-
-        return row;
-    }
-
-    /// <summary>The lower text with its heading; a mark says that there is more of it.</summary>
+    /// <summary>The lower text with its heading; a mark says that there is more of it, and where there is room the notes stand below the reasons.</summary>
     private static void DrawBelow(Sheet sheet, int row, int rows, Bench bench, Plan plan)
     {
         if (rows < 2)
@@ -279,24 +255,42 @@ internal static class BenchPage
             return;
         }
 
-        bool notes = bench.Below == Below.Notes || bench.Operation is null;
-        string title = notes ? "notes" : OperationTitle(bench.Operation!, new Ruler(bench.Unit));
-        sheet.Rule(row, sheet.Shorten(title, sheet.Width - 24));
-        List<Said> said = [.. notes ? LowerText.Notes(plan) : LowerText.Reasons(bench.Operation!, bench.Unit)];
-        List<(string Head, string Line, Ink Ink)> lines = [.. LowerText.Lines(sheet, said)];
-        bench.LimitScroll(lines.Count - (rows - 1));
-        for (int at = 0; at < rows - 1 && bench.Scroll + at < lines.Count; at++)
+        if (bench.Below == Below.Notes)
         {
-            (string head, string line, Ink ink) = lines[bench.Scroll + at];
-            sheet.Write(1, row + 1 + at, head, ink);
-            sheet.Write(LowerText.HeadWidth, row + 1 + at, line, ink == Ink.Plain ? Ink.Plain : ink);
+            DrawText(sheet, row, rows, bench, "notes", Ink.Heading, LowerText.Notes(plan));
+            return;
         }
 
-        int hidden = lines.Count - bench.Scroll - (rows - 1);
+        int used = bench.Operation is { } operation
+            ? DrawText(sheet, row, rows, bench, OperationTitle(operation, new Ruler(bench.Unit)), Ink.Heading, LowerText.Reasons(operation, bench.Unit))
+            : DrawText(sheet, row, rows, bench, "no route", Ink.Problem, LowerText.Refusal(plan.Refusal!));
+        if (rows - used >= LeastBelow)
+        {
+            DrawText(sheet, row + used, rows - used, bench, "notes", Ink.Heading, LowerText.Notes(plan), "F6");
+        }
+    }
+
+    /// <returns>The rows used.</returns>
+    private static int DrawText(Sheet sheet, int row, int rows, Bench bench, string title, Ink ink, IEnumerable<Said> said, string moreBy = "PgDn")
+    {
+        sheet.Rule(row, sheet.Shorten(title, sheet.Width - 24), ink);
+        List<(string Head, string Line, Ink Ink)> lines = [.. LowerText.Lines(sheet, said)];
+        int room = rows - 1;
+        bench.LimitScroll(lines.Count - room);
+        for (int at = 0; at < room && bench.Scroll + at < lines.Count; at++)
+        {
+            (string head, string line, Ink look) = lines[bench.Scroll + at];
+            sheet.Write(1, row + 1 + at, head, look);
+            sheet.Write(LowerText.HeadWidth, row + 1 + at, line, look);
+        }
+
+        int hidden = lines.Count - bench.Scroll - room;
         if (hidden > 0)
         {
-            sheet.WriteBefore(sheet.Width - 1, row, $" {hidden} more {sheet.Pen.More} PgDn ", Ink.Faint);
+            sheet.WriteBefore(sheet.Width - 1, row, $" {hidden} more {sheet.Pen.More} {moreBy} ", Ink.Faint);
         }
+
+        return 1 + Math.Min(room, lines.Count);
     }
 
     private static string OperationTitle(Operation operation, Ruler ruler)
@@ -309,8 +303,12 @@ internal static class BenchPage
     private static void DrawKeys(Sheet sheet, Bench bench)
     {
         string unit = bench.Unit == LengthUnit.Inch ? "mm" : "inch";
-        string keys = $"F1 help  F2 {unit}  F3 big  F4 route  F6 {(bench.Below == Below.Notes ? "why" : "notes")}  {(bench.IsFit ? "F9 mate  " : "")}"
-            + (bench.Hand == Hand.Line ? "Tab route" : "Tab line  ? keys") + "  Ctrl+Q leave";
-        sheet.Write(0, sheet.Height - 1, sheet.Shorten(keys, sheet.Width), Ink.Faint);
+        string below = bench.Below == Below.Notes ? "why" : "notes";
+        string mate = bench.IsFit ? "F9 mate" : "";
+        string hand = bench.Hand == Hand.Line ? "Tab route" : "Tab line";
+        string[] keys = ["F1 help", "F2 " + unit, "F3 big", "F4 route", "F6 " + below, mate, hand, bench.Hand == Hand.Route ? "? keys" : "", "Ctrl+Q leave"];
+        string wide = string.Join("  ", keys.Where(static key => key.Length > 0));
+        string narrow = string.Join(" ", ["F1 help", "F2 " + unit, "F3 big", "F4 route", "F6 " + below, mate.Length > 0 ? "F9" : "Tab", "Ctrl+Q"]);
+        sheet.Write(0, sheet.Height - 1, sheet.Shorten(wide.Length <= sheet.Width ? wide : narrow, sheet.Width), Ink.Faint);
     }
 }

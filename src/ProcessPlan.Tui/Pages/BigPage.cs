@@ -34,7 +34,7 @@ internal static class BigPage
             return;
         }
 
-        Length aim = operation?.Aim ?? window.Middle;
+        Length aim = operation is null ? BenchPage.Aim(bench, feature) : operation.Aim ?? window.Middle;
         (string max, string min) = ruler.Limits(window);
         (string Name, string Size)[] sizes = [("max", max), ("aim", ruler.Aim(aim, window)), ("min", min)];
         int rows = (sheet.Height - 3) / sizes.Length;

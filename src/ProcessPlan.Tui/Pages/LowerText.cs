@@ -39,6 +39,14 @@ internal static class LowerText
         }
     }
 
+    public static IEnumerable<Said> Refusal(Refusal refusal) =>
+    [
+        new Said("asked", refusal.Requirement, Ink.Strong),
+        new Said("why", refusal.Message),
+        new Said("best", refusal.Best),
+        .. refusal.WouldOpen.Select(static way => new Said("would open", way)),
+    ];
+
     public static IEnumerable<Said> Notes(Plan plan) =>
     [
         .. plan.Queries.Select(static query => new Said("? ask", query, Ink.Caution)),

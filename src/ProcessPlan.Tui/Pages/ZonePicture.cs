@@ -7,10 +7,7 @@ namespace ProcessPlan.Tui.Pages;
 /// <summary>Tolerance zones to scale, side by side on one ruler with the zero line, as wide as the room allows.</summary>
 internal static class ZonePicture
 {
-    /// <summary>Room at each end for a deviation with its unit.</summary>
-    private const int LabelWidth = 12;
-
-    private const int NameWidth = 6;
+    private const int NameWidth = 5;
 
     /// <param name="sheet">Where to draw.</param>
     /// <param name="x">First column.</param>
@@ -22,8 +19,10 @@ internal static class ZonePicture
     /// <param name="ruler">The unit.</param>
     public static void Draw(Sheet sheet, int x, int y, int width, IReadOnlyList<Feature> zones, Length aim, int lookedAt, Ruler ruler)
     {
-        int from = x + NameWidth + LabelWidth;
-        int columns = width - NameWidth - 2 * LabelWidth;
+        int left = zones.Max(zone => ruler.Lower(zone.Lower).Length) + 2;
+        int right = zones.Max(zone => ruler.Upper(zone.Upper).Length) + 2;
+        int from = x + NameWidth + left;
+        int columns = width - NameWidth - left - right;
         if (columns < 8)
         {
             return;
@@ -48,8 +47,8 @@ internal static class ZonePicture
                 sheet.Put(column, at, sheet.Pen.Zone, Ink.Zone);
             }
 
-            sheet.WriteBefore(Math.Min(first, zero < first && zero > first - LabelWidth ? zero : first) - 1, at, ruler.Lower(zone.Lower));
-            sheet.Write(Math.Max(last, zero > last && zero < last + LabelWidth ? zero : last) + 2, at, ruler.Upper(zone.Upper));
+            sheet.WriteBefore((zero < first && zero > first - left ? zero : first) - 1, at, ruler.Lower(zone.Lower));
+            sheet.Write((zero > last && zero < last + right ? zero : last) + 2, at, ruler.Upper(zone.Upper));
             if (row == lookedAt)
             {
                 if (zones.Count > 1)

@@ -5,6 +5,7 @@ internal sealed class Sheet
 {
     private readonly char[] _characters;
     private readonly Ink[] _inks;
+    private readonly Dictionary<int, int> _operations = [];
 
     public Sheet(int width, int height, Pen pen)
     {
@@ -23,6 +24,11 @@ internal sealed class Sheet
     public ReadOnlySpan<char> Row(int y) => _characters.AsSpan(y * Width, Width);
 
     public ReadOnlySpan<Ink> Inks(int y) => _inks.AsSpan(y * Width, Width);
+
+    /// <summary>Notes that a row shows an operation, for a click to find it.</summary>
+    public void Mark(int row, int operation) => _operations[row] = operation;
+
+    public int? OperationAt(int row) => _operations.TryGetValue(row, out int operation) ? operation : null;
 
     public void Put(int x, int y, char c, Ink ink = Ink.Plain)
     {

@@ -1,0 +1,217 @@
+using ProcessPlan.Core;
+using ProcessPlan.Core.Values;
+using ProcessPlan.Tui.Pages;
+
+namespace ProcessPlan.Tui.Tests;
+
+/// <summary>A person at the keyboard.</summary>
+public class BenchViewTests
+{
+    [Fact]
+    public void The_first_line_is_answered_by_the_handbook_shop()
+    {
+        using Terminal terminal = new();
+        Plan plan = Planner.Plan(terminal.Bench.Feature!, Terminal.Shop, 5);
+        terminal.Text.Should().Contain("25.021 mm").And.Contain("25.000 mm").And.Contain("+21 µm")
+            .And.Contain($"route 1 of {plan.Routes.Count}: {plan.Routes[0].CostPerPiece} a piece")
+            .And.Contain($"start {plan.Routes[0].Blanks}");
+        plan.Routes[0].Operations.Should().AllSatisfy(operation => terminal.Text.Should().Contain(operation.Process));
+    }
+
+    [Fact]
+    public void Every_key_press_is_answered_at_once()
+    {
+        using Terminal terminal = new();
+        terminal.Retype("shaft 30 f7");
+        terminal.Text.Should().Contain("29.980 mm").And.Contain("29.959 mm");
+        terminal.Press("Backspace").Type("8");
+        terminal.Text.Should().Contain("29.947 mm", "f8 is wider than f7");
+    }
+
+    [Fact]
+    public void Marks_stand_under_the_word_that_is_wrong_and_follow_the_caret()
+    {
+        using Terminal terminal = new();
+        terminal.Retype("hole 25H7 fooo x40 baar");
+        string line = terminal.Row(0);
+        string marks = terminal.Row(1);
+        marks.IndexOf('^').Should().Be(line.IndexOf("fooo", StringComparison.Ordinal));
+        marks.LastIndexOf('^').Should().Be(line.IndexOf("baar", StringComparison.Ordinal) + 3);
+        terminal.Row(2).Should().Contain("'baar'").And.Contain("and 1 more");
+        terminal.Press("Home");
+        terminal.Row(2).Should().Contain("'fooo'");
+    }
+
+    [Fact]
+    public void Marks_follow_a_line_longer_than_its_field()
+    {
+        using Terminal terminal = new(new ScreenOptions { Line = "" }, 60, 16);
+        terminal.Type("hole 25H7 x40 thru Ra0.8 C45 200off " + "cyl 0.01 round 0.01 interrupted runout 0.01 wrongword");
+        string line = terminal.Row(0);
+        terminal.Row(1).IndexOf('^').Should().Be(line.IndexOf("wrongword", StringComparison.Ordinal));
+        terminal.Row(1).Count(static c => c == '^').Should().Be("wrongword".Length);
+    }
+
+    [Fact]
+    public void Marks_stand_right_behind_wide_letters()
+    {
+        using Terminal terminal = new(new ScreenOptions { Line = "" });
+        terminal.Type("日本 25H7 fooo");
+        terminal.Row(1).Should().Be(new string(' ', BenchPage.FieldColumn) + "^^^^" + new string(' ', 6) + "^^^^", "two letters take four cells");
+    }
+
+    [Fact]
+    public void Undo_brings_the_line_back_with_its_answer()
+    {
+        using Terminal terminal = new();
+        terminal.Press("End").Type("x");
+        terminal.Bench.Problems.Should().NotBeEmpty();
+        terminal.Press("Ctrl+Z");
+        terminal.Bench.Text.Should().Be(ScreenOptions.FirstLine);
+        terminal.Bench.IsCurrent.Should().BeTrue();
+        terminal.Row(1).Should().NotContain("^");
+    }
+
+    [Fact]
+    public void A_kept_line_comes_back_with_the_caret_behind_it()
+    {
+        using Terminal terminal = new();
+        terminal.Press("Enter", "Esc").Retype("40 H7/k6").Press("Up");
+        terminal.Bench.Text.Should().Be(ScreenOptions.FirstLine);
+        terminal.Type(" interrupted");
+        terminal.Bench.Text.Should().Be(ScreenOptions.FirstLine + " interrupted");
+    }
+
+    [Fact]
+    public void Going_to_the_route_and_back_keeps_the_line_unmarked()
+    {
+        using Terminal terminal = new();
+        terminal.Press("Home", "Tab", "Esc").Type("a");
+        terminal.Bench.Text.Should().Be("a" + ScreenOptions.FirstLine);
+    }
+
+    [Fact]
+    public void Letters_act_on_the_route_and_are_letters_on_the_line()
+    {
+        using Terminal terminal = new();
+        terminal.Press("u");
+        terminal.Bench.Text.Should().EndWith("u");
+        terminal.Press("Ctrl+Z", "Tab", "U");
+        terminal.Bench.Unit.Should().Be(LengthUnit.Inch);
+        terminal.Press("u");
+        terminal.Bench.Unit.Should().Be(LengthUnit.Millimetre);
+    }
+
+    [Fact]
+    public void A_click_on_an_operation_looks_at_it_and_a_click_on_the_line_goes_back()
+    {
+        using Terminal terminal = new(plan: SamplePlan.For);
+        int row = Enumerable.Range(0, terminal.Height).First(y => terminal.Row(y).StartsWith("  30 ", StringComparison.Ordinal));
+        terminal.Click(10, row);
+        (terminal.Bench.Hand, terminal.Bench.Operation!.Number).Should().Be((Hand.Route, 30));
+        terminal.Click(12, 0);
+        terminal.Bench.Hand.Should().Be(Hand.Line);
+        terminal.Type("y");
+        terminal.Bench.Text.Should().Contain("y", "the line takes letters again");
+    }
+
+    [Fact]
+    public void While_a_plan_is_made_the_screen_says_so_and_takes_keys()
+    {
+        Queue<Action> held = [];
+        using Terminal terminal = new(plan: SamplePlan.For, aside: held.Enqueue);
+        terminal.Row(1).Should().Be("…");
+        held.Dequeue()();
+        terminal.Settle().Row(1).Should().StartWith("hole 25 mm H7");
+        terminal.Retype("shaft 30 f7");
+        terminal.Row(1).Should().Be("…");
+        terminal.Text.Should().Contain("answer to: " + ScreenOptions.FirstLine).And.Contain("25.021 mm");
+        while (held.TryDequeue(out Action? work))
+        {
+            work();
+        }
+
+        terminal.Settle().Text.Should().NotContain("answer to:").And.Contain("29.980 mm");
+    }
+
+    [Fact]
+    public void A_fault_of_the_planner_ends_the_screen_in_the_open()
+    {
+        Action open = static () => new Terminal(plan: static _ => throw new InvalidOperationException("no such row")).Dispose();
+        open.Should().Throw<InvalidOperationException>().WithMessage("*cannot be planned: no such row");
+    }
+
+    [Fact]
+    public void Ctrl_Q_leaves_and_Esc_does_not()
+    {
+        using Terminal terminal = new();
+        terminal.Press("Esc", "Esc", "Esc");
+        terminal.IsRunning.Should().BeTrue();
+        terminal.Press("Ctrl+Q");
+        terminal.IsRunning.Should().BeFalse();
+    }
+
+    [Fact]
+    public void A_small_window_comes_back_to_what_it_showed()
+    {
+        using Terminal terminal = new();
+        string before = terminal.Text;
+        terminal.Resize(59, 24).Text.Should().StartWith("Window too small: 59 x 24.");
+        terminal.Resize(80, 15).Text.Should().StartWith("Window too small: 80 x 15.");
+        terminal.Type("letters typed blind").Resize(80, 24).Text.Should().Be(before, "nothing is typed into a line that is not shown");
+    }
+
+    [Fact]
+    public void Resizing_at_any_moment_keeps_every_page_whole()
+    {
+        using Terminal terminal = new();
+        Random sizes = new(7);
+        string[] keys = ["F1", "Esc", "F3", "Esc", "F6", "Tab", "?", "Esc", "F4", "F2"];
+        for (int i = 0; i < 300; i++)
+        {
+            terminal.Resize(sizes.Next(1, 200), sizes.Next(1, 60)).Press(keys[i % keys.Length]);
+        }
+
+        terminal.Press("Esc", "Esc").Resize(80, 24);
+        terminal.Row(0).Should().StartWith("Feature").And.Contain(ScreenOptions.FirstLine);
+    }
+
+    [Fact]
+    public void Twenty_thousand_random_keys_raise_nothing()
+    {
+        using Terminal terminal = new(plan: SamplePlan.For);
+        Random random = new(20_261_201);
+        string[] names =
+        [
+            .. KeyChart.Everywhere.Concat(KeyChart.OnLine).Concat(KeyChart.OnRoute).Select(static stroke => stroke.Key).Where(static key => key != "Ctrl+Q").Distinct(),
+            "Left", "Right", "Home", "End", "Delete", "Backspace", "Backspace", "Ctrl+A", "Ctrl+Z", "Ctrl+Y", "Ctrl+K", "Shift+Left", "Ctrl+Left",
+            "F5", "F10", "F11", "F12", "Ctrl+F5", "Shift+F10", "Shift+Tab", "Ctrl+X", "Insert",
+        ];
+        const string Letters = "hole shaft 25H7 k6 x40 thru Ra0.8 C45 200off ±.,/-+=Øµ日?";
+        for (int i = 0; i < 20_000; i++)
+        {
+            switch (random.Next(40))
+            {
+                case 0:
+                    terminal.Retype(HelpPage.Examples[random.Next(HelpPage.Examples.Count)]);
+                    break;
+                case < 16:
+                    terminal.Inject(names[random.Next(names.Length)]);
+                    break;
+                default:
+                    terminal.Inject(Letters[random.Next(Letters.Length)].ToString());
+                    break;
+            }
+
+            if (i % 50 == 0)
+            {
+                terminal.Settle();
+            }
+        }
+
+        terminal.IsRunning.Should().BeTrue();
+        terminal.Press("Esc", "Esc", "Tab", "Esc").Retype("hole 30H7");
+        terminal.Bench.Text.Should().Be("hole 30H7");
+        terminal.Bench.IsCurrent.Should().BeTrue("the bench still answers");
+    }
+}
