@@ -1,3 +1,4 @@
+using System.Globalization;
 using ProcessPlan.Core.Capability;
 using ProcessPlan.Core.Features;
 using ProcessPlan.Core.Shop;
@@ -45,7 +46,7 @@ internal static class Advice
         Feature feature = job.Feature;
         if (feature.Wall is { } wall && feature.Nominal.Picometres > ThinWall * wall.Picometres)
         {
-            yield return $"Thin wall (D/t {feature.Nominal.Picometres / (double)wall.Picometres:0.#}): rough, release, finish; clamp lightly and measure it free.";
+            yield return string.Create(CultureInfo.InvariantCulture, $"Thin wall (D/t {feature.Nominal.Picometres / (double)wall.Picometres:0.#}): rough, release, finish; clamp lightly and measure it free.");
         }
 
         if (feature.Interrupted)

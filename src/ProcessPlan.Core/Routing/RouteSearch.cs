@@ -27,6 +27,9 @@ internal sealed class RouteSearch
     /// <summary>What drilling and rough boring leave.</summary>
     private static readonly ToleranceGrade RoughGrade = ToleranceGrade.It(12);
 
+    /// <summary>A process that takes no more than this in all removes micrometres a minute: its greatest stock is a hard limit.</summary>
+    private static readonly Stock LittleStock = Stock.FromMicrometres(200);
+
     /// <summary>Permissible deviation of a cast size (ISO 8062-3, DCTG 10, 25 to 63 mm: 2.8 mm in all; from memory).</summary>
     private static readonly Deviation CastTolerance = Deviation.FromMicrometres(1400);
 
@@ -214,7 +217,7 @@ internal sealed class RouteSearch
         SizeWindow sizes = window.Sizes(_job.IsInternal);
         if (use == ToolUse.Ream)
         {
-            return ReamerChoice.Best(_shop.ToolsNear(use, sizes), sizes, _job.Feature.Class, tool => Yield(candidate, tool, effort, window, window)) is { } reamer ? [reamer] : [];
+            return [.. ReamerChoice.Best(_shop.ToolsNear(use, sizes), sizes, _job.Feature.Class, tool => Yield(candidate, tool, effort, window, window))];
         }
 
         List<Tool?> fitting = [];
@@ -540,20 +543,20 @@ internal sealed class RouteSearch
     private static long MostStock(Step step) => step.Process.MostStockAt(MetalWindow.Size(step.Window.Most)).Picometres;
 
     /// <summary>
-    /// The last step held so far inside the drawing's window that it never takes more than it can: a hone that leaves 0.1 mm at most does not open a
-    /// bore right through a wide tolerance. Any other step as it is; a tool of fixed size cuts what it cuts.
+    /// A hone or lap as the last step, held so far inside the drawing's window that it never takes more than it can: it does not open a bore right
+    /// through a wide tolerance. Any other step as it is: a tool of fixed size cuts what it cuts, and a cut to a setting ends at its aim.
     /// </summary>
     private Step Held(Step step, MetalWindow entering)
     {
         long least = entering.Most - MostStock(step);
-        if (step.Tool is not null || least <= step.Window.Least)
+        if (step.Tool is not null || MostStock(step) > LittleStock.Picometres || least <= step.Window.Least)
         {
             return step;
         }
 
         MetalWindow held = new(least, step.Window.Most);
         double yield = Yield(step.Candidate!, step.Tool, step.Effort, held, step.Window);
-        return step with { Leaving = held, Yield = yield, YieldToEnd = yield };
+        return step with { Leaving = held, IsHeldInside = true, Yield = yield, YieldToEnd = yield };
     }
 
     private Step Before(Step step, Candidate before, Machine machine, Tool? tool, MetalWindow leaving, Change[] between, int changesLeft)

@@ -111,7 +111,7 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
                 new Reason("size", $"the size moves by {change.LeastGrowth} to {change.MostGrowth} on {Across} [{change.Origin}]"),
                 new Reason("cost", supplier is null
                     ? "this shop knows no supplier: not in the price"
-                    : $"the larger of the lot charge {supplier.LotCharge} and {job.Quantity} · {supplier.PiecePrice}, over {job.Quantity} pieces"),
+                    : string.Create(CultureInfo.InvariantCulture, $"the larger of the lot charge {supplier.LotCharge} and {job.Quantity} · {supplier.PiecePrice}, over {job.Quantity} pieces")),
             ],
         };
     }
@@ -138,7 +138,7 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
         {
             string effort = step.Effort == Effort.Routine ? "with routine effort" : "with special effort";
             string lost = candidate.GradesLost > 0 ? $" ({candidate.LossReason}: {candidate.GradesLost} grade worse)" : "";
-            if (step.ChangesAfter.Length == 0 && step.Window.Sizes(job.IsInternal) != job.Feature.Limits)
+            if (step.IsHeldInside)
             {
                 because.Add("held inside the drawing's limits, so that it never has to take more than it can");
             }
@@ -212,9 +212,10 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
                 yield return new Reason("stock", line);
             }
 
-            if (step.Tool is not null && step.LeastHeld > step.Window.Least)
+            if (step.LeastHeld > step.Window.Least)
             {
-                yield return new Reason("stock", $"at most {new Stock(from.Most - step.LeastHeld)} as {step.Tool.Label} is predicted to cut");
+                string how = step.Tool is { } sized ? $"as {sized.Label} is predicted to cut" : $"where it holds {step.Candidate!.HeldWidth(step.Effort).Format()} µm from the near limit";
+                yield return new Reason("stock", $"at most {new Stock(from.Most - step.LeastHeld)} {how}");
             }
 
             yield return new Reason("stock", $"{process.Name} takes at most {process.MostStockAt(MetalWindow.Size(step.Window.Most))} here [{process.Origin}]");
@@ -238,7 +239,7 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
     {
         if (step.IsLast)
         {
-            string inside = step.ChangesAfter.Length == 0 && held != job.Feature.Limits ? $"inside {job.Feature.Limits}, by the greatest stock of {step.Process.Name}: " : "";
+            string inside = step.IsHeldInside ? $"as much as it can by the greatest stock of {step.Process.Name}: " : "";
             return inside + (job.Feature.Class is { } toleranceClass && step.ChangesAfter.Length == 0
                 ? $"the drawing's limits, {toleranceClass} [{Iso286.Cite(job.Nominal, toleranceClass.Grade)}; {Iso286.Cite(job.Nominal, toleranceClass)}]"
                 : step.ChangesAfter.Length == 0 ? "the drawing's limits" : "the drawing's limits, less what comes after at its extremes");

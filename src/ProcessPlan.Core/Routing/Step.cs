@@ -28,6 +28,9 @@ internal sealed record Step
     /// </summary>
     public long LeastHeld { get; init; }
 
+    /// <summary>Whether the last step is held to less than the drawing allows, because it takes so little.</summary>
+    public bool IsHeldInside { get; init; }
+
     /// <summary>The step after it; null for the last one.</summary>
     public Step? Next { get; init; }
 

@@ -30,7 +30,7 @@ internal readonly record struct StepCost(Cut Cut, CutTime Cutting, double Checki
         Cut cut = new(
             process,
             data,
-            step.Tool?.Stamped ?? MetalWindow.Size(job.IsInternal ? window.Least : entering?.Most ?? window.Most),
+            step.Tool?.Stamped ?? MetalWindow.Size(job.IsInternal ? step.LeastHeld : entering?.Most ?? window.Most),
             job.Extent,
             entering is { } from ? new Stock(from.Most - step.LeastHeld) : null,
             step.IsLast ? process.Ra(step.Effort) : process.LeftRa,

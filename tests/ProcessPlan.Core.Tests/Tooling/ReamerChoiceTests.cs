@@ -42,23 +42,25 @@ public class ReamerChoiceTests
     }
 
     [Fact]
-    public void Best_EqualYields_IsTheReamerMadeForTheClassThenTheLargest()
+    public void Best_EqualYields_IsTheReamerMadeForTheClassThenTheSmallest()
     {
         SizeWindow hole = Hole(Length.FromMillimetres(10), "H7");
         ToleranceClass.TryRead("H7", out ToleranceClass h7, out _);
         Tool[] near = [.. Floor.Tools(ToolUse.Ream).Where(tool => tool.Stamped.Millimetres is > 9.9m and < 10.1m)];
-        ReamerChoice.Best(near, hole, h7, static _ => 1)!.Label.Should().Be("machine reamer 10 H7");
-        Tool largest = ReamerChoice.Best(near, hole, null, static _ => 1)!;
-        near.Where(tool => ReamerChoice.Suits(tool, hole, out _)).Should().OnlyContain(tool => tool.Own.Max <= largest.Own.Max);
+        ReamerChoice.Best(near, hole, h7, static _ => 1).First().Label.Should().Be("machine reamer 10 H7");
+        SizeWindow wide = Hole(Length.FromMillimetres(10), "H10");
+        Tool smallest = ReamerChoice.Best(near, wide, null, static _ => 1).Single();
+        near.Where(tool => ReamerChoice.Suits(tool, wide, out _)).Should().HaveCountGreaterThan(2).And.OnlyContain(tool => tool.Own.Max >= smallest.Own.Max);
     }
 
     [Fact]
-    public void Best_ABetterYield_GoesBeforeEverything()
+    public void Best_ABetterYield_GoesFirstAndTheSmallestStaysBehindIt()
     {
         SizeWindow hole = Hole(Length.FromMillimetres(10), "H9");
         Tool[] near = [.. Floor.Tools(ToolUse.Ream).Where(tool => tool.Stamped.Millimetres is > 9.9m and < 10.1m)];
-        ReamerChoice.Best(near, hole, null, static tool => tool.Made == "H7" ? 0.99 : 0.98)!.Made.Should().Be("H7");
-        ReamerChoice.Best([], hole, null, static _ => 1).Should().BeNull();
+        Tool best = Floor.Tools(ToolUse.Ream).Single(tool => tool.Stamped == Length.FromMillimetres(10.02m));
+        ReamerChoice.Best(near, hole, null, tool => tool == best ? 0.99 : 0.98).Select(tool => tool.Label).Should().Equal(best.Label, "machine reamer 10 H7");
+        ReamerChoice.Best([], hole, null, static _ => 1).Should().BeEmpty();
     }
 
     private static SizeWindow Hole(Length nominal, string hole)
