@@ -64,7 +64,5 @@ public static class ProcessCatalogue
     private static ToleranceGrade Grade(TableRow row, string column) => ToleranceGrade.It((int)row.Decimal(column));
 
     private static Roughness Ra(TableRow row, string column) =>
-        Roughness.TryFromRa((long)(row.Decimal(column) * Length.PicometresPerMicrometre), out Roughness ra)
-            ? ra
-            : throw new InvalidDataException($"line {row.Line}: '{row[column]}' is no roughness.");
+        Roughness.Ra((long)(row.Decimal(column) * 1000));
 }

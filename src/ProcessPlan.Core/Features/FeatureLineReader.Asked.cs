@@ -48,6 +48,10 @@ internal ref partial struct FeatureLineReader
         return new Length((outer.Picometres - nominal.Picometres) / 2);
     }
 
+    private const long PicometresPerNanometre = 1000;
+    private const long FinestNanometres = 6;
+    private const long CoarsestNanometres = 400_000;
+
     private Roughness? FinishAsked()
     {
         if (!_finish.Is)
@@ -60,9 +64,9 @@ internal ref partial struct FeatureLineReader
         if (word == FeatureWord.Finish)
         {
             const int MostClasses = 12;
-            if (number.IsBareWhole && number.Number.Units <= MostClasses && Roughness.TryFromClass((int)number.Number.Units, out Roughness byClass))
+            if (number.IsBareWhole && number.Number.Units is >= 1 and <= MostClasses)
             {
-                return byClass;
+                return Roughness.N((int)number.Number.Units);
             }
 
             Report($"'{Show(place)}' is no roughness class.", place, "N1 to N12");
@@ -77,12 +81,15 @@ internal ref partial struct FeatureLineReader
         }
 
         // "Ra 0.8 in C45": nobody gives roughness in inches, so a unit that stands apart is that of the line.
+        // Held to the whole nanometre below: a microinch is 25.4 nm.
         long unit = number.Unit == WrittenUnit.Microinch ? Length.PicometresPerMicroinch
             : number.IsBare || number.Unit == WrittenUnit.Micrometre ? Length.PicometresPerMicrometre
             : 0;
-        if (unit > 0 && number.Number.TryScale(unit, out long picometres))
+        if (unit > 0 && number.Number.TryScale(unit, out long picometres)
+            && picometres / PicometresPerNanometre is >= FinestNanometres and <= CoarsestNanometres and long nanometres)
         {
-            if (word == FeatureWord.Ra ? Roughness.TryFromRa(picometres, out Roughness asked) : RoughnessPairs.TryFromRz(picometres, out asked))
+            Roughness asked = word == FeatureWord.Ra ? Roughness.Ra(nanometres) : Roughness.Rz(nanometres);
+            if (RoughnessPairs.ToRa(asked) is not null)
             {
                 return asked;
             }

@@ -411,9 +411,9 @@ internal ref partial struct FeatureLineReader
     private bool TryGeneralLimits(Length nominal, out SizeWindow limits)
     {
         limits = default;
-        if (Iso2768.Linear(nominal, _general.Value) is not { } permissible || nominal - permissible <= Length.Zero)
+        if (Iso2768.Find(nominal, _general.Value) is not { } permissible)
         {
-            Report($"ISO 2768-1 gives no tolerance {_general.Value.Name()} for {nominal}.", _general.Place, "a class, deviations or limits");
+            Report($"ISO 2768-1 gives no tolerance {Iso2768.Name(_general.Value)} for {nominal}.", _general.Place, "a class, deviations or limits");
             return false;
         }
 
@@ -424,11 +424,11 @@ internal ref partial struct FeatureLineReader
     private static string GeneralOffer(Length nominal)
     {
         List<string> byName = [];
-        foreach (GeneralTolerance general in GeneralTolerances.All)
+        foreach (GeneralTolerance general in Enum.GetValues<GeneralTolerance>())
         {
-            if (Iso2768.Linear(nominal, general) is { } permissible)
+            if (Iso2768.Find(nominal, general) is { } permissible)
             {
-                byName.Add($"{general.Name()} (±{DecimalText.Format(permissible.Picometres, Length.MillimetrePlaces)} mm)");
+                byName.Add($"{Iso2768.Name(general)} (±{DecimalText.Format(permissible.Picometres, Length.MillimetrePlaces)} mm)");
             }
         }
 

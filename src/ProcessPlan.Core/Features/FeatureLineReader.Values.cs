@@ -66,8 +66,8 @@ internal ref partial struct FeatureLineReader
 
     private bool TryScale(out HardnessScale scale)
     {
-        scale = TrySuffix("hrc") ? HardnessScale.Hrc : TrySuffix("hbw") || TrySuffix("hb") ? HardnessScale.Hb : HardnessScale.Hv;
-        return scale != HardnessScale.Hv || TrySuffix("hv");
+        scale = TrySuffix("hrc") ? HardnessScale.HRC : TrySuffix("hbw") || TrySuffix("hb") ? HardnessScale.HB : HardnessScale.HV;
+        return scale != HardnessScale.HV || TrySuffix("hv");
     }
 
     /// <summary>"58HRC", "58-62 HRC", "HRC 58", "HRC58", "hrc=58".</summary>
@@ -82,7 +82,7 @@ internal ref partial struct FeatureLineReader
 
         FeatureWord word = FeatureWords.Find(_text[_at..letters]);
         bool scaleFirst = word is >= FeatureWord.Hrc and <= FeatureWord.Hv;
-        HardnessScale scale = scaleFirst ? HardnessScale.Hrc + (word - FeatureWord.Hrc) : default;
+        HardnessScale scale = scaleFirst ? HardnessScale.HRC + (word - FeatureWord.Hrc) : default;
         if (scaleFirst)
         {
             _at = letters;
@@ -117,7 +117,7 @@ internal ref partial struct FeatureLineReader
         if (note.To is not null)
         {
             Report($"'{Show(note.Place)}' is a range; one hardness is taken.", note.Place,
-                $"one value, such as {Show(note.Number.Place)}{note.Scale.ToString().ToUpperInvariant()}");
+                $"one value, such as {Show(note.Number.Place)}{note.Scale}");
             return null;
         }
 
@@ -207,7 +207,7 @@ internal ref partial struct FeatureLineReader
         const double LeastOther = 450;
         Mark behindDepth = Here;
         SkipSpaces();
-        if (TryHardness(out HardnessNote note) && note.Number.Number.ToDouble() >= (note.Scale == HardnessScale.Hrc ? LeastHrc : LeastOther))
+        if (TryHardness(out HardnessNote note) && note.Number.Number.ToDouble() >= (note.Scale == HardnessScale.HRC ? LeastHrc : LeastOther))
         {
             return Accept(note);
         }

@@ -115,7 +115,7 @@ internal ref partial struct FeatureLineReader
                 NoteFlag(ref _start, new StartNote(StartKind.Solid, null), place, "start");
                 break;
             case FeatureWord.GeneralTolerance:
-                NoteFlag(ref _general, GeneralTolerances.FromLetter(char.ToLowerInvariant(_text[place.End - 1])), place, "general tolerance");
+                NoteFlag(ref _general, (GeneralTolerance)"fmcv".IndexOf(char.ToLowerInvariant(_text[place.End - 1])), place, "general tolerance");
                 break;
             case FeatureWord.Millimetre or FeatureWord.Inch:
                 if (!SaysNo(place))

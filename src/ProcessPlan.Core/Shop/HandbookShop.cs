@@ -65,7 +65,8 @@ public static class HandbookShop
             for (decimal size = row.Decimal("from"); size <= to; size += step)
             {
                 Length stamped = Length.FromMillimetres(size);
-                tools.Add(new Tool(Spaced(row["name"]), use, stamped, OwnSize(stamped, row["made"]), row["made"], row["material"]));
+                tools.Add(new Tool(Spaced(row["name"]), use, stamped, OwnSize(stamped, row["made"]), row["made"], row["material"],
+                    row.Decimal("price") + row.Decimal("perMm") * size, row.Double("life")));
             }
         }
 
@@ -93,7 +94,7 @@ public static class HandbookShop
         foreach (TableRow row in table.Rows)
         {
             bars.Add(new BarSeries(Length.FromMillimetres(row.Decimal("over")), Length.FromMillimetres(row.Decimal("upto")),
-                Length.FromMillimetres(row.Decimal("step")), Length.FromMillimetres(row.Decimal("deviation")) - Length.Zero,
+                [.. row["sizes"].Split(',').Select(static size => Length.FromMillimetres(int.Parse(size, CultureInfo.InvariantCulture)))], Length.FromMillimetres(row.Decimal("deviation")) - Length.Zero,
                 table.Cite($"over {row["over"]} to {row["upto"]} mm")));
         }
 

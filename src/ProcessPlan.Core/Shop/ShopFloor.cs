@@ -7,6 +7,8 @@ namespace ProcessPlan.Core.Shop;
 /// <summary>All that one shop owns and charges, whole and unchangeable: what a plan is made from.</summary>
 public sealed class ShopFloor
 {
+    private const long HalfMillimetre = Length.PicometresPerMillimetre / 2;
+
     private readonly Dictionary<string, Material> _materials;
     private readonly Dictionary<ToolUse, Tool[]> _tools = [];
 
@@ -51,20 +53,42 @@ public sealed class ShopFloor
     /// <summary>The tools for one use, by size.</summary>
     public IReadOnlyList<Tool> Tools(ToolUse use) => _tools.TryGetValue(use, out Tool[]? tools) ? tools : [];
 
+    /// <summary>The tools for one use whose stamp lies in a range of sizes or at most half a millimetre below it, by size.</summary>
+    public ReadOnlySpan<Tool> ToolsNear(ToolUse use, SizeWindow sizes)
+    {
+        if (!_tools.TryGetValue(use, out Tool[]? tools))
+        {
+            return [];
+        }
+
+        int from = FirstAbove(tools, new Length(sizes.Min.Picometres - HalfMillimetre));
+        return tools.AsSpan(from, Math.Max(0, FirstAbove(tools, sizes.Max) - from));
+    }
+
+    private static int FirstAbove(Tool[] tools, Length size)
+    {
+        int low = 0;
+        int high = tools.Length;
+        while (low < high)
+        {
+            int middle = (low + high) / 2;
+            (low, high) = tools[middle].Stamped <= size ? (middle + 1, high) : (low, middle);
+        }
+
+        return low;
+    }
+
     /// <summary>The smallest stocked bar whose smallest diameter is not below <paramref name="least"/>; null beyond the series.</summary>
     public Bar? BarFor(Length least)
     {
         foreach (BarSeries series in Bars)
         {
-            Length size = (least + new Deviation(series.Deviation.Picometres)).RoundUp(series.Step);
-            if (size <= series.Over)
+            foreach (Length size in series.Sizes)
             {
-                size = (series.Over + new Deviation(1)).RoundUp(series.Step);
-            }
-
-            if (size <= series.UpTo)
-            {
-                return new Bar(size, new SizeWindow(size - series.Deviation, size + series.Deviation));
+                if (size - series.Deviation >= least)
+                {
+                    return new Bar(size, new SizeWindow(size - series.Deviation, size + series.Deviation));
+                }
             }
         }
 
@@ -75,10 +99,10 @@ public sealed class ShopFloor
 /// <summary>Stocked round bars of one range of sizes.</summary>
 /// <param name="Over">Sizes over this,</param>
 /// <param name="UpTo">up to and including this,</param>
-/// <param name="Step">in these steps,</param>
+/// <param name="Sizes">in these diameters, by size,</param>
 /// <param name="Deviation">with this permissible deviation either way.</param>
 /// <param name="Origin">Where the figures come from.</param>
-public sealed record BarSeries(Length Over, Length UpTo, Length Step, Deviation Deviation, Citation Origin);
+public sealed record BarSeries(Length Over, Length UpTo, IReadOnlyList<Length> Sizes, Deviation Deviation, Citation Origin);
 
 /// <param name="Size">Nominal diameter.</param>
 /// <param name="Limits">Smallest and largest diameter as delivered.</param>

@@ -5,7 +5,7 @@ namespace ProcessPlan.Core.Standards;
 /// <summary>Why a tolerance class does not exist at a nominal size, and which do.</summary>
 /// <param name="Gap">The reason by kind.</param>
 /// <param name="Message">One sentence to the person at the machine: what is missing, why, and the nearest classes.</param>
-/// <param name="Nearest">The nearest classes that the standard gives at the size, at most two; empty outside the sizes of the standard.</param>
+/// <param name="Nearest">The nearest classes that exist at the size, at most two; none outside the sizes of the standard.</param>
 public sealed record ClassRefusal(ClassGap Gap, string Message, IReadOnlyList<ToleranceClass> Nearest)
 {
     internal static ClassRefusal For(Length nominal, ToleranceClass c)
@@ -36,7 +36,7 @@ public sealed record ClassRefusal(ClassGap Gap, string Message, IReadOnlyList<To
         ClassGap.NoDelta => "it prints no Δ for grades finer than IT3",
         ClassGap.LetterNotInGrade => c switch
         {
-            { Letter: FundamentalDeviation.K } => "K coarser than IT8 ends at 3 mm",
+            { Letter: FundamentalDeviation.K } => "K coarser than IT8 is not given over 3 to 500 mm",
             { Letter: FundamentalDeviation.N } => "N coarser than IT8 begins over 1 mm",
             { IsInternal: true } => "J is given in grades 6, 7 and 8 only",
             _ => "j is given in grades 5, 6 and 7, and up to 3 mm in grade 8",

@@ -12,6 +12,9 @@ public static class Din1420
 
     public static Citation Citation { get; } = new("DIN 1420:1992 / ISO 522:1975", "reamer max = hole max - 0.15 IT, min = max - 0.35 IT, shares rounded up", Standing.Published);
 
+    /// <summary>The 15 % of a hole's tolerance that is kept free for oversize, rounded up to whole micrometres.</summary>
+    public static Deviation Reserve(Deviation tolerance) => new(new Length(Share(tolerance.Picometres, 15)).RoundUp(new Length(Length.PicometresPerMicrometre)).Picometres);
+
     /// <summary>The window of the reamer's own diameter.</summary>
     /// <param name="hole">
     /// The limits of the hole. Where its upper limit ends on half a micrometre (JS classes with an odd grade), the 15 % is rounded up to the next half
@@ -21,7 +24,7 @@ public static class Din1420
     {
         Length step = new(Length.PicometresPerMicrometre);
         long width = hole.Width.Picometres;
-        Length fifteen = new Length(Share(width, 15)).RoundUp(step);
+        Length fifteen = new(Reserve(hole.Width).Picometres);
         if (hole.Max.Picometres % Length.PicometresPerMicrometre == HalfMicrometre)
         {
             // 0.15 IT up to a whole or half micrometre: the half that stands at the hole's limit.

@@ -26,7 +26,9 @@ public readonly record struct Fit(SizeWindow Hole, SizeWindow Shaft)
     /// <summary>The smallest hole less the largest shaft, exact; negative is interference.</summary>
     public Deviation MinClearance => Hole.Min - Shaft.Max;
 
-    /// <summary>Clearance where the least clearance is zero or more, else interference where the greatest is zero or less, else transition.</summary>
+    /// <summary>
+    /// Clearance where the least clearance is zero or more, else interference where the greatest is zero or less, else transition.
+    /// </summary>
     public FitCharacter Character => MinClearance >= default(Deviation) ? FitCharacter.Clearance
         : MaxClearance <= default(Deviation) ? FitCharacter.Interference
         : FitCharacter.Transition;

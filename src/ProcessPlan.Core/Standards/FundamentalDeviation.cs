@@ -1,6 +1,6 @@
 namespace ProcessPlan.Core.Standards;
 
-/// <summary>The twenty-eight identifiers of ISO 286-1 for the place of a tolerance against the nominal size, in the order of the standard.</summary>
+/// <summary>The twenty-eight letters of ISO 286-1 for where a tolerance lies against the nominal size, in the standard's order.</summary>
 public enum FundamentalDeviation
 {
     A,

@@ -4,8 +4,8 @@ using static ProcessPlan.Core.Standards.FundamentalDeviation;
 namespace ProcessPlan.Core.Standards;
 
 /// <summary>
-/// ISO 286-1:2010: limit deviations of tolerance classes and widths of tolerance grades for nominal sizes over 0 up to and including 3150 mm.
-/// A size at the end of a range belongs to the lower range. All values are exact; nothing is rounded.
+/// ISO 286-1:2010: limit deviations of tolerance classes and widths of tolerance grades, for nominal sizes over 0 up to and
+/// including 3150 mm. A size at the end of a range belongs to the lower range. All values are exact; nothing is rounded.
 /// </summary>
 public static class Iso286
 {
@@ -23,7 +23,7 @@ public static class Iso286
     private static readonly ToleranceGrade IT8 = ToleranceGrade.It(8);
     private static readonly ToleranceGrade IT14 = ToleranceGrade.It(14);
 
-    /// <summary>The limit deviations of <paramref name="c"/> at <paramref name="nominal"/>, or why there are none. Allocates nothing.</summary>
+    /// <summary>The limit deviations of a class at a nominal size, or why there are none. Allocates nothing.</summary>
     public static ClassLookup Find(Length nominal, ToleranceClass c)
     {
         long size = nominal.Picometres;
@@ -55,7 +55,7 @@ public static class Iso286
             : FindShaft(c, width, shaft);
     }
 
-    /// <summary>The width of <paramref name="grade"/> at <paramref name="nominal"/>; false, and zero, where the standard gives none.</summary>
+    /// <summary>The width of a grade at a nominal size; false, and zero, where the standard gives none.</summary>
     public static bool TryWidth(Length nominal, ToleranceGrade grade, out Deviation width)
     {
         int main = Iso286Tables.StepOf(Iso286Tables.MainEnds, nominal.Picometres);
@@ -66,8 +66,8 @@ public static class Iso286
     }
 
     /// <summary>
-    /// The finest grade at <paramref name="nominal"/> whose width is not smaller than <paramref name="width"/>: the coarser side where it lies
-    /// between two. Null where every grade is smaller, or the size is outside the standard.
+    /// The finest grade at the size whose width is not smaller than <paramref name="width"/>: the coarser side where it lies between
+    /// two. Null where every grade is smaller, or the size is outside the standard.
     /// </summary>
     public static ToleranceGrade? NearestGrade(Length nominal, Deviation width)
     {
@@ -88,13 +88,13 @@ public static class Iso286
     /// <summary>The step of <paramref name="nominal"/> that its fundamental deviations are taken from; null outside the standard.</summary>
     public static SizeStep? DeviationStep(Length nominal) => Step(Iso286Tables.SubEnds, nominal);
 
-    /// <summary>Where the width of <paramref name="grade"/> stands, as "ISO 286-1:2010, Table 1, over 18 to 30 mm, IT7".</summary>
+    /// <summary>Where the width of a grade stands, as "ISO 286-1:2010, Table 1, over 18 to 30 mm, IT7".</summary>
     /// <exception cref="ArgumentOutOfRangeException">The standard gives no such width.</exception>
     public static Citation Cite(Length nominal, ToleranceGrade grade) => TryWidth(nominal, grade, out _)
         ? Iso286Tables.Grades.Cite($"{Step(nominal)}, {grade.Text}")
         : throw new ArgumentOutOfRangeException(nameof(nominal), nominal, $"The standard gives no {grade.Text} at this size.");
 
-    /// <summary>Where the fundamental deviation of <paramref name="c"/> stands, as "ISO 286-1:2010, Table 5, over 18 to 24 mm, k".</summary>
+    /// <summary>Where the deviation of a class stands, as "ISO 286-1:2010, Table 5, over 18 to 24 mm, k".</summary>
     /// <exception cref="ArgumentOutOfRangeException">The standard does not define the class at this size.</exception>
     public static Citation Cite(Length nominal, ToleranceClass c)
     {
@@ -150,7 +150,7 @@ public static class Iso286
         {
             switch (c.Letter)
             {
-                case K when size > ThreeMillimetres:
+                case K when special:
                 case N when size <= OneMillimetre:
                     return ClassLookup.Refused(ClassGap.LetterNotInGrade);
                 case N when special:

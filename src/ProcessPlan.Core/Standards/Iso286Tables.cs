@@ -31,7 +31,8 @@ internal static class Iso286Tables
     public static readonly long[][] Shafts = ReadShafts();
 
     /// <summary>Lower limit deviations of the shafts j by grade, then sub-step; null for a grade that j has not.</summary>
-    public static readonly long[]?[] ShaftsJ = ByGrade((5, ShaftsAToJ, "j5-6"), (6, ShaftsAToJ, "j5-6"), (7, ShaftsAToJ, "j7"), (8, ShaftsAToJ, "j8"));
+    public static readonly long[]?[] ShaftsJ =
+        ByGrade((5, ShaftsAToJ, "j5-6"), (6, ShaftsAToJ, "j5-6"), (7, ShaftsAToJ, "j7"), (8, ShaftsAToJ, "j8"));
 
     /// <summary>Upper limit deviations of the holes J by grade, then sub-step; null for a grade that J has not.</summary>
     public static readonly long[]?[] HolesJ = ByGrade((6, HolesOfJ, "J6"), (7, HolesOfJ, "J7"), (8, HolesOfJ, "J8"));
@@ -93,7 +94,7 @@ internal static class Iso286Tables
         return shafts;
     }
 
-    private static long[]?[] ByGrade(params ReadOnlySpan<(int Grade, PublishedTable Table, string Column)> columns)
+    private static long[]?[] ByGrade(params (int Grade, PublishedTable Table, string Column)[] columns)
     {
         long[]?[] byGrade = new long[]?[ToleranceGrade.Count];
         foreach ((int grade, PublishedTable table, string column) in columns)

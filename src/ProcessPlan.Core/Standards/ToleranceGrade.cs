@@ -1,6 +1,6 @@
 namespace ProcessPlan.Core.Standards;
 
-/// <summary>A standard tolerance grade of ISO 286-1, from IT01 (the finest, and the default) over IT0 and IT1 to IT18. IT01 is not IT1.</summary>
+/// <summary>A standard tolerance grade of ISO 286-1: IT01 (the finest, and the default), IT0, IT1 … IT18. IT01 is not IT1.</summary>
 public readonly record struct ToleranceGrade : IComparable<ToleranceGrade>
 {
     public const int Count = 20;
@@ -63,8 +63,13 @@ public readonly record struct ToleranceGrade : IComparable<ToleranceGrade>
     /// <summary>Reads the digits of a grade, 01, 0 or 1 to 18, from the start of <paramref name="text"/>.</summary>
     internal static bool TryReadSymbol(ReadOnlySpan<char> text, out ToleranceGrade grade, out int read)
     {
-        int digits = text.IndexOfAnyExceptInRange('0', '9');
-        ReadOnlySpan<char> symbol = digits < 0 ? text : text[..digits];
+        int digits = 0;
+        while (digits < text.Length && char.IsAsciiDigit(text[digits]))
+        {
+            digits++;
+        }
+
+        ReadOnlySpan<char> symbol = text[..digits];
         for (int ordinal = 0; ordinal < Count; ordinal++)
         {
             if (symbol.SequenceEqual(Symbols[ordinal]))

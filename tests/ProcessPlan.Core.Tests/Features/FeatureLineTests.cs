@@ -347,16 +347,19 @@ public sealed partial class FeatureLineTests
     [InlineData("Ra 0.8 µm max")]
     [InlineData("finish=Ra0.8")]
     [InlineData("finish Ra 0.8")]
+    public void Parse_Roughness_InEverySpelling(string words) => One($"25H7 {words}").ShouldBe(Hole25H7 with { Finish = Ra(0.8m) });
+
+    [Theory]
     [InlineData("N6")]
     [InlineData("finish=N6")]
-    public void Parse_Roughness_InEverySpelling(string words) => One($"25H7 {words}").ShouldBe(Hole25H7 with { Finish = Ra(0.8m) });
+    public void Parse_RoughnessNumber_KeepsHowItWasStated(string words) => One($"25H7 {words}").ShouldBe(Hole25H7 with { Finish = Roughness.N(6) });
 
     // ISO 1302:2002, annex G: N1 to N12 are Ra 0.025 to 50 µm.
     [Theory]
     [InlineData(1, 0.025)]
     [InlineData(7, 1.6)]
     [InlineData(12, 50)]
-    public void Parse_RoughnessNumber_IsItsRa(int number, double ra) => One($"25H7 N{number}").Finish!.Value.RaMicrometres.Should().Be(ra);
+    public void Parse_RoughnessNumber_IsItsRa(int number, double ra) => One($"25H7 N{number}").Finish!.Value.ToMicrometres().Should().Be(ra);
 
     [Fact]
     public void Parse_Rz_IsRead() => One("25H7 Rz 6.3").Finish.Should().Be(One("25H7 rz=6,3").Finish).And.NotBeNull();
@@ -375,7 +378,7 @@ public sealed partial class FeatureLineTests
     {
         Feature feature = One(line);
         feature.Class.Should().Be(Class(toleranceClass));
-        feature.Finish.Should().Be(finish ? Ra(1.6m) : null);
+        feature.Finish.Should().Be(finish ? Roughness.N(7) : null);
     }
 
     [Theory]
@@ -479,12 +482,12 @@ public sealed partial class FeatureLineTests
     public void Parse_HardnessAsDelivered_InEverySpelling(string words) => One($"25H7 {words}").ShouldBe(Hole25H7 with { Hardness = Hrc(28) });
 
     [Theory]
-    [InlineData("200HB", HardnessScale.Hb)]
-    [InlineData("200 HBW", HardnessScale.Hb)]
-    [InlineData("HB 200", HardnessScale.Hb)]
-    [InlineData("HBW200", HardnessScale.Hb)]
-    [InlineData("200HV", HardnessScale.Hv)]
-    [InlineData("hv=200", HardnessScale.Hv)]
+    [InlineData("200HB", HardnessScale.HB)]
+    [InlineData("200 HBW", HardnessScale.HB)]
+    [InlineData("HB 200", HardnessScale.HB)]
+    [InlineData("HBW200", HardnessScale.HB)]
+    [InlineData("200HV", HardnessScale.HV)]
+    [InlineData("hv=200", HardnessScale.HV)]
     public void Parse_HardnessInOtherScales_IsRead(string words, HardnessScale scale) => One($"25H7 {words}").Hardness.Should().Be(Hard(200, scale));
 
     [Theory]
@@ -504,7 +507,7 @@ public sealed partial class FeatureLineTests
         One("25H7 case=0.8mm").Treatment.Should().Be(new Treatment(TreatmentKind.CaseHardened, null, Mm(0.8m)));
         One("25H7 case 0.8 60HRC").Treatment.Should().Be(new Treatment(TreatmentKind.CaseHardened, Hrc(60), Mm(0.8m)));
         One("25H7 case 60HRC").Treatment.Should().Be(new Treatment(TreatmentKind.CaseHardened, Hrc(60), null));
-        One("25H7 nitrided 0.3 700HV").Treatment.Should().Be(new Treatment(TreatmentKind.Nitrided, Hard(700, HardnessScale.Hv), Mm(0.3m)));
+        One("25H7 nitrided 0.3 700HV").Treatment.Should().Be(new Treatment(TreatmentKind.Nitrided, Hard(700, HardnessScale.HV), Mm(0.3m)));
         One("25H7 nitrided 300um").Treatment.Should().Be(new Treatment(TreatmentKind.Nitrided, null, Mm(0.3m)));
         One("case 0.8 25H7").ShouldBe(Hole25H7 with { Treatment = new Treatment(TreatmentKind.CaseHardened, null, Mm(0.8m)) });
         One("case 0.8 200off 25H7").Quantity.Should().Be(200);
@@ -635,9 +638,9 @@ public sealed partial class FeatureLineTests
         (feature.Unit, feature.Nominal, feature.Extent).Should().Be((LengthUnit.Inch, Inch((decimal)nominal), Inch((decimal)extent)));
     }
 
-    // 1 µin is 0.0254 µm exactly.
+    // 32 µin are 812.8 nm: a limit is converted to the stricter side.
     [Fact]
-    public void Parse_Microinch_IsExact() => One("hole 1H7 in Ra 32uin").Finish.Should().Be(Ra(0.8128m));
+    public void Parse_Microinch_IsHeldToTheNanometreBelow() => One("hole 1H7 in Ra 32uin").Finish.Should().Be(Ra(0.812m));
 
     [Theory]
     [InlineData("HOLE 25H7 X40 THRU RA0,8 42CRMO4 28HRC 200OFF", "hole 25H7 x40 thru Ra0.8 42CrMo4 28HRC 200off")]

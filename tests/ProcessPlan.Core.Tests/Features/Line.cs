@@ -66,13 +66,11 @@ internal static class Line
     public static ToleranceClass Class(string text) =>
         ToleranceClass.TryRead(text, out ToleranceClass value, out int read) && read == text.Length ? value : throw new FormatException(text);
 
-    public static Hardness Hrc(int points) => Hard(points, HardnessScale.Hrc);
+    public static Hardness Hrc(int points) => Hard(points, HardnessScale.HRC);
 
     public static Hardness Hard(int points, HardnessScale scale) => Hardness.TryCreate(new ExactDecimal(points, 0), scale, out Hardness hardness)
         ? hardness
         : throw new ArgumentOutOfRangeException(nameof(points), points, "no hardness of the scale");
 
-    public static Roughness Ra(decimal micrometres) => Roughness.TryFromRa((long)(micrometres * Length.PicometresPerMicrometre), out Roughness roughness)
-        ? roughness
-        : throw new ArgumentOutOfRangeException(nameof(micrometres), micrometres, "no Ra");
+    public static Roughness Ra(decimal micrometres) => Roughness.Ra((long)(micrometres * 1000));
 }

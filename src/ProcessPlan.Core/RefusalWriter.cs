@@ -1,0 +1,98 @@
+using ProcessPlan.Core.Capability;
+using ProcessPlan.Core.Features;
+using ProcessPlan.Core.Routing;
+using ProcessPlan.Core.Shop;
+using ProcessPlan.Core.Standards;
+using ProcessPlan.Core.Tooling;
+using ProcessPlan.Core.Values;
+
+namespace ProcessPlan.Core;
+
+/// <summary>Says why the search found nothing.</summary>
+internal static class RefusalWriter
+{
+    public static Refusal Write(Job job, ShopFloor shop, IReadOnlyList<Candidate> candidates, RouteSearch search)
+    {
+        string asked = Asked(job);
+        if (search.ClosedChange is { } change)
+        {
+            return new Refusal(asked,
+                $"No window exists before {change.Process}: it moves the size by {change.LeastGrowth} to {change.MostGrowth}, the tolerance is {job.Feature.Limits.Width.Format()} µm.",
+                Best(job, candidates),
+                ["Ask the designer: limits before the coating, a closer thickness, or masking.", "Coat over size and grind to the drawing."]);
+        }
+
+        List<Candidate> finishing = [.. candidates.Where(static candidate => candidate.Finishes is not null)];
+        if (finishing.Count == 0)
+        {
+            return new Refusal(asked, $"No process of this shop finishes {asked}.", Best(job, candidates), WouldOpen(job, shop, candidates));
+        }
+
+        string finishers = string.Join(", ", finishing.Select(static candidate => candidate.Process.Name));
+        string message = job.AsksForPosition && search.NearestMiss is null
+            ? $"{finishers} could finish it, but nothing before puts the axis right."
+            : search.NearestMiss is { } miss
+                ? $"{finishers} could finish it, but the window between {miss.Before} and {miss.Process} is too narrow by {miss.ShortBy.Format()} µm at the nearest."
+                : $"{finishers} could finish it, but nothing of this shop can come before, or the tool of its size is missing.";
+        return new Refusal(asked, message, Best(job, candidates), WouldOpen(job, shop, candidates));
+    }
+
+    private static string Asked(Job job)
+    {
+        string size = job.Feature.Class is { } toleranceClass
+            ? $"{job.Nominal.Format()} {toleranceClass}"
+            : $"{job.Feature.Limits.Min.Format(3)} to {job.Feature.Limits.Max.Format(3)}";
+        return job.Feature.Finish is { } finish ? $"{size} with {finish}" : size;
+    }
+
+    /// <summary>The finest tolerance and the finest roughness, each with its process.</summary>
+    private static string Best(Job job, IReadOnlyList<Candidate> candidates)
+    {
+        Candidate? finest = null;
+        Candidate? smoothest = null;
+        foreach (Candidate candidate in candidates)
+        {
+            if (candidate.NoAtAll is not null)
+            {
+                continue;
+            }
+
+            finest = finest is null || candidate.HeldWidth(Effort.Special) < finest.HeldWidth(Effort.Special) ? candidate : finest;
+            smoothest = smoothest is null || candidate.Process.SpecialRa.Nanometres < smoothest.Process.SpecialRa.Nanometres ? candidate : smoothest;
+        }
+
+        if (finest is null || smoothest is null)
+        {
+            return $"nothing of this shop makes a {job.Kind.Word()} like this";
+        }
+
+        Deviation width = finest.HeldWidth(Effort.Special);
+        string grade = Iso286.NearestGrade(job.Nominal, width)?.ToString() ?? "";
+        return $"{grade} ({width.Format()} µm) by {finest.Process.Name}; {smoothest.Process.SpecialRa} by {smoothest.Process.Name}, both with special effort";
+    }
+
+    private static List<string> WouldOpen(Job job, ShopFloor shop, IReadOnlyList<Candidate> candidates)
+    {
+        List<string> open = [];
+        SizeWindow hole = job.Feature.Limits;
+        if (candidates.Any(static candidate => candidate is { Finishes: not null, Process.SizedBy: ToolUse.Ream })
+            && shop.Tools(ToolUse.Ream).All(tool => !ReamerChoice.Suits(tool, hole, out _)))
+        {
+            SizeWindow reamer = Din1420.ReamerFor(hole);
+            open.Add($"a reamer whose own size is {reamer.Min.Format(3)} to {reamer.Max.Format(3)} mm (DIN 1420)");
+        }
+
+        foreach (Candidate candidate in candidates)
+        {
+            Deviation? special = candidate.SpecialWidth ?? candidate.RoutineWidth;
+            bool wouldHold = special <= job.Feature.Limits.Width && (job.Ra is not { } ra || candidate.Process.SpecialRa.Nanometres <= ra.Nanometres);
+            if (wouldHold && candidate.Machines.Count == 0 && candidate.NoAtAll is not null)
+            {
+                open.Add($"{candidate.Process.Name} by another machine or an outside supplier ({candidate.NoAtAll})");
+            }
+        }
+
+        open.Add("Ask the designer whether a wider tolerance or a coarser finish serves.");
+        return open;
+    }
+}

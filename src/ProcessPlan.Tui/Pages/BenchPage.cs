@@ -1,0 +1,316 @@
+using System.Globalization;
+using ProcessPlan.Core;
+using ProcessPlan.Core.Features;
+using ProcessPlan.Core.Routing;
+using ProcessPlan.Core.Standards;
+using ProcessPlan.Core.Text;
+using ProcessPlan.Core.Values;
+using ProcessPlan.Tui.Paper;
+
+namespace ProcessPlan.Tui.Pages;
+
+/// <summary>Where the characters of the line stand on the screen, as its field shows them.</summary>
+/// <param name="Caret">Character before which the caret stands.</param>
+/// <param name="ColumnOf">Column of a character; outside the field where it is scrolled away.</param>
+/// <param name="From">First column of the field.</param>
+/// <param name="To">Column behind the field.</param>
+internal readonly record struct LineSight(int Caret, Func<int, int> ColumnOf, int From, int To);
+
+/// <summary>The bench: the line, its size, its route, and the reasons, from top to bottom.</summary>
+internal static class BenchPage
+{
+    public const int FieldColumn = 9;
+    public const int FieldEnd = 5;
+
+    private const int SizeRow = 3;
+    private const int NumbersWidth = 38;
+    private const int LeastBelow = 4;
+
+    public static void Draw(Sheet sheet, Bench bench, LineSight line)
+    {
+        Ruler ruler = new(bench.Unit);
+        sheet.Write(0, 0, "Feature", Ink.Heading);
+        if (bench.Hand == Hand.Line)
+        {
+            sheet.Put(FieldColumn - 1, 0, sheet.Pen.Pointer, Ink.Strong);
+        }
+
+        sheet.WriteBefore(sheet.Width - 1, 0, ruler.Name, Ink.Heading);
+        DrawAnswer(sheet, bench, ruler);
+        if (!bench.IsCurrent)
+        {
+            sheet.Fade(SizeRow, sheet.Height - SizeRow - 1);
+        }
+
+        DrawReading(sheet, bench, line, ruler);
+        DrawKeys(sheet, bench);
+    }
+
+    /// <summary>The two rows below the line: what is wrong with it, or how it was read and the first question or caution.</summary>
+    private static void DrawReading(Sheet sheet, Bench bench, LineSight line, Ruler ruler)
+    {
+        if (bench.ProblemNear(line.Caret) is { } problem)
+        {
+            foreach (Problem marked in bench.Problems)
+            {
+                DrawMarks(sheet, marked, line);
+            }
+
+            string others = bench.Problems.Count > 1 ? $" (1 of {bench.Problems.Count})" : "";
+            string text = $"{problem.Message} Expected: {problem.Expected}{others}";
+            List<string> lines = [.. sheet.Wrap(text, sheet.Width)];
+            for (int i = 0; i < lines.Count && i < 2; i++)
+            {
+                sheet.Write(0, 2 + i, i == 1 && lines.Count > 2 ? sheet.Shorten($"{lines[1]} {lines[2]}", sheet.Width) : lines[i].PadRight(sheet.Width), Ink.Problem);
+            }
+
+            DrawStale(sheet, bench, lines.Count > 1 ? SizeRow + 1 : SizeRow);
+            return;
+        }
+
+        if (bench.Answer is null || !bench.IsCurrent)
+        {
+            sheet.Write(0, 1, bench.Waiting is not null ? "…" : "Type a feature, for example: " + ScreenOptions.FirstLine, Ink.Faint);
+            DrawStale(sheet, bench, 2);
+            return;
+        }
+
+        sheet.Write(0, 1, sheet.Shorten(string.Join("  with  ", bench.Answer.Request.Features.Select(feature => ReadBack.Say(feature, ruler))), sheet.Width));
+        if (bench.Plan!.Queries is [string query, ..])
+        {
+            sheet.Write(0, 2, sheet.Shorten("? " + query, sheet.Width), Ink.Caution);
+        }
+        else if (bench.Plan.Cautions is [string caution, ..])
+        {
+            sheet.Write(0, 2, sheet.Shorten("! " + caution, sheet.Width), Ink.Caution);
+        }
+    }
+
+    private static void DrawStale(Sheet sheet, Bench bench, int row)
+    {
+        if (bench.Answer is { } answer)
+        {
+            sheet.Write(0, row, sheet.Shorten("answer to: " + answer.Line, sheet.Width).PadRight(sheet.Width), Ink.Strong);
+        }
+    }
+
+    private static void DrawMarks(Sheet sheet, Problem problem, LineSight line)
+    {
+        for (int at = problem.At; at < problem.At + Math.Max(1, problem.Length); at++)
+        {
+            int column = line.ColumnOf(at);
+            if (column >= line.From && column < line.To)
+            {
+                sheet.Put(column, 1, '^', Ink.Problem);
+            }
+        }
+    }
+
+    private static void DrawAnswer(Sheet sheet, Bench bench, Ruler ruler)
+    {
+        if (bench is not { Answer: { } answer, Feature: { } feature, Plan: { } plan })
+        {
+            return;
+        }
+
+        Room room = Room.Of(sheet.Height, bench);
+        DrawSize(sheet, SizeRow, room.Size, bench, answer, feature, ruler);
+        int row = SizeRow + room.Size;
+        if (bench.Route is { } route)
+        {
+            DrawRoute(sheet, row, room.Operations, bench, plan, route, ruler);
+            row += room.Operations + 3;
+        }
+        else if (plan.Refusal is { } refusal)
+        {
+            row = DrawRefusal(sheet, row, refusal);
+        }
+
+        DrawBelow(sheet, row, sheet.Height - 1 - row, bench, plan);
+    }
+
+    /// <summary>How the rows are shared out: the size takes its picture, the route its operations, and the text below gets the rest.</summary>
+    private readonly record struct Room(int Size, int Operations)
+    {
+        private const int Numbers = 5;
+
+        public static Room Of(int height, Bench bench)
+        {
+            int rows = height - SizeRow - 1;
+            int operations = bench.Route?.Operations.Count ?? 0;
+            int shown = Math.Max(2, Math.Min(operations, rows - Numbers - 3 - LeastBelow));
+            int picture = 1 + 1 + bench.Answer!.Plans.Count + 1 + operations + (height > 30 ? 1 : 0);
+            int left = rows - 3 - shown - LeastBelow - (height > 30 ? 4 : 0);
+            return new Room(Math.Max(Numbers, Math.Min(picture, Math.Min(left, rows / 2))), operations == 0 ? 0 : shown);
+        }
+    }
+
+    private static void DrawSize(Sheet sheet, int row, int rows, Bench bench, Answer answer, Feature feature, Ruler ruler)
+    {
+        string grade = feature.Class is { } toleranceClass ? toleranceClass.Grade.ToString() : feature.NearestGrade is { } near ? $"as {near}" : "beyond IT18";
+        sheet.Rule(row, $"{ReadBack.Name(feature, ruler)}{(feature.IsRound ? "" : ", width")}");
+        (string max, string min) = ruler.Limits(feature.Limits);
+        string aim = ruler.Aim(Aim(bench, feature), feature.Limits);
+        WriteSize(sheet, row + 1, "max", max, ruler, ruler.Upper(feature.Upper));
+        WriteSize(sheet, row + 2, "aim", aim, ruler, "");
+        WriteSize(sheet, row + 3, "min", min, ruler, ruler.Lower(feature.Lower));
+        sheet.Write(1, row + 4, $"tolerance {ruler.Width(feature.Limits.Width)}, {grade}");
+        int free = row + 5;
+        if (answer.Request.Mate is { } mate)
+        {
+            Fit fit = new(answer.Request.First.Limits, mate.Limits);
+            sheet.Write(1, free++, $"{fit.Character.ToString().ToLowerInvariant()}: {ruler.Clearances(fit)}", Ink.Strong);
+        }
+
+        if (free < row + rows)
+        {
+            sheet.Write(1, free, LowerText.Count(bench.Plan!), Ink.Caution);
+        }
+
+        int width = sheet.Width - NumbersWidth - 1;
+        List<Feature> zones = [.. answer.Request.Features];
+        ZonePicture.Draw(sheet, NumbersWidth, row, width, zones, Aim(bench, feature), bench.FeatureAt, ruler);
+        if (bench.Route is { } route)
+        {
+            int chain = row + 1 + zones.Count;
+            ChainPicture.Draw(sheet, NumbersWidth, chain, width, row + rows - chain, route, feature.IsInternal, bench.Operation, ruler);
+        }
+    }
+
+    private static void WriteSize(Sheet sheet, int row, string name, string size, Ruler ruler, string deviation)
+    {
+        sheet.Write(1, row, name);
+        sheet.Write(6, row, size, Ink.Strong);
+        sheet.Write(6 + size.Length + 1, row, ruler.Name);
+        sheet.WriteBefore(NumbersWidth - 2, row, deviation);
+    }
+
+    /// <summary>The aim of the operation that makes the drawing's size, or the middle where none is planned.</summary>
+    private static Length Aim(Bench bench, Feature feature) =>
+        bench.Route?.Operations.LastOrDefault(operation => operation.Aim is not null && operation.Size == feature.Limits)?.Aim ?? feature.Limits.Middle;
+
+    private static void DrawRoute(Sheet sheet, int row, int rows, Bench bench, Plan plan, Route route, Ruler ruler)
+    {
+        string gap = route.Rank > 1 ? $", {new Money(route.CostPerPiece.Amount - plan.Routes[0].CostPerPiece.Amount, route.CostPerPiece.Currency).Format()} dearer" : "";
+        string currency = route.CostPerPiece.Currency;
+        Money lot = route.CostPerPiece with { Amount = route.CostPerPiece.Amount * plan.Job.Quantity };
+        sheet.Rule(row, $"route {route.Rank} of {plan.Routes.Count}{gap}: {route.CostPerPiece} a piece, {lot} for {plan.Job.Quantity}");
+        List<string[]> cells = [.. route.Operations.Select(operation => Cells(operation, ruler))];
+        Table table = new(Columns(ruler, currency), cells, sheet.Width - 2, sheet.Pen);
+        table.WriteHead(sheet, 2, row + 1);
+        int first = Math.Clamp(bench.OperationAt - rows / 2, 0, Math.Max(0, cells.Count - rows));
+        if (bench.OperationAt - first >= rows)
+        {
+            first = bench.OperationAt - rows + 1;
+        }
+
+        for (int at = first; at < cells.Count && at < first + rows; at++)
+        {
+            bool chosen = at == bench.OperationAt;
+            Ink ink = chosen ? bench.Hand == Hand.Route ? Ink.Chosen : Ink.Strong : Ink.Plain;
+            table.WriteRow(sheet, 2, row + 2 + at - first, at, ink);
+            if (chosen)
+            {
+                sheet.Put(0, row + 2 + at - first, sheet.Pen.Pointer, Ink.Strong);
+            }
+        }
+
+        string hidden = rows < cells.Count ? $"{cells.Count} operations " : "";
+        string yield = string.Create(CultureInfo.InvariantCulture, $"yield {route.Yield * 100:0.0} %");
+        sheet.Write(2, row + 2 + rows,
+            sheet.Shorten($"{hidden}from {route.From}: start {route.Blanks}, {yield}, {route.MinutesPerPiece} a piece, set-up {route.SetUp}", sheet.Width - 2), Ink.Strong);
+    }
+
+    private static Column[] Columns(Ruler ruler, string currency) =>
+    [
+        new("no", 2, true, 0),
+        new("process", 17, false, 0),
+        new("machine", 10, false, 3),
+        new("tool", 12, false, 2),
+        new($"size {ruler.Name}", 13, true, 0),
+        new("aim", 7, true, 1),
+        new("stock", 11, true, 0),
+        new(ruler.IsInch ? "Ra µin" : "Ra", 4, true, 0),
+        new("min", 5, true, 0),
+        new(currency, 5, true, 0),
+    ];
+
+    private static string[] Cells(Operation operation, Ruler ruler) =>
+    [
+        $"{operation.Number}",
+        operation.Process,
+        operation.Machine,
+        operation.Tool?.Label ?? "",
+        operation.Size is { } size ? ruler.Range(size) : "",
+        operation is { Aim: { } aim, Size: { } held } ? ruler.Aim(aim, held) : "",
+        operation is { StockMin: { } least, StockMax: { } most } ? ruler.Stock(least, most) : "",
+        operation.Ra is { } ra ? ruler.Ra(ra) : "",
+        operation.Minutes.Format(),
+        operation.Cost.Format(),
+    ];
+
+    private static int DrawRefusal(Sheet sheet, int row, Refusal refusal)
+    {
+        sheet.Rule(row++, "no route", Ink.Problem);
+        (string Head, string Text)[] parts =
+        [
+            ("asked", refusal.Requirement),
+            ("why", refusal.Message),
+            ("best", refusal.Best),
+            .. refusal.WouldOpen.Select(static (way, at) => (at == 0 ? "opens" : "", way)),
+        ];
+        foreach ((string head, string text) in parts)
+        {
+            sheet.Write(1, row, head, Ink.Strong);
+            foreach (string line in sheet.Wrap(text, sheet.Width - 8))
+            {
+                sheet.Write(7, row++, line);
+            }
+        }
+
+        return row;
+    }
+
+    /// <summary>The lower text with its heading; a mark says that there is more of it.</summary>
+    private static void DrawBelow(Sheet sheet, int row, int rows, Bench bench, Plan plan)
+    {
+        if (rows < 2)
+        {
+            return;
+        }
+
+        bool notes = bench.Below == Below.Notes || bench.Operation is null;
+        string title = notes ? "notes" : OperationTitle(bench.Operation!, new Ruler(bench.Unit));
+        sheet.Rule(row, sheet.Shorten(title, sheet.Width - 24));
+        List<Said> said = [.. notes ? LowerText.Notes(plan) : LowerText.Reasons(bench.Operation!, bench.Unit)];
+        List<(string Head, string Line, Ink Ink)> lines = [.. LowerText.Lines(sheet, said)];
+        bench.LimitScroll(lines.Count - (rows - 1));
+        for (int at = 0; at < rows - 1 && bench.Scroll + at < lines.Count; at++)
+        {
+            (string head, string line, Ink ink) = lines[bench.Scroll + at];
+            sheet.Write(1, row + 1 + at, head, ink);
+            sheet.Write(LowerText.HeadWidth, row + 1 + at, line, ink == Ink.Plain ? Ink.Plain : ink);
+        }
+
+        int hidden = lines.Count - bench.Scroll - (rows - 1);
+        if (hidden > 0)
+        {
+            sheet.WriteBefore(sheet.Width - 1, row, $" {hidden} more {sheet.Pen.More} PgDn ", Ink.Faint);
+        }
+    }
+
+    private static string OperationTitle(Operation operation, Ruler ruler)
+    {
+        string aim = operation is { Aim: { } at, Size: { } held } ? $", aim {ruler.Aim(at, held)} {ruler.Name}" : "";
+        string tool = operation.Tool is { } used ? $", {used.Label}" : "";
+        return $"{operation.Number} {operation.Process}: {operation.Machine}{tool}{aim}";
+    }
+
+    private static void DrawKeys(Sheet sheet, Bench bench)
+    {
+        string unit = bench.Unit == LengthUnit.Inch ? "mm" : "inch";
+        string keys = $"F1 help  F2 {unit}  F3 big  F4 route  F6 {(bench.Below == Below.Notes ? "why" : "notes")}  {(bench.IsFit ? "F9 mate  " : "")}"
+            + (bench.Hand == Hand.Line ? "Tab route" : "Tab line  ? keys") + "  Ctrl+Q leave";
+        sheet.Write(0, sheet.Height - 1, sheet.Shorten(keys, sheet.Width), Ink.Faint);
+    }
+}
