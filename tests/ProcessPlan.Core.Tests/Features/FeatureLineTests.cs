@@ -638,9 +638,9 @@ public sealed partial class FeatureLineTests
         (feature.Unit, feature.Nominal, feature.Extent).Should().Be((LengthUnit.Inch, Inch((decimal)nominal), Inch((decimal)extent)));
     }
 
-    // 1 µin is 0.0254 µm exactly.
+    // 32 µin are 812.8 nm: a limit is converted to the stricter side.
     [Fact]
-    public void Parse_Microinch_IsExact() => One("hole 1H7 in Ra 32uin").Finish.Should().Be(Ra(0.8128m));
+    public void Parse_Microinch_IsHeldToTheNanometreBelow() => One("hole 1H7 in Ra 32uin").Finish.Should().Be(Ra(0.812m));
 
     [Theory]
     [InlineData("HOLE 25H7 X40 THRU RA0,8 42CRMO4 28HRC 200OFF", "hole 25H7 x40 thru Ra0.8 42CrMo4 28HRC 200off")]
