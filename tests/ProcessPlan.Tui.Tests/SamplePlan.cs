@@ -56,7 +56,7 @@ internal static class SamplePlan
         Length stamped = new(feature.Nominal.Picometres);
         operations.Add(Cut(extra ? 40 : 30, "sizing", "lathe 2", feature.Limits, 7, 800, 99, 172, 0.74, 0.69m) with
         {
-            Tool = new Tool("machine reamer", ToolUse.Ream, stamped, new SizeWindow(stamped, stamped, 10, 20), "H7", "HSS"),
+            Tool = new Tool("machine reamer", ToolUse.Ream, stamped, new SizeWindow(stamped, stamped), "H7", "HSS", 62, 45),
             Cautions = ["Make a trial hole with a tool that is new to this material."],
         });
         return new Route(rank, operations, new Money(cost, Euro), new Minutes(2.59), new Minutes(25), 0.9986, 201, "solid metal");

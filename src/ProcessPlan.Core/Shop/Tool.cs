@@ -24,4 +24,6 @@ public sealed record Tool(string Name, ToolUse Use, Length Stamped, SizeWindow O
 {
     /// <summary>Name and size, as the pick list prints it.</summary>
     public string Label => $"{Name} {Stamped.Format()}{(Made.StartsWith('H') ? " " + Made : "")}";
+
+    public override string ToString() => Label;
 }
