@@ -431,6 +431,11 @@ public class PlanLawTests
         new
         {
             Routes = plan.Routes.Select(route => new { Route = route with { Operations = [] }, Operations = route.Operations.Select(operation => $"{operation with { Because = [], Cautions = [], Why = [] }} {string.Join('|', operation.Because)} {string.Join('|', operation.Cautions)} {string.Join('|', operation.Why)}") }),
-            plan.Refusal, plan.Rejected, plan.Queries, plan.Cautions, plan.Assumptions, plan.Expanded,
+            plan.Refusal,
+            plan.Rejected,
+            plan.Queries,
+            plan.Cautions,
+            plan.Assumptions,
+            plan.Expanded,
         });
 }

@@ -48,8 +48,17 @@ internal static class SamplePlan
         {
             operations.Add(new Operation
             {
-                Number = 30, Process = "stress relief", Machine = "outside", Condition = Condition.Soft, Minutes = default, SetUp = default,
-                Cost = new Money(0.26m, Euro), Inspection = "size on return", Because = ["the drawing asks for it; 5 days away"], Cautions = [], Why = [],
+                Number = 30,
+                Process = "stress relief",
+                Machine = "outside",
+                Condition = Condition.Soft,
+                Minutes = default,
+                SetUp = default,
+                Cost = new Money(0.26m, Euro),
+                Inspection = "size on return",
+                Because = ["the drawing asks for it; 5 days away"],
+                Cautions = [],
+                Why = [],
             });
         }
 
