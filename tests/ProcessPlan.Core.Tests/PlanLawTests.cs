@@ -428,14 +428,8 @@ public class PlanLawTests
         new(shop.Name, shop.Currency, machines, tools, shop.Materials, shop.Bars, shop.Suppliers);
 
     private static string Text(Plan plan) => JsonSerializer.Serialize(
-        new
-        {
-            Routes = plan.Routes.Select(route => new { Route = route with { Operations = [] }, Operations = route.Operations.Select(operation => $"{operation with { Because = [], Cautions = [], Why = [] }} {string.Join('|', operation.Because)} {string.Join('|', operation.Cautions)} {string.Join('|', operation.Why)}") }),
-            plan.Refusal,
-            plan.Rejected,
-            plan.Queries,
-            plan.Cautions,
-            plan.Assumptions,
-            plan.Expanded,
-        });
+        new { Routes = plan.Routes.Select(Text), plan.Refusal, plan.Rejected, plan.Queries, plan.Cautions, plan.Assumptions, plan.Expanded });
+
+    private static string Text(Route route) => $"{route with { Operations = [] }} " + string.Join('\n', route.Operations.Select(static operation =>
+        $"{operation with { Because = [], Cautions = [], Why = [] }} {string.Join('|', operation.Because.Concat(operation.Cautions))} {string.Join('|', operation.Why)}"));
 }

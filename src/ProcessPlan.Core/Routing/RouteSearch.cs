@@ -101,7 +101,7 @@ internal sealed class RouteSearch
     /// <summary>The least stock of a step after another one, or after the blank.</summary>
     public StockNeed NeedOf(Step step, Step before) => before.IsBlank
         ? Need(step, before.BlankName!.StartsWith("bar", StringComparison.Ordinal) ? "bar" : "casting", before.Leaving!.Value.Most, new Deviation(before.Leaving.Value.Width), false, false)
-        : Need(step, before.Process.Name, step.Window.Most, LeftTolerance(before.Candidate!, step, before.Tool is null ? null : before.Leaving),
+        : Need(step, before.Process.Name, step.Reach.Most, LeftTolerance(before.Candidate!, step, before.Tool is null ? null : before.Leaving),
             before.ChangesAfter.Length == 0 && before.Machine == step.Machine, Array.Exists(before.ChangesAfter, static change => change.Hardens));
 
     private void Push(Step step)
@@ -170,7 +170,7 @@ internal sealed class RouteSearch
             foreach (Tool? tool in LastTools(candidate, window, effort))
             {
                 double yield = Yield(candidate, tool, effort, window, window);
-                long leastHeld = LeastHeld(candidate, tool, effort, window);
+                MetalWindow reach = Reach(candidate, tool, effort, window);
                 foreach (Machine machine in candidate.Machines)
                 {
                     if (tool is null || tool.Stamped <= machine.Largest)
@@ -182,7 +182,7 @@ internal sealed class RouteSearch
                             Tool = tool,
                             Effort = effort,
                             Leaving = window,
-                            LeastHeld = leastHeld,
+                            Reach = reach,
                             ChangesLeft = changesLeft,
                             ChangesAfter = after,
                             Yield = yield,
@@ -265,9 +265,12 @@ internal sealed class RouteSearch
     private MetalWindow Cut(Candidate candidate, Tool tool, Effort effort) =>
         MetalWindow.Of(SizedCut.Predict(tool, _job.Group, IsCareful(candidate, effort)).Sizes, _job.IsInternal);
 
-    /// <summary>The part of the drawing's window that the last step needs, from the end with the most metal.</summary>
-    private long LeastHeld(Candidate candidate, Tool? tool, Effort effort, MetalWindow window) => Math.Max(window.Least,
-        tool is null ? window.Most - candidate.HeldWidth(effort).Picometres : Cut(candidate, tool, effort).Least);
+    /// <summary>The part of the drawing's window that the last step needs: what the tool cuts, or what the process holds from the end with the most metal.</summary>
+    private MetalWindow Reach(Candidate candidate, Tool? tool, Effort effort, MetalWindow window)
+    {
+        MetalWindow cut = tool is null ? new MetalWindow(window.Most - candidate.HeldWidth(effort).Picometres, window.Most) : Cut(candidate, tool, effort);
+        return new MetalWindow(Math.Max(window.Least, cut.Least), Math.Min(window.Most, cut.Most));
+    }
 
     /// <summary>Whether a process can cut the blank of this job, before any size is looked at.</summary>
     private bool MayStart(Candidate candidate) => candidate.Process.StartsRough
@@ -415,7 +418,7 @@ internal sealed class RouteSearch
         bool same = between.Length == 0 && machine == step.Machine;
         bool heat = Array.Exists(between, static change => change.Hardens);
         Deviation tolerance = LeftTolerance(before, step, null);
-        StockNeed need = Need(step, before.Process.Name, step.Window.Most, tolerance, same, heat);
+        StockNeed need = Need(step, before.Process.Name, step.Reach.Most, tolerance, same, heat);
         MetalWindow entering = Entering(step, need.Least, between);
         if (before.Process.SizedBy is { } use)
         {
@@ -449,7 +452,7 @@ internal sealed class RouteSearch
     /// <summary>Tolerance that the step before leaves: its grade at the size of the joint, or the range of its tool.</summary>
     private static Deviation LeftTolerance(Candidate before, Step step, MetalWindow? cut) =>
         cut is { } range ? new Deviation(range.Width)
-        : Iso286.TryWidth(MetalWindow.Size(step.Window.Most), before.LeftGrade, out Deviation width) ? width
+        : Iso286.TryWidth(MetalWindow.Size(step.Reach.Most), before.LeftGrade, out Deviation width) ? width
         : before.RoutineWidth!.Value;
 
     private void PrecedeWithTools(Step step, Candidate before, Machine machine, Change[] between, int changesLeft, MetalWindow entering, ToolUse use)
@@ -531,7 +534,8 @@ internal sealed class RouteSearch
     /// <summary>The window that must be left by the operation before, with the changes between taken off at their extremes; may be closed.</summary>
     private static MetalWindow Entering(Step step, Stock least, Change[] between)
     {
-        MetalWindow window = new(step.Window.Most + least.Picometres, step.LeastHeld + MostStock(step));
+        // Counted to the drawing's own limit some stock must be left as well.
+        MetalWindow window = new(Math.Max(step.Reach.Most + least.Picometres, step.Window.Most + Micrometre.Picometres), step.Reach.Least + MostStock(step));
         for (int i = between.Length - 1; i >= 0; i--)
         {
             window = between[i].Before(window);
@@ -540,7 +544,7 @@ internal sealed class RouteSearch
         return window;
     }
 
-    private static long MostStock(Step step) => step.Process.MostStockAt(MetalWindow.Size(step.Window.Most)).Picometres;
+    private static long MostStock(Step step) => step.Process.MostStockAt(MetalWindow.Size(step.Reach.Most)).Picometres;
 
     /// <summary>
     /// A hone or lap as the last step, held so far inside the drawing's window that it never takes more than it can: it does not open a bore right
@@ -571,7 +575,7 @@ internal sealed class RouteSearch
             Machine = machine,
             Tool = tool,
             Leaving = leaving,
-            LeastHeld = leaving.Least,
+            Reach = leaving,
             Next = step,
             NextEntering = entering,
             NextArrives = arrives,

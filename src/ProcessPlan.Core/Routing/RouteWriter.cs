@@ -212,13 +212,13 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
                 yield return new Reason("stock", line);
             }
 
-            if (step.LeastHeld > step.Window.Least)
+            if (step.Reach != step.Window)
             {
                 string how = step.Tool is { } sized ? $"as {sized.Label} is predicted to cut" : $"where it holds {step.Candidate!.HeldWidth(step.Effort).Format()} µm from the near limit";
-                yield return new Reason("stock", $"at most {new Stock(from.Most - step.LeastHeld)} {how}");
+                yield return new Reason("stock", $"{new Stock(from.Least - step.Reach.Most)} to {new Stock(from.Most - step.Reach.Least)} {how}");
             }
 
-            yield return new Reason("stock", $"{process.Name} takes at most {process.MostStockAt(MetalWindow.Size(step.Window.Most))} here [{process.Origin}]");
+            yield return new Reason("stock", $"{process.Name} takes at most {process.MostStockAt(MetalWindow.Size(step.Reach.Most))} here [{process.Origin}]");
         }
 
         yield return new Reason("grade", $"{process.Name}: routine {process.RoutineGrade}, special {process.SpecialGrade?.ToString() ?? "none"}; leaves {process.LeftRa} on the way [{process.Origin}]");

@@ -23,10 +23,10 @@ internal sealed record Step
     public MetalWindow? Leaving { get; init; }
 
     /// <summary>
-    /// Least metal that the step must be able to leave: the window's own end for a step on the way; for the last one only what its process or tool
-    /// needs of the drawing's window, so that a wider tolerance asks for nothing more.
+    /// Where the cut really ends: the window itself for a step on the way; for the last one only what its tool is predicted to cut of the drawing's
+    /// window, or what its process holds from the near limit, so that a wider tolerance asks for nothing more.
     /// </summary>
-    public long LeastHeld { get; init; }
+    public MetalWindow Reach { get; init; }
 
     /// <summary>Whether the last step is held to less than the drawing allows, because it takes so little.</summary>
     public bool IsHeldInside { get; init; }
