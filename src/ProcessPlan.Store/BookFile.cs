@@ -1,4 +1,6 @@
+using System.Globalization;
 using LiteDB;
+using LiteDB.Engine;
 using Microsoft.Win32.SafeHandles;
 
 namespace ProcessPlan.Store;
@@ -19,6 +21,7 @@ internal sealed class BookFile
     private const int VersionAt = 59;
     private const byte FileVersion = 8;
     private const int HeadBytes = VersionAt + 1;
+    private const int Invariant = 127;
 
     /// <summary>Any longer, and the user would rather be told.</summary>
     private static readonly TimeSpan Patience = TimeSpan.FromSeconds(3);
@@ -82,7 +85,7 @@ internal sealed class BookFile
         });
     }
 
-    /// <summary>Creates the book with its first content: beside it, to the end, and then under its name.</summary>
+    /// <summary>Creates the book with its first content, which is read back before the file takes its name.</summary>
     public T Create<T>(Action<LiteDatabase> fill, Func<LiteDatabase, T> read)
     {
         string folder = System.IO.Path.GetDirectoryName(Path)!;
@@ -95,18 +98,13 @@ internal sealed class BookFile
         {
             using FileStream held = BookLock.Take(Path, _patience);
             RefuseTaken();
-            BookFile fresh = new(Beside("-new"));
-            File.Delete(fresh.Path);
-            File.Delete(fresh.Log);
-            using (LiteDatabase book = Open(fresh.Path))
+            MemoryStream data = new();
+            using (LiteDatabase book = OpenNew(data))
             {
-                Commit(book, fill, fresh.Log);
+                fill(book);
             }
 
-            (MemoryStream data, MemoryStream log) = fresh.Copy();
-            T result = OpenCopy(data, log, read);
-            File.Move(fresh.Path, Path, overwrite: false);
-            return result;
+            return WriteWhole(data, Path, overwrite: false, written => OpenCopy(written, new MemoryStream(), read));
         });
     }
 
@@ -141,24 +139,38 @@ internal sealed class BookFile
 
         // Closing the copy takes the log into the data, which then is the whole book in one file.
         OpenCopy(data, log, _ => true);
-        string part = target.Path + ".part";
-        using (FileStream file = File.Create(part))
-        {
-            data.WriteTo(file);
-            file.Flush(flushToDisk: true);
-        }
-
-        OpenCopy(Bytes(part), new MemoryStream(), copy =>
+        WriteWhole(data, target.Path, overwrite: true, written => OpenCopy(written, new MemoryStream(), copy =>
         {
             check(copy);
             return true;
-        });
-        File.Move(part, target.Path, overwrite: true);
+        }));
     }
 
     /// <summary>A file of the same folder and ending, whose name says what it is.</summary>
     public string Beside(string suffix) => System.IO.Path.Combine(
         System.IO.Path.GetDirectoryName(Path)!, System.IO.Path.GetFileNameWithoutExtension(Path) + suffix + System.IO.Path.GetExtension(Path));
+
+    /// <summary>Writes a file beside its place, reads it back, and only then gives it its name.</summary>
+    private static T WriteWhole<T>(MemoryStream data, string path, bool overwrite, Func<MemoryStream, T> check)
+    {
+        string part = path + ".part";
+        try
+        {
+            using (FileStream file = File.Create(part))
+            {
+                data.WriteTo(file);
+                file.Flush(flushToDisk: true);
+            }
+
+            T result = check(Bytes(part));
+            File.Move(part, path, overwrite);
+            return result;
+        }
+        finally
+        {
+            File.Delete(part);
+        }
+    }
 
     private static void Commit(LiteDatabase book, Action<LiteDatabase> change, string log)
     {
@@ -183,11 +195,11 @@ internal sealed class BookFile
     }
 
 #pragma warning disable RS0030 // This is the guard that the ban points to.
-    private static LiteDatabase Open(string path) => new(
-        new ConnectionString { Filename = path, Connection = ConnectionType.Direct, Collation = new Collation(127, System.Globalization.CompareOptions.Ordinal) }, Exact())
-    {
-        UtcDate = true,
-    };
+    private static LiteDatabase Open(string path) => new(new ConnectionString { Filename = path, Connection = ConnectionType.Direct }, Exact());
+
+    /// <summary>What is set here stays in the file: names are compared letter by letter on every machine, and instants are UTC.</summary>
+    private static LiteDatabase OpenNew(MemoryStream data) =>
+        new(new LiteEngine(new EngineSettings { DataStream = data, Collation = new Collation(Invariant, CompareOptions.Ordinal) }), Exact()) { UtcDate = true };
 
     private static LiteDatabase Open(MemoryStream data, MemoryStream log) => new(data, Exact(), log);
 #pragma warning restore RS0030

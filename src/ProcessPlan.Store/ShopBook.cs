@@ -11,10 +11,6 @@ namespace ProcessPlan.Store;
 /// </summary>
 public sealed class ShopBook
 {
-    private const string Head = "shop";
-    private const string History = "versions";
-    private const string Retired = "retired";
-
     private readonly BookFile _file;
     private readonly TimeProvider _clock;
 
@@ -35,39 +31,14 @@ public sealed class ShopBook
     public string Path => _file.Path;
 
     /// <summary>Makes the file, from a shop.</summary>
+    /// <param name="shop">What stands in the book first.</param>
+    /// <param name="name">What the shop is called from now on; its old name where nothing is said.</param>
     /// <exception cref="ShopBookException">There is a file of this name, or it cannot be written.</exception>
-    public ShopEdition Create(ShopFloor shop) => _file.Create(
-        book =>
-        {
-            ShopEdition edition = ShopEdition.Of(shop);
-            long last = 0;
-            foreach (BookTable table in BookTables.All)
-            {
-                IReadOnlyList<BsonDocument> rows = table.Documents(edition);
-                book.GetCollection(table.Name).InsertBulk(rows);
-                last = Math.Max(last, rows.Count);
-            }
-
-            book.GetCollection(Head).Insert(new BsonDocument
-            {
-                [BookTable.Id] = 1L,
-                ["schema"] = Schema.Current,
-                ["name"] = shop.Name,
-                ["currency"] = shop.Currency,
-                ["revision"] = 1L,
-                ["lastRow"] = last,
-                ["lastVersion"] = 0L,
-            });
-        },
-        Edition);
+    public ShopEdition Create(ShopFloor shop, string? name = null) => _file.Create(book => BookContent.Fill(book, shop, name ?? shop.Name), Whole);
 
     /// <summary>The shop as the book has it now.</summary>
     /// <exception cref="ShopBookException">There is no such book, it is damaged, or it is held by another program.</exception>
-    public ShopEdition Read() => _file.Read(book =>
-    {
-        Schema.RefuseNewer(HeadOf(book));
-        return Edition(book);
-    });
+    public ShopEdition Read() => _file.Read(Whole);
 
     /// <summary>Makes all changes or none; when it returns they are on the disk.</summary>
     /// <param name="revision">The revision of the edition that the changes were made from.</param>
@@ -78,11 +49,11 @@ public sealed class ShopBook
     {
         ArgumentOutOfRangeException.ThrowIfZero(changes.Count, nameof(changes));
         string today = DateOnly.FromDateTime(_clock.GetLocalNow().DateTime).ToString("O", CultureInfo.InvariantCulture);
-        return Change(revision, (book, head) =>
+        return Change(revision, content =>
         {
             foreach (RowChange change in changes)
             {
-                Make(book, head, change, today);
+                content.Make(change, today);
             }
         });
     }
@@ -91,94 +62,43 @@ public sealed class ShopBook
     /// <param name="revision">The revision of the edition that the user saw.</param>
     /// <exception cref="BookChangedException">Another program wrote in between.</exception>
     /// <exception cref="ShopBookException">There is no change to take back, or the book cannot be written.</exception>
-    public ShopEdition Undo(long revision) => Change(revision, (book, _) =>
+    public ShopEdition Undo(long revision) => Change(revision, content =>
     {
-        ILiteCollection<BsonDocument> history = book.GetCollection(History);
-        BsonDocument? last = history.Find(Query.All(BookTable.Id, Query.Descending), limit: 1).FirstOrDefault();
-        if (last is null)
+        if (!content.TakeBack())
         {
             throw new ShopBookException($"{Path} has no change to take back.");
-        }
-
-        // Each change wrote its versions one behind the other: from the last one back to the one that has another revision.
-        for (BsonDocument? version = last; version is not null && version["revision"] == last["revision"]; version = history.FindById(version[BookTable.Id].AsInt64 - 1))
-        {
-            ILiteCollection<BsonDocument> rows = book.GetCollection(version["table"].AsString);
-            if (version["before"].IsNull)
-            {
-                rows.Delete(version["row"]);
-            }
-            else
-            {
-                rows.Update(version["before"].AsDocument);
-            }
-
-            history.Delete(version[BookTable.Id]);
         }
     });
 
     /// <summary>Copies the book to another file, which may be an older backup.</summary>
     /// <exception cref="ShopBookException">The book cannot be read, or the backup not be written.</exception>
-    public void Backup(string target) => _file.Backup(target, static book => Edition(book));
+    public void Backup(string target) => _file.Backup(target, static copy => Whole(copy));
 
-    private ShopEdition Change(long revision, Action<LiteDatabase, BsonDocument> change) => _file.Change(
+    private ShopEdition Change(long revision, Action<BookContent> change) => _file.Change(
         book =>
         {
-            BsonDocument head = HeadOf(book);
-            Schema.RefuseNewer(head);
-            if (head["revision"] != revision)
+            BookContent content = BookContent.Open(book);
+            if (content.Revision != revision)
             {
-                throw new BookChangedException(Path, revision, head["revision"].AsInt64);
+                throw new BookChangedException(Path, revision, content.Revision);
             }
 
-            head["revision"] = revision + 1;
-            change(book, head);
-            book.GetCollection(Head).Update(head);
+            content.Begin();
+            change(content);
+            content.End();
         },
-        Edition);
+        Whole,
+        BackUpBeforeUpgrade);
 
-    private static void Make(LiteDatabase book, BsonDocument head, RowChange change, string today)
+    private void BackUpBeforeUpgrade(LiteDatabase book)
     {
-        ILiteCollection<BsonDocument> rows = book.GetCollection(change.Table.Name);
-        BsonDocument? before = change.Id is { } id ? rows.FindById(id) : null;
-        if (change.Id is { } missing && (before is null || before.ContainsKey(Retired)))
+        int schema = BookContent.SchemaOf(book);
+        if (schema < BookContent.CurrentSchema)
         {
-            throw new ShopBookException($"There is no row {missing} in {change.Table.Name}.");
+            _file.WriteBackup(new BookFile(_file.Beside($"-schema{schema}-backup")), static copy => Whole(copy));
         }
-
-        long row = change.Id ?? head["lastRow"].AsInt64 + 1;
-        head["lastRow"] = Math.Max(row, head["lastRow"].AsInt64);
-        head["lastVersion"] = head["lastVersion"].AsInt64 + 1;
-        book.GetCollection(History).Insert(new BsonDocument
-        {
-            [BookTable.Id] = head["lastVersion"],
-            ["revision"] = head["revision"],
-            ["table"] = change.Table.Name,
-            ["row"] = row,
-            ["before"] = before is null ? BsonValue.Null : before,
-        });
-
-        BsonDocument after = new(change.Row ?? before!) { [BookTable.Id] = row };
-        if (change.Row is null)
-        {
-            after[Retired] = today;
-        }
-
-        rows.Upsert(after);
     }
 
-    private static BsonDocument HeadOf(LiteDatabase book) =>
-        book.GetCollection(Head).FindById(1L) ?? throw new ShopBookException("This is a LiteDB file of another program, not a shop book; it was left as it is.");
-
-    private static ShopEdition Edition(LiteDatabase book)
-    {
-        BsonDocument head = HeadOf(book);
-        Dictionary<BookTable, object> rows = [];
-        foreach (BookTable table in BookTables.All)
-        {
-            rows[table] = table.Read(book.GetCollection(table.Name).FindAll().Where(static row => !row.ContainsKey(Retired)));
-        }
-
-        return new ShopEdition(head["name"].AsString, head["currency"].AsString, head["revision"].AsInt64, rows);
-    }
+    /// <summary>Always of a copy in memory, which an older book may be upgraded in.</summary>
+    private static ShopEdition Whole(LiteDatabase copy) => BookContent.Open(copy).Edition();
 }

@@ -25,6 +25,18 @@ public class ShopBookTests
     }
 
     [Fact]
+    public void Names_are_compared_letter_by_letter_whatever_language_the_machine_speaks()
+    {
+        using Folder folder = new();
+        folder.HandbookBook();
+
+        new BookFile(folder.Book).Read(static file => (file.Collation.SortOptions, file.Collation.Culture, file.UtcDate))
+            .Should().Be((System.Globalization.CompareOptions.Ordinal, System.Globalization.CultureInfo.InvariantCulture, true));
+        Machine lathe = HandbookShop.Load().Machines.Single(static machine => machine.Name == "lathe");
+        new ShopBook(folder.Book, TimeProvider.System).Save(1, BookTables.Machines.Add(lathe with { Name = "Lathe" })).Floor.Machines[^1].Name.Should().Be("Lathe");
+    }
+
+    [Fact]
     public void What_is_added_stands_in_the_book_to_the_last_blank_and_picometre()
     {
         using Folder folder = new();
@@ -189,7 +201,56 @@ public class ShopBookTests
         book.Invoking(static it => it.Backup(it.Path)).Should().Throw<ShopBookException>().WithMessage($"{book.Path} cannot be its own backup.");
     }
 
-    private static void AssertSame(ShopFloor floor, ShopFloor expected)
+    [Fact]
+    public void A_book_of_the_first_schema_is_read_as_it_stands_and_upgraded_by_the_first_change()
+    {
+        using Folder folder = new();
+        File.Copy(Path.Combine(AppContext.BaseDirectory, "Books", "schema1.db"), folder.Book);
+        byte[] old = File.ReadAllBytes(folder.Book);
+        ShopBook book = new(folder.Book, TimeProvider.System);
+
+        ShopEdition read = book.Read();
+        File.ReadAllBytes(folder.Book).Should().Equal(old);
+        read.Revision.Should().Be(3);
+        read.Floor.Currency.Should().Be("CHF");
+        read.Rows(BookTables.Tools).Should().HaveCount(6);
+        read.Rows(BookTables.Tools)[5].Value.Name.Should().Be(" worn \t reamer");
+        read.Rows(BookTables.Machines)[2].Value.RatePerHour.Should().Be(61.50m);
+        read.Rows(BookTables.Suppliers).Should().HaveCount(3);
+
+        book.Save(3, BookTables.Tools.Retire(1)).Rows(BookTables.Tools).Should().HaveCount(5);
+        ShopBook backup = new(folder["shop-schema1-backup.db"], TimeProvider.System);
+        File.ReadAllBytes(backup.Path).Should().Equal(old);
+        AssertSame(backup.Read().Floor, read.Floor, ToolUse.Ream);
+
+        // What was changed before the upgrade can still be taken back.
+        book.Undo(4);
+        book.Undo(5).Rows(BookTables.Tools).Should().HaveCount(5);
+        book.Undo(6).Rows(BookTables.Suppliers).Should().HaveCount(4);
+    }
+
+    [Fact]
+    public void A_book_of_a_schema_to_come_is_left_alone()
+    {
+        using Folder folder = new();
+        ShopBook book = folder.HandbookBook();
+        new BookFile(folder.Book).Change(
+            static file =>
+            {
+                LiteDB.BsonDocument head = file.GetCollection("shop").FindById(1L);
+                head["schema"] = 99;
+                file.GetCollection("shop").Update(head);
+            },
+            static _ => true);
+        byte[] before = File.ReadAllBytes(folder.Book);
+
+        book.Invoking(static it => it.Read()).Should().Throw<ShopBookException>()
+            .WithMessage($"This shop book was written by a newer version of this program (schema 99; this one knows {BookContent.CurrentSchema}).");
+        book.Invoking(static it => it.Undo(1)).Should().Throw<ShopBookException>();
+        File.ReadAllBytes(folder.Book).Should().Equal(before);
+    }
+
+    private static void AssertSame(ShopFloor floor, ShopFloor expected, params ToolUse[] uses)
     {
         floor.Name.Should().Be(expected.Name);
         floor.Currency.Should().Be(expected.Currency);
@@ -197,7 +258,7 @@ public class ShopBookTests
         floor.Materials.Should().Equal(expected.Materials);
         floor.Bars.Should().Equal(expected.Bars);
         floor.Suppliers.Should().Equal(expected.Suppliers);
-        foreach (ToolUse use in Enum.GetValues<ToolUse>())
+        foreach (ToolUse use in uses.Length > 0 ? uses : Enum.GetValues<ToolUse>())
         {
             floor.Tools(use).Should().Equal(expected.Tools(use)).And.NotBeEmpty();
         }

@@ -1,4 +1,3 @@
-using System.Text.Json;
 using LiteDB;
 
 namespace ProcessPlan.Store.Tables;
@@ -9,13 +8,15 @@ public abstract class BookTable
     /// <summary>Column that tells rows apart, whatever else changes in them.</summary>
     internal const string Id = "_id";
 
-    private protected BookTable(string name, string one, IReadOnlyList<Column> columns, IReadOnlyList<string> key, bool isKeyUnique)
+    private protected BookTable(
+        string name, string one, IReadOnlyList<Column> columns, IReadOnlyList<string> key, bool isKeyUnique, IReadOnlyList<string> shown)
     {
         Name = name;
         One = one;
         Columns = columns;
         Key = key;
         IsKeyUnique = isKeyUnique;
+        Shown = shown;
     }
 
     /// <summary>As commands and files call it, such as tools.</summary>
@@ -32,6 +33,9 @@ public abstract class BookTable
     /// <summary>Whether no two rows may have the same key.</summary>
     internal bool IsKeyUnique { get; }
 
+    /// <summary>Columns that fit on a line of text.</summary>
+    internal IReadOnlyList<string> Shown { get; }
+
     /// <summary>A row that leaves the shop; the book keeps it with the date.</summary>
     public RowChange Retire(long id) => new(this, id, null);
 
@@ -43,19 +47,10 @@ public abstract class BookTable
 
     internal abstract IReadOnlyList<BsonDocument> Documents(ShopEdition edition);
 
+    /// <summary>How many rows of it an edition has.</summary>
+    public abstract int CountIn(ShopEdition edition);
+
     internal abstract object Read(IEnumerable<BsonDocument> rows);
-
-    internal void WriteJson(Utf8JsonWriter json, BsonDocument row)
-    {
-        json.WriteStartObject();
-        json.WriteNumber("id", row[Id].AsInt64);
-        foreach (Column column in Columns)
-        {
-            column.WriteJson(json, row);
-        }
-
-        json.WriteEndObject();
-    }
 }
 
 /// <summary>One table of the shop book with the type of its rows.</summary>
@@ -72,8 +67,10 @@ public sealed class BookTable<T> : BookTable
     /// <param name="complaint">What is wrong between the cells of a row whose cells are each right.</param>
     /// <param name="key">Columns by which a person tells the rows apart.</param>
     /// <param name="isKeyUnique">Whether no two rows may have the same key.</param>
-    internal BookTable(string name, string one, Column<T>[] columns, Func<RowCells, T> read, Func<RowCells, string?> complaint, string[] key, bool isKeyUnique)
-        : base(name, one, [.. columns.Select(static column => new Column(column.Name, column.Kind))], key, isKeyUnique)
+    /// <param name="shown">Columns that fit on a line of text.</param>
+    internal BookTable(
+        string name, string one, Column<T>[] columns, Func<RowCells, T> read, Func<RowCells, string?> complaint, string[] key, bool isKeyUnique, string[] shown)
+        : base(name, one, [.. columns.Select(static column => new Column(column.Name, column.Kind))], key, isKeyUnique, shown)
     {
         _columns = columns;
         _read = read;
@@ -100,6 +97,8 @@ public sealed class BookTable<T> : BookTable
 
         return _complaint(new RowCells(row));
     }
+
+    public override int CountIn(ShopEdition edition) => edition.Rows(this).Count;
 
     internal override IReadOnlyList<BsonDocument> Documents(ShopEdition edition) => [.. edition.Rows(this).Select(row =>
     {

@@ -36,7 +36,8 @@ public static class BookTables
         static row => row.Size("smallest") > row.Size("largest") ? $"smallest {row.Size("smallest")} is above largest {row.Size("largest")}"
             : row.Number("powerKw") <= 0 ? "powerKw is not above 0" : null,
         key: ["name"],
-        isKeyUnique: true);
+        isKeyUnique: true,
+        shown: ["name", "abilities", "ratePerHour", "largest"]);
 
     /// <summary>Two tools may be alike in everything: the crib can hold several.</summary>
     public static BookTable<Tool> Tools { get; } = new(
@@ -59,7 +60,8 @@ public static class BookTables
             : row.Size("stamped") <= Length.Zero || row.Size("stamped") > LargestTool ? $"stamped {row.Size("stamped")} is not above 0 and up to {LargestTool}"
             : row.Number("lifeMetres") <= 0 ? "lifeMetres is not above 0" : null,
         key: ["name", "use", "stamped", "made", "material"],
-        isKeyUnique: false);
+        isKeyUnique: false,
+        shown: ["name", "use", "stamped", "ownMin", "ownMax", "made", "price"]);
 
     public static BookTable<Material> Materials { get; } = new(
         "materials",
@@ -83,7 +85,8 @@ public static class BookTables
             new Citation(row.Text("source"), row.Text("place"), Meaning(Standings, row.Text("standing")))),
         static row => row.NumberOrNothing("hbFrom") > row.NumberOrNothing("hbTo") ? "hbFrom is above hbTo" : null,
         key: ["designation"],
-        isKeyUnique: true);
+        isKeyUnique: true,
+        shown: ["designation", "group", "hbFrom", "hbTo", "condition"]);
 
     public static BookTable<BarSeries> Bars { get; } = new(
         "bars",
@@ -101,7 +104,8 @@ public static class BookTables
             new Citation(row.Text("source"), row.Text("place"), Meaning(Standings, row.Text("standing")))),
         static row => BarComplaint(row.Size("over"), row.Size("upTo"), row.Size("deviation"), row.Sizes("sizes")),
         key: ["over"],
-        isKeyUnique: true);
+        isKeyUnique: true,
+        shown: ["over", "upTo", "sizes", "deviation"]);
 
     public static BookTable<Supplier> Suppliers { get; } = new(
         "suppliers",
@@ -115,7 +119,8 @@ public static class BookTables
         static row => new Supplier(row.Text("process"), row.Amount("lotCharge"), row.Amount("piecePrice"), row.Count("days")),
         static _ => null,
         key: ["process"],
-        isKeyUnique: true);
+        isKeyUnique: true,
+        shown: ["process", "lotCharge", "piecePrice", "days"]);
 
     public static IReadOnlyList<BookTable> All { get; } = [Machines, Tools, Materials, Bars, Suppliers];
 

@@ -27,6 +27,9 @@ internal abstract class CellKind(string expected)
     /// <summary>Whether the text is free, so that a spreadsheet could take it for a formula.</summary>
     public virtual bool IsFreeText => false;
 
+    /// <summary>Whether its texts stand under each other by their ends.</summary>
+    public virtual bool IsNumber => true;
+
     /// <summary>Whether the value may stand in the book.</summary>
     public abstract bool Holds(BsonValue value);
 
@@ -42,6 +45,8 @@ internal abstract class CellKind(string expected)
 
     private class TextCell(string expected, int most, bool mayBeEmpty) : CellKind(expected)
     {
+        public override bool IsNumber => false;
+
         public override bool IsFreeText => true;
 
         public override bool Holds(BsonValue value) => value.IsString && value.AsString is var text && text.Length <= most && IsWellFormed(text)
@@ -70,6 +75,8 @@ internal abstract class CellKind(string expected)
         private const char Between = ';';
         private const int Longest = 40;
         private const int Most = 50;
+
+        public override bool IsNumber => false;
 
         public override bool IsFreeText => true;
 
@@ -108,6 +115,8 @@ internal abstract class CellKind(string expected)
     private sealed class SizesCell() : CellKind($"sizes in mm parted by '{Between}', such as 10{Between}12{Between}13.5")
     {
         private const char Between = ';';
+
+        public override bool IsNumber => false;
 
         public override bool Holds(BsonValue value) => value.IsArray && value.AsArray.All(IsSize);
 
@@ -211,6 +220,8 @@ internal abstract class CellKind(string expected)
 
     private sealed class YesOrNoCell() : CellKind("yes or no")
     {
+        public override bool IsNumber => false;
+
         public override bool Holds(BsonValue value) => value.IsBoolean;
 
         public override string Format(BsonValue value) => value.AsBoolean ? "yes" : "no";
