@@ -20,7 +20,7 @@ internal static class CommandLine
         ParseResult parsed = root.Parse(args, Reading);
         if (parsed.Errors.Count > 0)
         {
-            throw new UsageException(Sentence(root, parsed));
+            throw new UsageException(Sentence(parsed));
         }
 
         if (parsed.Action is HelpAction help)
@@ -38,7 +38,7 @@ internal static class CommandLine
         });
     }
 
-    private static string Sentence(RootCommand root, ParseResult parsed) => parsed.UnmatchedTokens is [string first, ..]
-        ? $"'{first}' is no command; expected {string.Join(", ", root.Subcommands.Select(static command => command.Name))} or --help."
+    private static string Sentence(ParseResult parsed) => parsed.UnmatchedTokens is [string first, ..]
+        ? $"'{first}' is no command; expected {string.Join(", ", parsed.CommandResult.Command.Subcommands.Select(static command => command.Name))} or --help."
         : parsed.Errors[0].Message;
 }

@@ -1,6 +1,4 @@
 using System.CommandLine;
-using ProcessPlan.Core.Features;
-using ProcessPlan.Core.Shop;
 using ProcessPlan.Documents;
 
 namespace ProcessPlan;
@@ -12,11 +10,13 @@ internal static class LimitsCommand
     {
         FeatureQuestion question = new();
         Command limits = new("limits", "Says the limits of size of a feature, or of the two features of a fit");
+        ShopChoice choice = new();
         question.AddTo(limits);
+        limits.Options.Add(choice.Shop);
         limits.SetAction(parsed => question.Answer(
             parsed,
             streams,
-            Materials,
+            () => choice.Materials(parsed),
             static (json, request) =>
             {
                 LimitsJson.Write(json, request);
@@ -28,15 +28,5 @@ internal static class LimitsCommand
                 return ExitCode.Done;
             }));
         return limits;
-    }
-
-    private static MaterialNames Materials() => new(Named());
-
-    private static IEnumerable<(string Designation, IReadOnlyList<string> Aliases)> Named()
-    {
-        foreach (Material material in HandbookShop.Materials())
-        {
-            yield return (material.Designation, material.Aliases);
-        }
     }
 }

@@ -34,10 +34,12 @@ internal static class PlanCommand
             CustomParser = ReadWhy,
         };
         Command plan = new("plan", "Plans the route of a feature: operations, sizes, stock, tools, time and cost") { alternatives, why };
+        ShopChoice choice = new();
         question.AddTo(plan);
+        plan.Options.Add(choice.Shop);
         plan.SetAction(parsed =>
         {
-            ShopFloor shop = HandbookShop.Load();
+            ShopFloor shop = choice.Floor(parsed);
             int routes = parsed.GetValue(alternatives) + 1;
             WhyAsked? asked = parsed.GetResult(why) is null ? null : parsed.GetValue(why) ?? new WhyAsked(null, null);
             return question.Answer(

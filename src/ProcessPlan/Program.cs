@@ -10,6 +10,7 @@ internal static class Program
     [
         ("limits", LimitsCommand.Create),
         ("plan", PlanCommand.Create),
+        ("shop", ShopCommand.Create),
     ];
 
     public static int Main(string[] args)

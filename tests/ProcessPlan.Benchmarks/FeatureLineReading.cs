@@ -12,7 +12,7 @@ public class FeatureLineReading
     private MaterialNames _materials = MaterialNames.None;
 
     [GlobalSetup]
-    public void ReadMaterials() => _materials = new MaterialNames(HandbookShop.Materials().Select(static material => (material.Designation, material.Aliases)));
+    public void ReadMaterials() => _materials = ShopFloor.NamesOf(HandbookShop.Materials());
 
     [Benchmark(Baseline = true)]
     public Parsed<FeatureRequest> Easy() => FeatureLine.Parse("25H7", _materials);

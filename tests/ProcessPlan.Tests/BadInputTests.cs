@@ -70,12 +70,12 @@ public class BadInputTests
     }
 
     [Theory]
-    [InlineData("'lmits' is no command; expected limits, plan or --help.", "lmits", "25H7")]
+    [InlineData("'lmits' is no command; expected limits, plan, shop or --help.", "lmits", "25H7")]
     [InlineData("limits found no feature; expected one such as 25H7, or - for standard input.", "limits")]
     [InlineData("limits found no feature; expected one such as 25H7, or - for standard input.", "limits", "--json")]
     [InlineData("--unit found 'cm'; expected mm or in.", "limits", "25H7", "--unit", "cm")]
     [InlineData("--unit found nothing; expected mm or in.", "limits", "25H7", "--unit")]
-    [InlineData("'--jsn' is no option of limits; expected --json, --unit, --ascii.", "limits", "25H7", "--jsn")]
+    [InlineData("'--jsn' is no option of limits; expected --json, --unit, --ascii, --shop.", "limits", "25H7", "--jsn")]
     public void A_call_that_is_not_understood_is_answered_in_one_sentence(string sentence, params string[] words)
     {
         Answer.To(words).Should().Be(new Answer(2, "", $"processplan: {sentence}\n"));

@@ -26,7 +26,7 @@ public sealed class Job
     public Job(Feature feature, ShopFloor shop)
     {
         Feature = feature;
-        Material = shop.Material(feature.Material ?? HandbookShop.DefaultMaterial);
+        Material = feature.Material is { } named ? shop.Material(named) : shop.UsualMaterial;
         Assume(feature.Material is null, $"material {Material.Designation}, {Material.Condition}");
         Quantity = feature.Quantity ?? 1;
         Assume(feature.Quantity is null, "1 piece");
