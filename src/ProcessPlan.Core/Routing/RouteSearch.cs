@@ -207,7 +207,7 @@ internal sealed class RouteSearch
         SizeWindow sizes = window.Sizes(_job.IsInternal);
         if (use == ToolUse.Ream)
         {
-            return [.. ReamerChoice.Best(_shop.ToolsNear(use, sizes), sizes, _job.Feature.Class, tool => Yield(candidate, tool, effort, window, window))];
+            return [.. ReamerChoice.Best(_shop.ToolsNear(use, sizes), sizes, _job.Nominal, _job.Feature.Class, tool => Yield(candidate, tool, effort, window, window))];
         }
 
         List<Tool?> fitting = [];

@@ -31,7 +31,7 @@ internal readonly record struct StepCost(Cut Cut, CutTime Cutting, double Checki
         Cut cut = new(
             process,
             data,
-            step.Tool?.Stamped ?? MetalWindow.Size(job.IsInternal ? step.Reach.Least : entering?.Most ?? window.Most),
+            step.Tool?.Stamped ?? Diameter(process, entering, job),
             job.Extent,
             entering is { } from ? new Stock(from.Most - step.Reach.Least) : null,
             step.IsLast ? process.Ra(step.Effort) : process.LeftRa,
@@ -41,6 +41,12 @@ internal readonly record struct StepCost(Cut Cut, CutTime Cutting, double Checki
         return new StepCost(cut, CutTime.For(cut), instrument.MinutesPerCheck * Checks.PerPiece(process, step.Effort),
             arrives ? machine.HandlingMinutes : 0, machine, arrives ? machine.SetUpMinutes : 0);
     }
+
+    /// <summary>
+    /// Diameter for the speed: of a roughing cut outside the blank's, for the rest the feature's own, so that no time moves with the last hundredth.
+    /// </summary>
+    private static Length Diameter(Process process, MetalWindow? entering, Job job) =>
+        entering is { } from && process.StartsRough && !job.IsInternal ? MetalWindow.Size(from.Most) : job.Nominal;
 
     /// <summary>Cost of a good piece: run time over the yield to the end of the route, and its share of the set-up.</summary>
     public double PerGoodPiece(double yieldToEnd, int quantity) => Machine.RatePerMinute * (Minutes / yieldToEnd + SetUp / quantity);
