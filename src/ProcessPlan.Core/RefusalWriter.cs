@@ -29,13 +29,15 @@ internal static class RefusalWriter
         }
 
         string finishers = string.Join(", ", finishing.Select(static candidate => candidate.Process.Name));
-        string message = job.AsksForPosition && search.NearestMiss is null
+        string message = job.AsksForPosition && !candidates.Any(PutsTheAxisRight)
             ? $"{finishers} could finish it, but nothing before puts the axis right."
             : search.NearestMiss is { } miss
                 ? $"{finishers} could finish it, but the window between {miss.Before} and {miss.Process} is too narrow by {miss.ShortBy.Format()} µm at the nearest."
                 : $"{finishers} could finish it, but nothing of this shop can come before, or the tool of its size is missing.";
         return new Refusal(asked, message, Best(job, candidates), WouldOpen(job, shop, candidates));
     }
+
+    private static bool PutsTheAxisRight(Candidate candidate) => candidate.NoAtAll is null && !candidate.Process.Follows;
 
     private static string Asked(Job job)
     {
@@ -90,6 +92,11 @@ internal static class RefusalWriter
             {
                 open.Add($"{candidate.Process.Name} by another machine or an outside supplier ({candidate.NoAtAll})");
             }
+        }
+
+        if (job.AsksForPosition && !candidates.Any(PutsTheAxisRight))
+        {
+            open.Add("a machine that bores or grinds this size, or the position held by a jig or bush: ask the designer whether 0.05 mm or more serves");
         }
 
         open.Add("Ask the designer whether a wider tolerance or a coarser finish serves.");

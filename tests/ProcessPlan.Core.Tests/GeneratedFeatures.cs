@@ -15,8 +15,8 @@ internal static class GeneratedFeatures
 
     private static readonly Gen<string> Size = Gen.Frequency(
         (6, Gen.Int[1, 60].Select(size => $"{size}")),
-        (2, Gen.Int[61, 200].Select(size => $"{size}")),
-        (2, Gen.Int[10, 400].Select(tenths => $"{tenths / 10}.{tenths % 10}")));
+        (1, Gen.Int[61, 200].Select(size => $"{size}")),
+        (3, Gen.Int[10, 400].Select(tenths => $"{tenths / 10}.{tenths % 10}")));
 
     private static readonly Gen<string> HoleClass = Gen.Frequency(
         (5, OneOf("H6", "H7", "H8", "H9", "H10", "H11", "H12")),

@@ -30,7 +30,7 @@ public class PlanLawTests
     {
         List<string> faults = [];
         int planned = 0;
-        foreach ((string[] words, Feature feature) in GeneratedFeatures.Take(3000, start: 1))
+        foreach ((string[] words, Feature feature) in GeneratedFeatures.Take(1800, start: 1))
         {
             Plan plan = Planner.Plan(feature, Shop, routes: 2);
             foreach (string fault in Faults(plan, feature))
@@ -42,11 +42,11 @@ public class PlanLawTests
         }
 
         string.Join(Environment.NewLine, faults).Should().BeEmpty();
-        planned.Should().BeGreaterThan(1500, "else the laws are proven on refusals");
+        planned.Should().BeGreaterThan(900, "else the laws are proven on refusals");
     }
 
     [Fact]
-    public void Plan_AWiderTolerance_NeverCostsMoreAndNeverLosesTheRoute() => Compare(700, start: 2, static (feature, choice) =>
+    public void Plan_AWiderTolerance_NeverCostsMoreAndNeverLosesTheRoute() => Compare(300, start: 2, static (feature, choice) =>
     {
         // The limit that is cut last moves away: the hole may come out larger, the shaft smaller.
         Deviation more = new(feature.Limits.Width.Picometres * (1 + choice % 5) / 2);
@@ -59,28 +59,47 @@ public class PlanLawTests
         };
     });
 
+    // The far limit shifts every size before it, so the cost may move by the last stroke; the route must stay.
     [Fact]
-    public void Plan_ACoarserFinish_NeverCostsMoreAndNeverLosesTheRoute() => Compare(700, start: 3, static (feature, choice) => feature with
+    public void Plan_BothLimitsWider_NeverLosesTheRoute()
+    {
+        List<string> faults = [];
+        foreach ((string[] words, Feature feature) in GeneratedFeatures.Take(300, start: 12))
+        {
+            Deviation more = new(feature.Limits.Width.Picometres / 4);
+            Feature easy = feature with { Class = null, Limits = new SizeWindow(feature.Limits.Min - more, feature.Limits.Max + more) };
+            Plan plan = Planner.Plan(feature, Shop);
+            if (plan.Routes.Count > 0 && Planner.Plan(easy, Shop).Refusal is { } refusal)
+            {
+                faults.Add($"{string.Join(' ', words)}: {Chain(plan.Routes[0])}; with {easy.Limits} {refusal.Message}");
+            }
+        }
+
+        string.Join(Environment.NewLine, faults).Should().BeEmpty();
+    }
+
+    [Fact]
+    public void Plan_ACoarserFinish_NeverCostsMoreAndNeverLosesTheRoute() => Compare(300, start: 3, static (feature, choice) => feature with
     {
         Finish = feature.Finish is not { IsRa: true } finish || choice % 4 == 0 ? null : Roughness.Ra(finish.Nanometres * (2 + choice % 3)),
     });
 
     [Fact]
-    public void Plan_ALargerBatch_NeverCostsMoreAPieceAndNeverLosesTheRoute() => Compare(700, start: 4, static (feature, choice) => feature with
+    public void Plan_ALargerBatch_NeverCostsMoreAPieceAndNeverLosesTheRoute() => Compare(200, start: 4, static (feature, choice) => feature with
     {
         // Often right over the edge where the least stock is counted by the other method.
         Quantity = feature.Quantity <= StockNeed.SmallLot && choice % 2 == 0 ? StockNeed.SmallLot + 1 : feature.Quantity + 1 + choice * 7,
     }, static (feature, choice) => choice % 3 == 0 ? feature with { Quantity = StockNeed.SmallLot } : feature);
 
     [Fact]
-    public void Plan_AFurtherMachine_NeverCostsMoreAndNeverLosesTheRoute() => CompareShops(500, start: 5, static (random, shop) =>
+    public void Plan_AFurtherMachine_NeverCostsMoreAndNeverLosesTheRoute() => CompareShops(400, start: 5, static (random, shop) =>
     {
         Machine[] fewer = [.. shop.Machines.Where(_ => random.Next(0, 3) > 0)];
         return (With(shop, fewer, Tools(shop)), shop);
     });
 
     [Fact]
-    public void Plan_FurtherTools_NeverCostMoreAndNeverLoseTheRoute() => CompareShops(500, start: 6, static (random, shop) =>
+    public void Plan_FurtherTools_NeverCostMoreAndNeverLoseTheRoute() => CompareShops(400, start: 6, static (random, shop) =>
     {
         int share = random.Next(2, 8);
         Tool[] fewer = [.. Tools(shop).Where(_ => random.Next(0, 10) < share)];
@@ -93,7 +112,7 @@ public class PlanLawTests
     public void Plan_TheSameInputTwice_IsTheSameFieldByField()
     {
         ShopFloor again = HandbookShop.Load();
-        foreach ((_, Feature feature) in GeneratedFeatures.Take(150, start: 7))
+        foreach ((_, Feature feature) in GeneratedFeatures.Take(60, start: 7))
         {
             Text(Planner.Plan(feature, again, routes: 3)).Should().Be(Text(Planner.Plan(feature, Shop, routes: 3)));
         }
@@ -104,7 +123,7 @@ public class PlanLawTests
     {
         Random random = new(8);
         List<string> faults = [];
-        foreach ((string[] words, Feature feature) in GeneratedFeatures.Take(300, start: 8))
+        foreach ((string[] words, Feature feature) in GeneratedFeatures.Take(150, start: 8))
         {
             string[] other = [.. words];
             random.Shuffle(other);
@@ -126,28 +145,28 @@ public class PlanLawTests
         comma.NumberFormat.NumberGroupSeparator = ".";
         comma.NumberFormat.NegativeSign = "−";
         CultureInfo before = CultureInfo.CurrentCulture;
-        foreach ((string[] words, Feature feature) in GeneratedFeatures.Take(150, start: 9))
+        foreach ((string[] words, Feature feature) in GeneratedFeatures.Take(60, start: 9))
         {
             string expected = Text(Planner.Plan(feature, Shop, routes: 2));
-            string actual;
+            Plan planned;
             try
             {
                 CultureInfo.CurrentCulture = comma;
-                actual = Text(Planner.Plan(GeneratedFeatures.ReadAll(string.Join(' ', words)), Shop, routes: 2));
+                planned = Planner.Plan(GeneratedFeatures.ReadAll(string.Join(' ', words)), Shop, routes: 2);
             }
             finally
             {
                 CultureInfo.CurrentCulture = before;
             }
 
-            actual.Should().Be(expected);
+            Text(planned).Should().Be(expected);
         }
     }
 
     [Fact]
     public void Plan_MoreRoutesAsked_AreTheSameCheapestFirstAndTrulyDifferent()
     {
-        foreach ((string[] words, Feature feature) in GeneratedFeatures.Take(200, start: 10))
+        foreach ((string[] words, Feature feature) in GeneratedFeatures.Take(20, start: 10))
         {
             Plan one = Planner.Plan(feature, Shop);
             Plan many = Planner.Plan(feature, Shop, routes: 5);
@@ -430,6 +449,7 @@ public class PlanLawTests
     private static string Text(Plan plan) => JsonSerializer.Serialize(
         new { Routes = plan.Routes.Select(Text), plan.Refusal, plan.Rejected, plan.Queries, plan.Cautions, plan.Assumptions, plan.Expanded });
 
-    private static string Text(Route route) => $"{route with { Operations = [] }} " + string.Join('\n', route.Operations.Select(static operation =>
+    private static string Text(Route route) => string.Create(CultureInfo.InvariantCulture,
+        $"{route.Rank} {route.From} {route.CostPerPiece.Amount} {route.MinutesPerPiece.Value:R} {route.SetUp.Value:R} {route.Yield:R} {route.Blanks} ") + string.Join('\n', route.Operations.Select(static operation =>
         $"{operation with { Because = [], Cautions = [], Why = [] }} {string.Join('|', operation.Because.Concat(operation.Cautions))} {string.Join('|', operation.Why)}"));
 }

@@ -103,7 +103,7 @@ public sealed class Candidate
             }
         }
 
-        Candidate candidate = new(process, job, machines) { CutsSoft = Cuts(process, job.Hrc), CutsHard = Cuts(process, job.HrcAfterTreatment) };
+        Candidate candidate = new(process, job, machines) { CutsSoft = Cuts(process, job.Hrc), CutsHard = Cuts(process, job.HrcAfterTreatment ?? job.Hrc) };
         candidate.NoAtAll = OutAltogether(candidate, job) ?? (machines.Count == 0 ? noMachine ?? "no machine of this shop does it" : null);
         if (candidate.NoAtAll is null)
         {

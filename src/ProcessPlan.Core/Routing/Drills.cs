@@ -5,14 +5,12 @@ using ProcessPlan.Core.Tooling;
 
 namespace ProcessPlan.Core.Routing;
 
-/// <summary>A twist drill as it would open the hole of one job, with its pilot where it is too large for solid metal.</summary>
+/// <summary>A twist drill as it would open the hole of one job on one machine, with its pilot where it is too large for solid metal.</summary>
 /// <param name="Tool">The drill.</param>
 /// <param name="Leaving">What it leaves.</param>
-/// <param name="CutMinutes">Time under the tool.</param>
 /// <param name="Pilot">The drill before it, or null.</param>
-/// <param name="PilotMinutes">Time under the pilot.</param>
-/// <param name="Wear">Cost of the wear of both on one piece.</param>
-internal sealed record Drill(Tool Tool, MetalWindow Leaving, double CutMinutes, Tool? Pilot, double PilotMinutes, double Wear)
+/// <param name="Cost">Time under the tool and wear of both, and the change between them, of one piece.</param>
+internal sealed record Drill(Tool Tool, MetalWindow Leaving, Tool? Pilot, double Cost)
 {
     /// <summary>Whether it goes into solid metal, alone or after its pilot.</summary>
     public bool CanOpen => Pilot is not null || Tool.Stamped <= RouteSearch.LargestSingleDrill;
@@ -25,23 +23,25 @@ internal sealed class Drills(Job job, ShopFloor shop, CuttingData data)
     private const double LeastPilotShare = 0.5;
     private const double MostPilotShare = 0.625;
 
-    private readonly Dictionary<Tool, Drill> _known = new(ReferenceEqualityComparer.Instance);
+    private readonly Dictionary<(Tool, Machine), Drill> _known = [];
     private readonly Process? _drilling = ProcessCatalogue.Handbook.FirstOrDefault(static process => process.SizedBy == ToolUse.Drill);
 
-    public Drill Of(Tool tool)
+    /// <summary>The drill on one machine.</summary>
+    public Drill Of(Tool tool, Machine machine)
     {
-        if (!_known.TryGetValue(tool, out Drill? drill))
+        if (!_known.TryGetValue((tool, machine), out Drill? drill))
         {
-            Tool? pilot = tool.Stamped > RouteSearch.LargestSingleDrill ? PilotFor(tool) : null;
-            MetalWindow leaving = MetalWindow.Of(SizedCut.Predict(tool, job.Group, careful: false).Sizes, job.IsInternal);
-            (double minutes, double wear) = Work(tool);
-            (double pilotMinutes, double pilotWear) = pilot is null ? (0, 0) : Work(pilot);
-            drill = new Drill(tool, leaving, minutes, pilot, pilotMinutes, wear + pilotWear);
-            _known.Add(tool, drill);
+            Tool? pilot = tool.Stamped > RouteSearch.LargestSingleDrill ? PilotFor(tool, machine) : null;
+            double cost = CostOf(tool, machine) + (pilot is null ? 0 : CostOf(pilot, machine) + machine.RatePerMinute * machine.ToolChangeMinutes);
+            drill = new Drill(tool, Leaving(tool), pilot, cost);
+            _known.Add((tool, machine), drill);
         }
 
         return drill;
     }
+
+    /// <summary>What a drill leaves.</summary>
+    public MetalWindow Leaving(Tool tool) => MetalWindow.Of(SizedCut.Predict(tool, job.Group, careful: false).Sizes, job.IsInternal);
 
     /// <summary>The least that any drill of the shop costs under the tool, time and wear.</summary>
     public double LeastCost(Machine machine)
@@ -49,35 +49,35 @@ internal sealed class Drills(Job job, ShopFloor shop, CuttingData data)
         double least = double.PositiveInfinity;
         foreach (Tool tool in shop.Tools(ToolUse.Drill))
         {
-            (double minutes, double wear) = Work(tool);
-            least = Math.Min(least, machine.RatePerMinute * minutes + wear);
+            least = Math.Min(least, CostOf(tool, machine));
         }
 
         return least;
     }
 
-    private (double Minutes, double Wear) Work(Tool tool)
+    /// <summary>Time under the tool and wear, of one piece.</summary>
+    private double CostOf(Tool tool, Machine machine)
     {
         Cut cut = new(_drilling!, data, tool.Stamped, job.Extent, null, _drilling!.LeftRa, Effort.Routine);
         double minutes = CutTime.For(cut).Minutes;
-        return (minutes, ToolWear.Of(cut, tool, minutes));
+        return machine.RatePerMinute * minutes + ToolWear.Of(cut, tool, minutes);
     }
 
-    /// <summary>The quickest pilot within the handbook's share of the drill; null where the crib has none. What comes later does not matter to it.</summary>
-    private Tool? PilotFor(Tool drill)
+    /// <summary>The cheapest pilot within the handbook's share of the drill; null where the crib has none. What comes later does not matter to it.</summary>
+    private Tool? PilotFor(Tool drill, Machine machine)
     {
-        Tool? quickest = null;
+        Tool? cheapest = null;
         double least = double.PositiveInfinity;
         foreach (Tool tool in shop.Tools(ToolUse.Drill))
         {
             double share = tool.Stamped.Picometres / (double)drill.Stamped.Picometres;
             if (tool.Stamped <= RouteSearch.LargestSingleDrill && share is >= LeastPilotShare and <= MostPilotShare)
             {
-                double minutes = Work(tool).Minutes;
-                (quickest, least) = minutes < least ? (tool, minutes) : (quickest, least);
+                double cost = CostOf(tool, machine);
+                (cheapest, least) = cost < least ? (tool, cost) : (cheapest, least);
             }
         }
 
-        return quickest;
+        return cheapest;
     }
 }

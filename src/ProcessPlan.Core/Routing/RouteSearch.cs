@@ -217,7 +217,7 @@ internal sealed class RouteSearch
         SizeWindow sizes = window.Sizes(_job.IsInternal);
         if (use == ToolUse.Ream)
         {
-            return [.. ReamerChoice.Best(_shop.ToolsNear(use, sizes), sizes, _job.Feature.Class, tool => Yield(candidate, tool, effort, window, window))];
+            return [.. ReamerChoice.Best(_shop.ToolsNear(use, sizes), sizes, _job.Nominal, _job.Feature.Class, tool => Yield(candidate, tool, effort, window, window))];
         }
 
         List<Tool?> fitting = [];
@@ -287,7 +287,7 @@ internal sealed class RouteSearch
         switch (_job.Start.Kind)
         {
             case StartKind.Solid when _job.IsInternal:
-                if (step.Process.SizedBy == ToolUse.Drill && _drills.Of(step.Tool!) is { CanOpen: true } drill)
+                if (step.Process.SizedBy == ToolUse.Drill && _drills.Of(step.Tool!, step.Machine!) is { CanOpen: true } drill)
                 {
                     PushDrilled(step, drill);
                 }
@@ -475,7 +475,7 @@ internal sealed class RouteSearch
                 continue;
             }
 
-            Drill? drill = use == ToolUse.Drill ? _drills.Of(tool) : null;
+            Drill? drill = use == ToolUse.Drill ? _drills.Of(tool, machine) : null;
             MetalWindow leaving = drill?.Leaving ?? Cut(before, tool, Effort.Routine);
             if (!entering.Holds(leaving))
             {
@@ -498,8 +498,7 @@ internal sealed class RouteSearch
                     break;
                 }
 
-                double drilling = drill.CutMinutes + (drill.Pilot is null ? 0 : drill.PilotMinutes + machine.ToolChangeMinutes);
-                double cost = after + (drilling * machine.RatePerMinute + drill.Wear) / step.YieldToEnd;
+                double cost = after + drill.Cost / step.YieldToEnd;
                 cheapest = cheapest is null || cost < cheapest.Value.Cost ? (cost, drill) : cheapest;
             }
         }
@@ -524,7 +523,7 @@ internal sealed class RouteSearch
             return;
         }
 
-        Step first = drill.Pilot is { } pilot ? Before(step, step.Candidate!, step.Machine!, pilot, _drills.Of(pilot).Leaving, [], 0) : step;
+        Step first = drill.Pilot is { } pilot ? Before(step, step.Candidate!, step.Machine!, pilot, _drills.Leaving(pilot), [], 0) : step;
         Push(Blank(first, null, "solid metal"));
     }
 

@@ -30,7 +30,7 @@ internal readonly record struct StepCost(Cut Cut, CutTime Cutting, double Checki
         Cut cut = new(
             process,
             data,
-            step.Tool?.Stamped ?? MetalWindow.Size(job.IsInternal ? step.Reach.Least : entering?.Most ?? window.Most),
+            step.Tool?.Stamped ?? Diameter(process, entering, job),
             job.Extent,
             entering is { } from ? new Stock(from.Most - step.Reach.Least) : null,
             step.IsLast ? process.Ra(step.Effort) : process.LeftRa,
@@ -40,6 +40,12 @@ internal readonly record struct StepCost(Cut Cut, CutTime Cutting, double Checki
         return new StepCost(cut, time, step.Checking(job.IsInternal),
             arrives ? machine.HandlingMinutes : 0, machine, arrives ? machine.SetUpMinutes : 0, ToolWear.Of(cut, step.Tool, time.Minutes));
     }
+
+    /// <summary>
+    /// Diameter for the speed: of a roughing cut outside the blank's, for the rest the feature's own, so that no time moves with the last hundredth.
+    /// </summary>
+    private static Length Diameter(Process process, MetalWindow? entering, Job job) =>
+        entering is { } from && process.StartsRough && !job.IsInternal ? MetalWindow.Size(from.Most) : job.Nominal;
 
     /// <summary>Cost of a good piece: run time and wear over the yield to the end of the route, and its share of the set-up.</summary>
     public double PerGoodPiece(double yieldToEnd, int quantity) => (Machine.RatePerMinute * Minutes + Wear) / yieldToEnd + Machine.RatePerMinute * SetUp / quantity;
