@@ -79,8 +79,7 @@ internal sealed class BookFile
                 change(copy);
                 return read(copy);
             });
-            using LiteDatabase book = Open(Path);
-            Commit(book, change, Log);
+            Commit(change);
             return result;
         });
     }
@@ -172,25 +171,33 @@ internal sealed class BookFile
         }
     }
 
-    private static void Commit(LiteDatabase book, Action<LiteDatabase> change, string log)
+    /// <summary>The library ties a transaction to its thread: nothing is awaited here. After any failure the database is closed, never used again.</summary>
+    private void Commit(Action<LiteDatabase> change)
     {
-        // The library ties a transaction to its thread: nothing is awaited here. After any failure this instance is closed, never used again.
-        if (!book.BeginTrans())
+        try
         {
-            throw new InvalidOperationException("A transaction was begun inside another one.");
-        }
+            using LiteDatabase book = Open(Path);
+            if (!book.BeginTrans())
+            {
+                throw new InvalidOperationException("A transaction was begun inside another one.");
+            }
 
-        change(book);
-        if (!book.Commit())
-        {
-            throw new ShopBookException("The shop book lost the transaction; nothing was written.");
-        }
+            change(book);
+            if (!book.Commit())
+            {
+                throw new InvalidOperationException("The library knows nothing of the transaction.");
+            }
 
-        // The library leaves a commit in the system's cache, where a power cut would take it.
-        if (File.Exists(log))
+            // The library leaves a commit in the system's cache, where a power cut would take it.
+            if (File.Exists(Log))
+            {
+                using SafeFileHandle log = File.OpenHandle(Log, FileMode.Open, FileAccess.ReadWrite, FileShare.ReadWrite);
+                RandomAccess.FlushToDisk(log);
+            }
+        }
+        catch (Exception failure) when (failure is not (ShopBookException or OutOfMemoryException))
         {
-            using SafeFileHandle handle = File.OpenHandle(log, FileMode.Open, FileAccess.ReadWrite, FileShare.ReadWrite);
-            RandomAccess.FlushToDisk(handle);
+            throw new ShopBookException($"{Path} cannot be written ({failure.Message}); what was acknowledged before stands in it.", failure);
         }
     }
 

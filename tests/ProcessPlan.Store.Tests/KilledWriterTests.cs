@@ -59,6 +59,33 @@ public class KilledWriterTests
         pendingLogs.Should().BePositive("some were killed while they wrote");
     }
 
+    [Theory]
+    [InlineData(1)]
+    [InlineData(5)]
+    [InlineData(20)]
+    public void A_disk_without_room_is_one_sentence_and_what_was_acknowledged_stands_in_the_book(int pages)
+    {
+        if (OperatingSystem.IsWindows())
+        {
+            return;
+        }
+
+        using Folder folder = new();
+        ShopBook book = Writer.Create(folder.Book);
+        using Process writer = Writer.StartWithLittleRoom(new FileInfo(folder.Book).Length + pages * 8192, folder.Book);
+        List<(int Book, long Revision)> acknowledged = Acknowledged(writer);
+
+        writer.StandardError.ReadToEnd().Should().Match($"{folder.Book} cannot be written (*); what was acknowledged before stands in it.\n");
+        writer.ExitCode.Should().Be(0);
+        ShopEdition edition = book.Read();
+        edition.Revision.Should().Be(1 + acknowledged.Count);
+        Writer.IsWhole(edition).Should().BeTrue();
+
+        // With room again it goes on.
+        Writer.IsWhole(Writer.Change(book, edition)).Should().BeTrue();
+        Writer.IsWhole(book.Read()).Should().BeTrue();
+    }
+
     private static List<(int Book, long Revision)> Acknowledged(Process writer)
     {
         List<(int Book, long Revision)> lines = [];

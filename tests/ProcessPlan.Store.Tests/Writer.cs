@@ -38,11 +38,24 @@ internal static class Writer
         return book.Save(edition.Revision, BookTables.Tools.Add(tool), BookTables.Machines.Replace(1, Drill with { RatePerHour = next }), BookTables.Tools.Add(tool));
     }
 
-    public static Process Start(int changes, params IReadOnlyList<string> books) => Process.Start(
-        new ProcessStartInfo(
-            Environment.GetEnvironmentVariable("DOTNET_HOST_PATH") ?? "dotnet",
-            [typeof(Writer).Assembly.Location, changes.ToString(CultureInfo.InvariantCulture), .. books])
-        { RedirectStandardOutput = true }) ?? throw new InvalidOperationException("The writer did not start.");
+    private static string Dotnet => Environment.GetEnvironmentVariable("DOTNET_HOST_PATH") ?? "dotnet";
+
+    public static Process Start(int changes, params IReadOnlyList<string> books) =>
+        Start(new ProcessStartInfo(Dotnet, [typeof(Writer).Assembly.Location, changes.ToString(CultureInfo.InvariantCulture), .. books]));
+
+    /// <summary>A writer that the system lets write no file beyond a size, as a full disk does not.</summary>
+    public static Process StartWithLittleRoom(long bytes, string book)
+    {
+        const int BytesOfUnit = 512;
+        ProcessStartInfo shell = new("/bin/sh", ["-c", $"trap '' XFSZ; ulimit -f {bytes / BytesOfUnit}; exec \"$@\"", "sh", Dotnet, typeof(Writer).Assembly.Location, $"{int.MaxValue}", book])
+        {
+            RedirectStandardError = true,
+        };
+
+        // With it the runtime makes a large file in memory when it starts, which the limit forbids too.
+        shell.Environment["DOTNET_EnableWriteXorExecute"] = "0";
+        return Start(shell);
+    }
 
     /// <summary>Each book is written by a thread of its own; a line of output is the number of a book and the revision that was acknowledged.</summary>
     public static void Main(string[] args)
@@ -53,6 +66,12 @@ internal static class Writer
             int at = i;
             new Thread(() => Write(at - 1, args[at], changes)).Start();
         }
+    }
+
+    private static Process Start(ProcessStartInfo start)
+    {
+        start.RedirectStandardOutput = true;
+        return Process.Start(start) ?? throw new InvalidOperationException("The writer did not start.");
     }
 
     private static void Write(int number, string path, int changes)
@@ -69,6 +88,11 @@ internal static class Writer
             catch (BookChangedException)
             {
                 // Another writer came first: the change is made again from what stands there now.
+            }
+            catch (ShopBookException told)
+            {
+                Console.Error.Write($"{told.Message}\n");
+                return;
             }
         }
     }

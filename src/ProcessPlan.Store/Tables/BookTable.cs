@@ -1,22 +1,16 @@
-using LiteDB;
-
 namespace ProcessPlan.Store.Tables;
 
 /// <summary>One table of the shop book.</summary>
 public abstract class BookTable
 {
-    /// <summary>Column that tells rows apart, whatever else changes in them.</summary>
-    internal const string Id = "_id";
-
-    private protected BookTable(
-        string name, string one, IReadOnlyList<Column> columns, IReadOnlyList<string> key, bool isKeyUnique, IReadOnlyList<string> shown)
+    private protected BookTable(string name, string one, IReadOnlyList<Column> columns, IReadOnlyList<string> key, bool isKeyUnique, IReadOnlyList<string> shown)
     {
         Name = name;
         One = one;
         Columns = columns;
-        Key = key;
+        Key = [.. key.Select(Place)];
         IsKeyUnique = isKeyUnique;
-        Shown = shown;
+        Shown = [.. shown.Select(Place)];
     }
 
     /// <summary>As commands and files call it, such as tools.</summary>
@@ -27,30 +21,61 @@ public abstract class BookTable
 
     internal IReadOnlyList<Column> Columns { get; }
 
-    /// <summary>Columns by which a person tells the rows apart.</summary>
-    internal IReadOnlyList<string> Key { get; }
+    /// <summary>Places of the columns by which a person tells the rows apart.</summary>
+    internal IReadOnlyList<int> Key { get; }
 
     /// <summary>Whether no two rows may have the same key.</summary>
     internal bool IsKeyUnique { get; }
 
-    /// <summary>Columns that fit on a line of text.</summary>
-    internal IReadOnlyList<string> Shown { get; }
+    /// <summary>Places of the columns that fit on a line of text.</summary>
+    internal IReadOnlyList<int> Shown { get; }
 
     /// <summary>A row that leaves the shop; the book keeps it with the date.</summary>
     public RowChange Retire(long id) => new(this, id, null);
 
-    /// <summary>The key of a row as text.</summary>
-    internal string KeyOf(BsonDocument row) => string.Join(' ', Columns.Where(column => Key.Contains(column.Name)).Select(column => column.Format(row)));
-
-    /// <summary>What is wrong with a row, in words that follow its place; null where it may stand in the book.</summary>
-    internal abstract string? Complaint(BsonDocument row);
-
-    internal abstract IReadOnlyList<BsonDocument> Documents(ShopEdition edition);
-
     /// <summary>How many rows of it an edition has.</summary>
     public abstract int CountIn(ShopEdition edition);
 
-    internal abstract object Read(IEnumerable<BsonDocument> rows);
+    /// <summary>The key of a row as text.</summary>
+    internal string KeyOf(object?[] cells) => string.Join(' ', Key.Select(place => Format(cells, place)));
+
+    internal string Format(object?[] cells, int place) => Columns[place].Kind.Format(cells[place]);
+
+    internal T Cell<T>(object?[] cells, string column) => (T)cells[Place(column)]!;
+
+    /// <summary>What is wrong with a row; null where it may stand in the book.</summary>
+    internal string? Complaint(object?[] cells)
+    {
+        for (int i = 0; i < Columns.Count; i++)
+        {
+            if (!Columns[i].Kind.Holds(cells[i]))
+            {
+                return $"{Columns[i].Name} holds no value that it may hold; expected {Columns[i].Kind.Expected}";
+            }
+        }
+
+        return ComplaintBetween(cells);
+    }
+
+    internal abstract IReadOnlyList<ShopRow> RowsOf(ShopEdition edition);
+
+    /// <summary>The rows as what they are, in a list of <see cref="BookRow{T}"/>.</summary>
+    /// <exception cref="ShopBookException">Two rows have a key that only one may have.</exception>
+    internal abstract object Read(IEnumerable<ShopRow> rows);
+
+    /// <summary>What is wrong between the cells of a row that are each right.</summary>
+    private protected abstract string? ComplaintBetween(object?[] cells);
+
+    private int Place(string column)
+    {
+        int place = 0;
+        while (Columns[place].Name != column)
+        {
+            place++;
+        }
+
+        return place;
+    }
 }
 
 /// <summary>One table of the shop book with the type of its rows.</summary>
@@ -58,19 +83,19 @@ public sealed class BookTable<T> : BookTable
 {
     private readonly Column<T>[] _columns;
     private readonly Func<RowCells, T> _read;
-    private readonly Func<RowCells, string?> _complaint;
+    private readonly Func<BookTable, object?[], string?> _complaint;
 
     /// <param name="name">As commands and files call it.</param>
     /// <param name="one">What one row is.</param>
     /// <param name="columns">All columns.</param>
-    /// <param name="read">Makes the value of a row without complaint.</param>
-    /// <param name="complaint">What is wrong between the cells of a row whose cells are each right.</param>
+    /// <param name="read">Makes the value of a row; takes the cells in the order of the columns.</param>
+    /// <param name="complaint">What is wrong between the cells of a row that are each right.</param>
     /// <param name="key">Columns by which a person tells the rows apart.</param>
     /// <param name="isKeyUnique">Whether no two rows may have the same key.</param>
     /// <param name="shown">Columns that fit on a line of text.</param>
     internal BookTable(
-        string name, string one, Column<T>[] columns, Func<RowCells, T> read, Func<RowCells, string?> complaint, string[] key, bool isKeyUnique, string[] shown)
-        : base(name, one, [.. columns.Select(static column => new Column(column.Name, column.Kind))], key, isKeyUnique, shown)
+        string name, string one, Column<T>[] columns, Func<RowCells, T> read, Func<BookTable, object?[], string?> complaint, string[] key, bool isKeyUnique, string[] shown)
+        : base(name, one, columns, key, isKeyUnique, shown)
     {
         _columns = columns;
         _read = read;
@@ -85,66 +110,35 @@ public sealed class BookTable<T> : BookTable
     /// <exception cref="ShopBookException">The value may not stand in the book.</exception>
     public RowChange Replace(long id, T value) => new(this, id, Checked(value));
 
-    internal override string? Complaint(BsonDocument row)
-    {
-        foreach (Column column in Columns)
-        {
-            if (column.Complaint(row) is { } complaint)
-            {
-                return complaint;
-            }
-        }
-
-        return _complaint(new RowCells(row));
-    }
-
     public override int CountIn(ShopEdition edition) => edition.Rows(this).Count;
 
-    internal override IReadOnlyList<BsonDocument> Documents(ShopEdition edition) => [.. edition.Rows(this).Select(row =>
-    {
-        BsonDocument document = Document(row.Value);
-        document[Id] = row.Id;
-        return document;
-    })];
+    internal override IReadOnlyList<ShopRow> RowsOf(ShopEdition edition) => [.. edition.Rows(this).Select(row => new ShopRow(row.Id, Cells(row.Value)))];
 
-    internal override object Read(IEnumerable<BsonDocument> rows)
+    internal override object Read(IEnumerable<ShopRow> rows)
     {
         List<BookRow<T>> read = [];
         HashSet<string> keys = new(StringComparer.Ordinal);
-        foreach (BsonDocument row in rows)
+        foreach (ShopRow row in rows)
         {
-            long id = row[Id].AsInt64;
-            if (Complaint(row) is { } complaint)
+            if (IsKeyUnique && !keys.Add(KeyOf(row.Cells)))
             {
-                throw new ShopBookException($"The {One} in row {id} of {Name} cannot stand in the book: {complaint}.");
+                throw new ShopBookException($"The book can have only one {One} '{KeyOf(row.Cells)}'; row {row.Id} of {Name} is another.");
             }
 
-            if (IsKeyUnique && !keys.Add(KeyOf(row)))
-            {
-                throw new ShopBookException($"The book can have only one {One} '{KeyOf(row)}'; row {id} of {Name} is another.");
-            }
-
-            read.Add(new BookRow<T>(id, _read(new RowCells(row))));
+            read.Add(new BookRow<T>(row.Id, _read(new RowCells(row))));
         }
 
         return read;
     }
 
-    internal BsonDocument Document(T value)
-    {
-        BsonDocument row = [];
-        foreach (Column<T> column in _columns)
-        {
-            row[column.Name] = column.Value(value);
-        }
+    private protected override string? ComplaintBetween(object?[] cells) => _complaint(this, cells);
 
-        return row;
-    }
+    private object?[] Cells(T value) => Array.ConvertAll(_columns, column => column.Value(value));
 
-    private BsonDocument Checked(T value)
+    private object?[] Checked(T value)
     {
-        BsonDocument row = Document(value);
-        return Complaint(row) is { } complaint ? throw new ShopBookException($"This {One} cannot stand in the book: {complaint}.") : row;
+        object?[] cells = Cells(value);
+        return Complaint(cells) is { } complaint ? throw new ShopBookException($"This {One} cannot stand in the book: {complaint}.") : cells;
     }
 }
 
@@ -156,17 +150,17 @@ public sealed class RowChange
 {
     /// <param name="table">The row's table.</param>
     /// <param name="id">The row; null for a new one.</param>
-    /// <param name="row">Its new values; null where it retires.</param>
-    internal RowChange(BookTable table, long? id, BsonDocument? row)
+    /// <param name="cells">Its new values; null where it retires.</param>
+    internal RowChange(BookTable table, long? id, object?[]? cells)
     {
         Table = table;
         Id = id;
-        Row = row;
+        Cells = cells;
     }
 
     internal BookTable Table { get; }
 
     internal long? Id { get; }
 
-    internal BsonDocument? Row { get; }
+    internal object?[]? Cells { get; }
 }

@@ -1,4 +1,3 @@
-using LiteDB;
 using ProcessPlan.Core.Costing;
 using ProcessPlan.Core.Shop;
 using ProcessPlan.Core.Standards;
@@ -22,19 +21,18 @@ public static class BookTables
         "machine",
         [
             new("name", CellKind.Name, static machine => machine.Name),
-            new("abilities", CellKind.Words, static machine => Array(machine.Abilities)),
+            new("abilities", CellKind.Words, static machine => machine.Abilities),
             new("ratePerHour", CellKind.Amount, static machine => machine.RatePerHour),
             new("setUpMinutes", CellKind.Number, static machine => machine.SetUpMinutes),
             new("handlingMinutes", CellKind.Number, static machine => machine.HandlingMinutes),
             new("toolChangeMinutes", CellKind.Number, static machine => machine.ToolChangeMinutes),
-            new("smallest", CellKind.Size, static machine => machine.Smallest.Picometres),
-            new("largest", CellKind.Size, static machine => machine.Largest.Picometres),
+            new("smallest", CellKind.Size, static machine => machine.Smallest),
+            new("largest", CellKind.Size, static machine => machine.Largest),
             new("powerKw", CellKind.Number, static machine => machine.PowerKw),
         ],
-        static row => new Machine(row.Text("name"), row.Words("abilities"), row.Amount("ratePerHour"), row.Number("setUpMinutes"), row.Number("handlingMinutes"),
-            row.Number("toolChangeMinutes"), row.Size("smallest"), row.Size("largest"), row.Number("powerKw")),
-        static row => row.Size("smallest") > row.Size("largest") ? $"smallest {row.Size("smallest")} is above largest {row.Size("largest")}"
-            : row.Number("powerKw") <= 0 ? "powerKw is not above 0" : null,
+        static row => new Machine(row.Take<string>(), row.Take<ValueList<string>>(), row.Take<decimal>(), row.Take<double>(), row.Take<double>(), row.Take<double>(),
+            row.Take<Length>(), row.Take<Length>(), row.Take<double>()),
+        static (table, cells) => Above(table, cells, "smallest", "largest") ?? NotAboveZero(table, cells, "powerKw"),
         key: ["name"],
         isKeyUnique: true,
         shown: ["name", "abilities", "ratePerHour", "largest"]);
@@ -46,19 +44,18 @@ public static class BookTables
         [
             new("name", CellKind.Name, static tool => tool.Name),
             new("use", CellKind.OneOf([.. Uses.Select(static use => use.Word)]), static tool => WordOf(Uses, tool.Use)),
-            new("stamped", CellKind.Size, static tool => tool.Stamped.Picometres),
-            new("ownMin", CellKind.Size, static tool => tool.Own.Min.Picometres),
-            new("ownMax", CellKind.Size, static tool => tool.Own.Max.Picometres),
+            new("stamped", CellKind.Size, static tool => tool.Stamped),
+            new("ownMin", CellKind.Size, static tool => tool.Own.Min),
+            new("ownMax", CellKind.Size, static tool => tool.Own.Max),
             new("made", CellKind.Text, static tool => tool.Made),
             new("material", CellKind.Text, static tool => tool.Material),
             new("price", CellKind.Amount, static tool => tool.Price),
             new("lifeMetres", CellKind.Number, static tool => tool.LifeMetres),
         ],
-        static row => new Tool(row.Text("name"), Meaning(Uses, row.Text("use")), row.Size("stamped"), new SizeWindow(row.Size("ownMin"), row.Size("ownMax")),
-            row.Text("made"), row.Text("material"), row.Amount("price"), row.Number("lifeMetres")),
-        static row => row.Size("ownMin") > row.Size("ownMax") ? $"ownMin {row.Size("ownMin")} is above ownMax {row.Size("ownMax")}"
-            : row.Size("stamped") <= Length.Zero || row.Size("stamped") > LargestTool ? $"stamped {row.Size("stamped")} is not above 0 and up to {LargestTool}"
-            : row.Number("lifeMetres") <= 0 ? "lifeMetres is not above 0" : null,
+        static row => new Tool(row.Take<string>(), Meaning(Uses, row.Take<string>()), row.Take<Length>(), new SizeWindow(row.Take<Length>(), row.Take<Length>()),
+            row.Take<string>(), row.Take<string>(), row.Take<decimal>(), row.Take<double>()),
+        static (table, cells) => Above(table, cells, "ownMin", "ownMax") ?? NotAboveZero(table, cells, "lifeMetres")
+            ?? (table.Cell<Length>(cells, "stamped") is var stamped && (stamped <= Length.Zero || stamped > LargestTool) ? $"stamped {stamped} is not above 0 and up to {LargestTool}" : null),
         key: ["name", "use", "stamped", "made", "material"],
         isKeyUnique: false,
         shown: ["name", "use", "stamped", "ownMin", "ownMax", "made", "price"]);
@@ -68,11 +65,11 @@ public static class BookTables
         "material",
         [
             new("designation", CellKind.Designation, static material => material.Designation),
-            new("aliases", CellKind.Words, static material => Array(material.Aliases)),
+            new("aliases", CellKind.Words, static material => material.Aliases),
             new("group", CellKind.OneOf([.. CuttingData.Groups]), static material => material.Group),
             new("iso513", CellKind.OneOf("P", "M", "K", "N", "S", "H", "O"), static material => material.Iso513),
-            new("hbFrom", CellKind.NumberOrNothing, static material => material.HbFrom is { } from ? from : BsonValue.Null),
-            new("hbTo", CellKind.NumberOrNothing, static material => material.HbTo is { } to ? to : BsonValue.Null),
+            new("hbFrom", CellKind.NumberOrNothing, static material => material.HbFrom),
+            new("hbTo", CellKind.NumberOrNothing, static material => material.HbTo),
             new("expansion", CellKind.Number, static material => material.Expansion),
             new("keepsSkin", CellKind.YesOrNo, static material => material.KeepsSkin),
             new("condition", CellKind.Text, static material => material.Condition),
@@ -80,10 +77,9 @@ public static class BookTables
             new("place", CellKind.Text, static material => material.Origin.Place),
             new("standing", CellKind.OneOf([.. Standings.Select(static standing => standing.Word)]), static material => WordOf(Standings, material.Origin.Standing)),
         ],
-        static row => new Material(row.Text("designation"), row.Words("aliases"), row.Text("group"), row.Text("iso513"), row.NumberOrNothing("hbFrom"),
-            row.NumberOrNothing("hbTo"), row.Number("expansion"), row.IsYes("keepsSkin"), row.Text("condition"),
-            new Citation(row.Text("source"), row.Text("place"), Meaning(Standings, row.Text("standing")))),
-        static row => row.NumberOrNothing("hbFrom") > row.NumberOrNothing("hbTo") ? "hbFrom is above hbTo" : null,
+        static row => new Material(row.Take<string>(), row.Take<ValueList<string>>(), row.Take<string>(), row.Take<string>(), row.Take<double?>(), row.Take<double?>(),
+            row.Take<double>(), row.Take<bool>(), row.Take<string>(), TakeCitation(ref row)),
+        static (table, cells) => table.Cell<double?>(cells, "hbFrom") > table.Cell<double?>(cells, "hbTo") ? "hbFrom is above hbTo" : null,
         key: ["designation"],
         isKeyUnique: true,
         shown: ["designation", "group", "hbFrom", "hbTo", "condition"]);
@@ -92,17 +88,17 @@ public static class BookTables
         "bars",
         "series of bars",
         [
-            new("over", CellKind.Size, static bars => bars.Over.Picometres),
-            new("upTo", CellKind.Size, static bars => bars.UpTo.Picometres),
-            new("sizes", CellKind.Sizes, static bars => Array(bars.Sizes)),
-            new("deviation", CellKind.Size, static bars => bars.Deviation.Picometres),
+            new("over", CellKind.Size, static bars => bars.Over),
+            new("upTo", CellKind.Size, static bars => bars.UpTo),
+            new("sizes", CellKind.Sizes, static bars => bars.Sizes),
+            new("deviation", CellKind.Size, static bars => Length.Zero + bars.Deviation),
             new("source", CellKind.Text, static bars => bars.Origin.Source),
             new("place", CellKind.Text, static bars => bars.Origin.Place),
             new("standing", CellKind.OneOf([.. Standings.Select(static standing => standing.Word)]), static bars => WordOf(Standings, bars.Origin.Standing)),
         ],
-        static row => new BarSeries(row.Size("over"), row.Size("upTo"), row.Sizes("sizes"), row.Size("deviation") - Length.Zero,
-            new Citation(row.Text("source"), row.Text("place"), Meaning(Standings, row.Text("standing")))),
-        static row => BarComplaint(row.Size("over"), row.Size("upTo"), row.Size("deviation"), row.Sizes("sizes")),
+        static row => new BarSeries(row.Take<Length>(), row.Take<Length>(), row.Take<ValueList<Length>>(), row.Take<Length>() - Length.Zero, TakeCitation(ref row)),
+        static (table, cells) => BarComplaint(table.Cell<Length>(cells, "over"), table.Cell<Length>(cells, "upTo"), table.Cell<Length>(cells, "deviation"),
+            table.Cell<ValueList<Length>>(cells, "sizes")),
         key: ["over"],
         isKeyUnique: true,
         shown: ["over", "upTo", "sizes", "deviation"]);
@@ -116,8 +112,8 @@ public static class BookTables
             new("piecePrice", CellKind.Amount, static supplier => supplier.PiecePrice),
             new("days", CellKind.Count, static supplier => supplier.Days),
         ],
-        static row => new Supplier(row.Text("process"), row.Amount("lotCharge"), row.Amount("piecePrice"), row.Count("days")),
-        static _ => null,
+        static row => new Supplier(row.Take<string>(), row.Take<decimal>(), row.Take<decimal>(), row.Take<int>()),
+        static (_, _) => null,
         key: ["process"],
         isKeyUnique: true,
         shown: ["process", "lotCharge", "piecePrice", "days"]);
@@ -145,11 +141,14 @@ public static class BookTables
         return deviation >= upTo ? $"deviation {deviation} is not below the size" : null;
     }
 
-    private static BsonArray Array(ValueList<string> words) => new(words.Select(static word => new BsonValue(word)));
+    private static string? Above(BookTable table, object?[] cells, string lower, string upper) =>
+        table.Cell<Length>(cells, lower) > table.Cell<Length>(cells, upper) ? $"{lower} {table.Cell<Length>(cells, lower)} is above {upper} {table.Cell<Length>(cells, upper)}" : null;
 
-    private static BsonArray Array(ValueList<Length> sizes) => new(sizes.Select(static size => new BsonValue(size.Picometres)));
+    private static string? NotAboveZero(BookTable table, object?[] cells, string column) => table.Cell<double>(cells, column) > 0 ? null : $"{column} is not above 0";
 
-    private static string WordOf<T>((string Word, T Meaning)[] words, T meaning) => System.Array.Find(words, pair => Equals(pair.Meaning, meaning)).Word;
+    private static Citation TakeCitation(ref RowCells row) => new(row.Take<string>(), row.Take<string>(), Meaning(Standings, row.Take<string>()));
 
-    private static T Meaning<T>((string Word, T Meaning)[] words, string word) => System.Array.Find(words, pair => pair.Word == word).Meaning;
+    private static string WordOf<T>((string Word, T Meaning)[] words, T meaning) => Array.Find(words, pair => Equals(pair.Meaning, meaning)).Word;
+
+    private static T Meaning<T>((string Word, T Meaning)[] words, string word) => Array.Find(words, pair => pair.Word == word).Meaning;
 }

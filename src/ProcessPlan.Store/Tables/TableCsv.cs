@@ -1,5 +1,4 @@
 using System.Globalization;
-using LiteDB;
 using nietras.SeparatedValues;
 
 namespace ProcessPlan.Store.Tables;
@@ -12,14 +11,14 @@ public static class TableCsv
     public static void Write(BookTable table, ShopEdition edition, TextWriter target)
     {
         using SepWriter writer = Sep.New(',').Writer(static options => options with { Escape = true }).To(target, leaveOpen: true);
-        foreach (BsonDocument document in table.Documents(edition))
+        foreach (ShopRow row in table.RowsOf(edition))
         {
-            using SepWriter.Row row = writer.NewRow();
-            row[Id].Set(document[BookTable.Id].AsInt64.ToString(CultureInfo.InvariantCulture));
-            foreach (Column column in table.Columns)
+            using SepWriter.Row line = writer.NewRow();
+            line[Id].Set(row.Id.ToString(CultureInfo.InvariantCulture));
+            for (int i = 0; i < row.Cells.Length; i++)
             {
-                string text = column.Format(document);
-                row[column.Name].Set(column.Kind.IsFreeText ? SheetText.Neutralise(text) : text);
+                string text = table.Format(row.Cells, i);
+                line[table.Columns[i].Name].Set(table.Columns[i].Kind.IsFreeText ? SheetText.Neutralise(text) : text);
             }
         }
     }
@@ -50,10 +49,10 @@ public static class TableCsv
 
     private sealed class ImportReader(BookTable table, ShopEdition edition)
     {
-        private readonly Dictionary<long, BsonDocument> _rows = table.Documents(edition).ToDictionary(static row => row[BookTable.Id].AsInt64);
+        private readonly Dictionary<long, object?[]> _rows = table.RowsOf(edition).ToDictionary(static row => row.Id, static row => row.Cells);
         private readonly Dictionary<long, int> _lineOf = [];
-        private readonly List<(int Line, BsonDocument Row)> _unnumbered = [];
-        private readonly List<(int Line, long Id, BsonDocument Row)> _numbered = [];
+        private readonly List<object?[]> _unnumbered = [];
+        private readonly List<(long Id, object?[] Cells)> _numbered = [];
         private readonly Dictionary<string, int> _lineOfKey = new(StringComparer.Ordinal);
         private readonly List<string> _problems = [];
         private int[] _places = [];
@@ -107,13 +106,13 @@ public static class TableCsv
             }
 
             int before = _problems.Count;
-            BsonDocument row = [];
+            object?[] row = new object?[_places.Length];
             for (int i = 0; i < _places.Length; i++)
             {
                 Column column = table.Columns[i];
                 string text = cells[_places[i]].ToString();
-                bool isRead = column.Kind.TryRead(column.Kind.IsFreeText ? SheetText.Restore(text) : text.Trim(), out BsonValue value);
-                row[column.Name] = value;
+                bool isRead = column.Kind.TryRead(column.Kind.IsFreeText ? SheetText.Restore(text) : text.Trim(), out object? value);
+                row[i] = value;
                 if (!isRead || !column.Kind.Holds(value))
                 {
                     Refuse($"line {line}, {column.Name}: '{text}' is not understood; expected {column.Kind.Expected}");
@@ -148,12 +147,12 @@ public static class TableCsv
             ILookup<string, long> free = _rows.Keys.Where(id => !_lineOf.ContainsKey(id)).ToLookup(id => table.KeyOf(_rows[id]));
             Dictionary<string, Queue<long>> byKey = free.ToDictionary(static group => group.Key, static group => new Queue<long>(group), StringComparer.Ordinal);
             List<RowDifference> added = [];
-            List<(int Line, long Id, BsonDocument Row)> kept = _numbered;
-            foreach ((int line, BsonDocument row) in _unnumbered)
+            List<(long Id, object?[] Cells)> kept = _numbered;
+            foreach (object?[] row in _unnumbered)
             {
                 if (byKey.TryGetValue(table.KeyOf(row), out Queue<long>? ids) && ids.TryDequeue(out long id))
                 {
-                    kept.Add((line, id, row));
+                    kept.Add((id, row));
                 }
                 else
                 {
@@ -162,11 +161,11 @@ public static class TableCsv
             }
 
             List<RowDifference> changed = [];
-            foreach ((_, long id, BsonDocument row) in kept.OrderBy(static row => row.Id))
+            foreach ((long id, object?[] row) in kept.OrderBy(static row => row.Id))
             {
-                BsonDocument before = _rows[id];
-                CellDifference[] cells = [.. table.Columns.Where(column => row[column.Name] != before[column.Name])
-                    .Select(column => new CellDifference(column.Name, column.Format(before), column.Format(row)))];
+                object?[] before = _rows[id];
+                CellDifference[] cells = [.. Enumerable.Range(0, row.Length).Where(place => !Equals(row[place], before[place]))
+                    .Select(place => new CellDifference(table.Columns[place].Name, table.Format(before, place), table.Format(row, place)))];
                 if (cells.Length > 0)
                 {
                     changed.Add(new RowDifference(RowFate.Changed, id, table.KeyOf(before), cells, new RowChange(table, id, row)));
@@ -178,11 +177,11 @@ public static class TableCsv
             return new TableImport(table, [], [.. retired, .. changed, .. added], kept.Count - changed.Count);
         }
 
-        private void Number(int line, string text, BsonDocument row)
+        private void Number(int line, string text, object?[] row)
         {
             if (text.Length == 0)
             {
-                _unnumbered.Add((line, row));
+                _unnumbered.Add(row);
             }
             else if (!long.TryParse(text, NumberStyles.None, CultureInfo.InvariantCulture, out long id) || !_rows.ContainsKey(id))
             {
@@ -194,7 +193,7 @@ public static class TableCsv
             }
             else
             {
-                _numbered.Add((line, id, row));
+                _numbered.Add((id, row));
             }
         }
     }

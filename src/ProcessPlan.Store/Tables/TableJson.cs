@@ -1,5 +1,4 @@
 using System.Text.Json;
-using LiteDB;
 
 namespace ProcessPlan.Store.Tables;
 
@@ -9,13 +8,14 @@ public static class TableJson
     public static void Write(BookTable table, ShopEdition edition, Utf8JsonWriter json)
     {
         json.WriteStartArray(table.Name);
-        foreach (BsonDocument row in table.Documents(edition))
+        foreach (ShopRow row in table.RowsOf(edition))
         {
             json.WriteStartObject();
-            json.WriteNumber("id", row[BookTable.Id].AsInt64);
-            foreach (Column column in table.Columns)
+            json.WriteNumber("id", row.Id);
+            for (int i = 0; i < row.Cells.Length; i++)
             {
-                column.WriteJson(json, row);
+                json.WritePropertyName(table.Columns[i].Name);
+                table.Columns[i].Kind.WriteJson(json, row.Cells[i]);
             }
 
             json.WriteEndObject();

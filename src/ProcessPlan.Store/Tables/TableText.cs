@@ -10,16 +10,16 @@ public static class TableText
 
     public static void Write(BookTable table, ShopEdition edition, TextWriter target)
     {
-        Column[] shown = [.. table.Columns.Where(column => table.Shown.Contains(column.Name))];
-        List<string[]> lines = [["row", .. shown.Select(static column => column.Name)]];
-        lines.AddRange(table.Documents(edition).Select(row => (string[])[row[BookTable.Id].AsInt64.ToString(CultureInfo.InvariantCulture), .. shown.Select(column => Cut(column.Format(row)))]));
+        List<string[]> lines = [["row", .. table.Shown.Select(place => table.Columns[place].Name)]];
+        lines.AddRange(table.RowsOf(edition).Select(row =>
+            (string[])[row.Id.ToString(CultureInfo.InvariantCulture), .. table.Shown.Select(place => Cut(table.Format(row.Cells, place)))]));
         int[] widths = [.. lines[0].Select((_, at) => lines.Max(line => line[at].Length))];
         foreach (string[] line in lines)
         {
             target.WriteLine(string.Join(Gap, line.Select((cell, at) => IsNumber(at) ? cell.PadLeft(widths[at]) : cell.PadRight(widths[at]))).TrimEnd());
         }
 
-        bool IsNumber(int at) => at == 0 || shown[at - 1].Kind.IsNumber;
+        bool IsNumber(int at) => at == 0 || table.Columns[table.Shown[at - 1]].Kind.IsNumber;
     }
 
     private static string Cut(string text)
