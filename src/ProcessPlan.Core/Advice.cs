@@ -1,3 +1,4 @@
+using System.Globalization;
 using ProcessPlan.Core.Capability;
 using ProcessPlan.Core.Features;
 using ProcessPlan.Core.Shop;
@@ -45,7 +46,7 @@ internal static class Advice
         Feature feature = job.Feature;
         if (feature.Wall is { } wall && feature.Nominal.Picometres > ThinWall * wall.Picometres)
         {
-            yield return $"Thin wall (D/t {feature.Nominal.Picometres / (double)wall.Picometres:0.#}): rough, release, finish; clamp lightly and measure it free.";
+            yield return string.Create(CultureInfo.InvariantCulture, $"Thin wall (D/t {feature.Nominal.Picometres / (double)wall.Picometres:0.#}): rough, release, finish; clamp lightly and measure it free.");
         }
 
         if (feature.Interrupted)
@@ -71,7 +72,7 @@ internal static class Advice
     {
         yield return $"machines, rates and tools of the {shop.Name}, in {shop.Currency}; capability from the handbook, not proven here";
         yield return "sizes at 20 °C; stock and sizes on " + (job.Feature.IsRound ? "diameter" : "width");
-        yield return "price without material, tool wear and overhead outside the machine rates";
+        yield return "price without material and overhead outside the machine rates";
         yield return job.Quantity <= 50
             ? "small lot (up to 50): the handbook's stock where it is larger than the analytical one"
             : "lot over 50: least stock by the analytical method";

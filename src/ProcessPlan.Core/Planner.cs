@@ -29,7 +29,7 @@ public static class Planner
         {
             Job = job,
             Routes = found,
-            Refusal = found.Count > 0 ? null : RefusalWriter.Write(job, candidates, search),
+            Refusal = found.Count > 0 ? null : RefusalWriter.Write(job, shop, candidates, search),
             Rejected = [.. Rejected(candidates)],
             Queries = [.. job.Queries, .. Advice.Queries(job)],
             Cautions = [.. Advice.Cautions(job)],

@@ -1,7 +1,9 @@
 using ProcessPlan.Core.Capability;
 using ProcessPlan.Core.Features;
 using ProcessPlan.Core.Routing;
+using ProcessPlan.Core.Shop;
 using ProcessPlan.Core.Standards;
+using ProcessPlan.Core.Tooling;
 using ProcessPlan.Core.Values;
 
 namespace ProcessPlan.Core;
@@ -9,7 +11,7 @@ namespace ProcessPlan.Core;
 /// <summary>Says why the search found nothing.</summary>
 internal static class RefusalWriter
 {
-    public static Refusal Write(Job job, IReadOnlyList<Candidate> candidates, RouteSearch search)
+    public static Refusal Write(Job job, ShopFloor shop, IReadOnlyList<Candidate> candidates, RouteSearch search)
     {
         string asked = Asked(job);
         if (search.ClosedChange is { } change)
@@ -23,7 +25,7 @@ internal static class RefusalWriter
         List<Candidate> finishing = [.. candidates.Where(static candidate => candidate.Finishes is not null)];
         if (finishing.Count == 0)
         {
-            return new Refusal(asked, $"No process of this shop finishes {asked}.", Best(job, candidates), WouldOpen(job, candidates));
+            return new Refusal(asked, $"No process of this shop finishes {asked}.", Best(job, candidates), WouldOpen(job, shop, candidates));
         }
 
         string finishers = string.Join(", ", finishing.Select(static candidate => candidate.Process.Name));
@@ -32,7 +34,7 @@ internal static class RefusalWriter
             : search.NearestMiss is { } miss
                 ? $"{finishers} could finish it, but the window between {miss.Before} and {miss.Process} is too narrow by {miss.ShortBy.Format()} µm at the nearest."
                 : $"{finishers} could finish it, but nothing of this shop can come before, or the tool of its size is missing.";
-        return new Refusal(asked, message, Best(job, candidates), WouldOpen(job, candidates));
+        return new Refusal(asked, message, Best(job, candidates), WouldOpen(job, shop, candidates));
     }
 
     private static string Asked(Job job)
@@ -69,9 +71,17 @@ internal static class RefusalWriter
         return $"{grade} ({width.Format()} µm) by {finest.Process.Name}; {smoothest.Process.SpecialRa} by {smoothest.Process.Name}, both with special effort";
     }
 
-    private static List<string> WouldOpen(Job job, IReadOnlyList<Candidate> candidates)
+    private static List<string> WouldOpen(Job job, ShopFloor shop, IReadOnlyList<Candidate> candidates)
     {
         List<string> open = [];
+        SizeWindow hole = job.Feature.Limits;
+        if (candidates.Any(static candidate => candidate is { Finishes: not null, Process.SizedBy: ToolUse.Ream })
+            && shop.Tools(ToolUse.Ream).All(tool => !ReamerChoice.Suits(tool, hole, out _)))
+        {
+            SizeWindow reamer = Din1420.ReamerFor(hole);
+            open.Add($"a reamer whose own size is {reamer.Min.Format(3)} to {reamer.Max.Format(3)} mm (DIN 1420)");
+        }
+
         foreach (Candidate candidate in candidates)
         {
             Deviation? special = candidate.SpecialWidth ?? candidate.RoutineWidth;

@@ -48,15 +48,24 @@ internal static class SamplePlan
         {
             operations.Add(new Operation
             {
-                Number = 30, Process = "stress relief", Machine = "outside", Condition = Condition.Soft, Minutes = default, SetUp = default,
-                Cost = new Money(0.26m, Euro), Inspection = "size on return", Because = ["the drawing asks for it; 5 days away"], Cautions = [], Why = [],
+                Number = 30,
+                Process = "stress relief",
+                Machine = "outside",
+                Condition = Condition.Soft,
+                Minutes = default,
+                SetUp = default,
+                Cost = new Money(0.26m, Euro),
+                Inspection = "size on return",
+                Because = ["the drawing asks for it; 5 days away"],
+                Cautions = [],
+                Why = [],
             });
         }
 
         Length stamped = new(feature.Nominal.Picometres);
         operations.Add(Cut(extra ? 40 : 30, "sizing", "lathe 2", feature.Limits, 7, 800, 99, 172, 0.74, 0.69m) with
         {
-            Tool = new Tool("machine reamer", ToolUse.Ream, stamped, new SizeWindow(stamped, stamped), "H7", "HSS"),
+            Tool = new Tool("machine reamer", ToolUse.Ream, stamped, new SizeWindow(stamped, stamped), "H7", "HSS", 62, 45),
             Cautions = ["Make a trial hole with a tool that is new to this material."],
         });
         return new Route(rank, operations, new Money(cost, Euro), new Minutes(2.59), new Minutes(25), 0.9986, 201, "solid metal");

@@ -1,3 +1,4 @@
+using System.Globalization;
 using ProcessPlan.Core.Features;
 using ProcessPlan.Core.Shop;
 using ProcessPlan.Core.Standards;
@@ -10,6 +11,10 @@ public sealed class Candidate
 {
     private const double DeepForBoring = 4;
     private const double DeepForDrilling = 5;
+
+    /// <summary>Over this a turned shaft needs a steady and gives a grade away (common practice, no source).</summary>
+    private const double SlenderForTurning = 12;
+
     private static readonly Length Small = Length.FromMillimetres(3);
     private static readonly Length Large = Length.FromMillimetres(250);
 
@@ -126,7 +131,7 @@ public sealed class Candidate
 
         if (job.LengthRatio > process.LongestRatio)
         {
-            return $"up to {process.LongestRatio:0} times the size long, the {word} is {job.LengthRatio:0.#} times";
+            return string.Create(CultureInfo.InvariantCulture, $"up to {process.LongestRatio:0} times the size long, the {word} is {job.LengthRatio:0.#} times");
         }
 
         if (!candidate.CutsSoft && !candidate.CutsHard)
@@ -198,7 +203,12 @@ public sealed class Candidate
         double deep = process.Ability == "bore" ? DeepForBoring : DeepForDrilling;
         if (job.Kind == FeatureKind.Hole && (drillsOrReams || process.Ability == "bore") && job.LengthRatio > deep)
         {
-            lose($"{job.LengthRatio:0.#} times the diameter deep");
+            lose(string.Create(CultureInfo.InvariantCulture, $"{job.LengthRatio:0.#} times the diameter deep"));
+        }
+
+        if (process.Ability == "turn" && job.LengthRatio > SlenderForTurning)
+        {
+            lose(string.Create(CultureInfo.InvariantCulture, $"{job.LengthRatio:0.#} times the diameter long"));
         }
 
         if (drillsOrReams && job.Group is "M" or "S1" or "S2")

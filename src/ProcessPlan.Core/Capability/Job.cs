@@ -17,13 +17,16 @@ public sealed class Job
     /// <summary>Hardness of a case whose hardness the line does not give.</summary>
     private const double UsualCaseHrc = 60;
 
+    /// <summary>An Rz below the finest pair of the table: no process leaves this Ra, so it is refused and not forgotten.</summary>
+    private static readonly Roughness FinerThanAny = Roughness.Ra(1);
+
     private readonly List<string> _assumptions = [];
     private readonly List<string> _queries = [];
 
     public Job(Feature feature, ShopFloor shop)
     {
         Feature = feature;
-        Material = shop.Material(feature.Material ?? HandbookShop.DefaultMaterial);
+        Material = feature.Material is { } named ? shop.Material(named) : shop.UsualMaterial;
         Assume(feature.Material is null, $"material {Material.Designation}, {Material.Condition}");
         Quantity = feature.Quantity ?? 1;
         Assume(feature.Quantity is null, "1 piece");
@@ -32,7 +35,7 @@ public sealed class Job
         End = feature.End ?? HoleEnd.Through;
         Assume(feature.End is null && feature.Kind == FeatureKind.Hole, "the hole goes through");
         Assume(feature.Finish is null, "no roughness is asked for");
-        Ra = feature.Finish is { } finish ? RoughnessPairs.ToRa(finish) : null;
+        Ra = feature.Finish is { } finish ? RoughnessPairs.ToRa(finish) ?? FinerThanAny : null;
         Assume(feature.Finish is { IsRa: false }, $"{feature.Finish} is held as {Ra} µm. {RoughnessPairs.Remark}");
         Hrc = feature.Hardness is { } delivered ? ToHrc(delivered) : null;
         Assume(feature.Hardness is null && Material.HbTo is not null, $"hardness as delivered {HbRange(Material)}");

@@ -29,6 +29,8 @@ public readonly record struct CutTime(double Minutes, double Speed, double Feed,
     private const double Overrun = 2;
     private const double ReamerOverrun = 12;
     private const double CoreDrillFeed = 1.5;
+
+    /// <summary>Reaming over drilling feed at half of the greatest stock; more stock takes a smaller feed, less a larger one.</summary>
     private const double ReamFeed = 2.5;
 
     // Depth of cut per side and pass, and feed, of rough and medium cuts: common practice, no source.
@@ -112,7 +114,8 @@ public readonly record struct CutTime(double Minutes, double Speed, double Feed,
 
     private static CutTime Reaming(in Cut cut)
     {
-        double feed = CuttingData.DrillFeed(cut.Diameter) * cut.Data.FeedFactor * ReamFeed;
+        double stock = cut.Stock is { } removed ? removed.Picometres / (double)cut.Process.MostStockAt(cut.Diameter).Picometres : 1;
+        double feed = CuttingData.DrillFeed(cut.Diameter) * cut.Data.FeedFactor * ReamFeed / (0.75 + 0.5 * stock);
         return Revolving(cut.Diameter.ToMillimetres(), cut.Data.Ream, feed, 1, cut.Extent.ToMillimetres() + ReamerOverrun);
     }
 

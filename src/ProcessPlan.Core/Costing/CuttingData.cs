@@ -22,6 +22,9 @@ public sealed record CuttingData(double Drill, double Ream, double TurnRough, do
     private static readonly SizeRanges<(double Feed, Citation Origin)> DrillFeeds = new(FeedTable, static row =>
         (row.Double("feed"), FeedTable.Cite($"over {row["over"]} to {row["upto"]} mm")));
 
+    /// <summary>The groups of materials that there are cutting data for.</summary>
+    public static IReadOnlyCollection<string> Groups => ByGroup.Keys;
+
     /// <exception cref="KeyNotFoundException">No cutting data for the group; cannot survive the tests.</exception>
     public static CuttingData For(string group) => ByGroup[group];
 

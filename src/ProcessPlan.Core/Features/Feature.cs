@@ -51,7 +51,7 @@ public sealed record Feature
     public Coating? Coating { get; init; }
 
     /// <summary>Form and position asked for, in the order of <see cref="GeometryKind"/>.</summary>
-    public IReadOnlyList<GeometryRequirement> Geometry { get; init; } = [];
+    public ValueList<GeometryRequirement> Geometry { get; init; } = [];
 
     public StartForm? Start { get; init; }
 
@@ -64,7 +64,7 @@ public sealed record Feature
     public bool IsInternal => Kind.IsInternal();
 
     /// <summary>Round features are measured on diameter, the others on width.</summary>
-    public bool IsRound => Kind is FeatureKind.Hole or FeatureKind.Shaft;
+    public bool IsRound => Kind.IsRound();
 
     /// <summary>The nearest grade of ISO 286 on the coarser side for typed limits; null beyond IT18 or 3150 mm.</summary>
     public ToleranceGrade? NearestGrade => Iso286.NearestGrade(Nominal, Limits.Width);

@@ -21,6 +21,9 @@ public static class FeatureKinds
     /// <summary>Metal is outside the size: holes and slots grow when they are cut.</summary>
     public static bool IsInternal(this FeatureKind kind) => kind is FeatureKind.Hole or FeatureKind.Slot;
 
+    /// <summary>Round features are measured on diameter, the others on width.</summary>
+    public static bool IsRound(this FeatureKind kind) => kind is FeatureKind.Hole or FeatureKind.Shaft;
+
     /// <summary>The word of the trade, as it is printed and as scripts read it.</summary>
     public static string Word(this FeatureKind kind) => kind switch
     {

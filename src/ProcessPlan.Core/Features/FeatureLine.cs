@@ -14,6 +14,11 @@ public static class FeatureLine
     /// <returns>One feature, or two for a fit; or every problem of the line, in the order of their places.</returns>
     public static Parsed<FeatureRequest> Parse(ReadOnlySpan<char> line, MaterialNames materials)
     {
+        if (line.IsWhiteSpace())
+        {
+            return Parsed<FeatureRequest>.Failed([new Problem("The line is empty.", 0, line.Length, "a feature, such as hole 25H7 x40 thru")]);
+        }
+
         if (line.Length > MostCharacters)
         {
             return Parsed<FeatureRequest>.Failed([new Problem(

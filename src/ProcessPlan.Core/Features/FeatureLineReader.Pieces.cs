@@ -1,31 +1,29 @@
 using ProcessPlan.Core.Standards;
-using ProcessPlan.Core.Text;
 using ProcessPlan.Core.Values;
 
 namespace ProcessPlan.Core.Features;
 
-/// <content>The parts that are glued together without spaces, as in "25H7x40": numbers, classes, deviations, and words with their number.</content>
+/// <content>The parts that may be glued together without spaces, as in "25H7x40": numbers, classes, and words with their number.</content>
 internal ref partial struct FeatureLineReader
 {
-    private const int LongestWord = 20;
+    private enum EitherKind
+    {
+        Extent,
+        Diameter,
+        RoughnessNumber,
+        Material,
+    }
+
+    /// <summary>A part that is a tolerance class where one is still missing, and something else otherwise.</summary>
+    private readonly record struct EitherNote(ToleranceClass Class, EitherKind Kind, Measured Number, string Material, Place Place);
 
     private bool TryPiece()
     {
         char c = Current;
         if (c is 'Ø' or 'ø' or '⌀' or '∅')
         {
-            Place place = new(_at++, 1);
-            if (TryMeasured(place, out Measured size))
-            {
-                AddSize(size);
-            }
-
+            TakeSize(FeatureWord.Diameter, new Place(_at++, 1));
             return true;
-        }
-
-        if (c == '±' || Sign(c) != 0)
-        {
-            return TryDeviations();
         }
 
         if (NumberAt(_at))
@@ -34,24 +32,16 @@ internal ref partial struct FeatureLineReader
             return true;
         }
 
-        return LetterOrTimes(c) && (TryEither() || TryClass() || TryWordWithNumber());
+        return c == '±' || Sign(c) != 0 ? TryDeviations()
+            : LetterOrTimes(c) && (TryEither() || TryClass() || TryWordWithNumber());
     }
 
     private static bool LetterOrTimes(char c) => char.IsLetter(c) || c is '×' or '*';
 
-    /// <summary>+1 or -1 for every sign that keyboards and drawings use, 0 for other characters.</summary>
-    private static int Sign(char c) => c switch
-    {
-        '+' or '＋' => 1,
-        '-' or '−' or '–' or '—' or '‐' or '‑' or '﹣' or '－' => -1,
-        _ => 0,
-    };
-
-    /// <summary>"x40", "D25" and "N7" are a length, a diameter and a roughness, or the classes x40 (none), D25 (none) and N7.</summary>
+    /// <summary>"x6", "D8" and "N7" are a length, a diameter and a roughness, or tolerance classes; "x40" can only be a length.</summary>
     private bool TryEither()
     {
-        char c = Current;
-        EitherKind? kind = c switch
+        EitherKind? kind = Current switch
         {
             'x' or 'X' or '×' or '*' => EitherKind.Extent,
             'd' or 'D' => EitherKind.Diameter,
@@ -63,48 +53,89 @@ internal ref partial struct FeatureLineReader
             return false;
         }
 
-        bool afterSize = IsRightAfterSize(_at);
         int start = _at;
-        bool isClass = ToleranceClass.TryRead(_text[_at..], out ToleranceClass asClass, out int classLength);
+        bool isClass = ToleranceClass.TryRead(_text[start..], out ToleranceClass asClass, out int length);
         _at++;
         if (!TryNumber(out Measured number))
         {
             return true;
         }
 
-        Place place = new(start, _at - start);
-        if (isClass && place.Length == classLength && (kind != EitherKind.Extent || afterSize))
+        Place place = new(start, length);
+        if (isClass && number.IsUnitApart && SpaceAt(place.End))
         {
-            _either.Add(new EitherNote(asClass, kind.Value, number, afterSize, place));
-            SkipFitStroke();
+            // "1 N7 in": the unit is that of the line.
+            _at = place.End;
+            number = number with { Unit = WrittenUnit.None, IsUnitApart = false, Place = new Place(start + 1, length - 1) };
         }
-        else
+
+        if (isClass && number.Place.End == place.End)
         {
-            TakeEither(kind.Value, number, place);
+            AddEither(new EitherNote(asClass, kind.Value, number, "", place));
+        }
+        else if (kind != EitherKind.Extent || !HasClass(new Place(start, 1), number))
+        {
+            TakeOther(new EitherNote(default, kind.Value, number, "", PlaceFrom(start)));
         }
 
         return true;
     }
 
-    private void TakeEither(EitherKind kind, Measured number, Place place)
+    /// <summary>Beside the stroke of a fit stands a class and nothing else.</summary>
+    private void AddEither(EitherNote note)
     {
-        switch (kind)
+        bool behindStroke = note.Place.At == _behindStroke;
+        if (SkipFitStroke() || behindStroke)
+        {
+            _classes.Add(new ClassNote(note.Class, note.Place));
+        }
+        else
+        {
+            _either.Add(note);
+        }
+    }
+
+    /// <summary>Takes the part as what it is when it is no tolerance class.</summary>
+    private void TakeOther(EitherNote note)
+    {
+        switch (note.Kind)
         {
             case EitherKind.Extent:
-                Note(ref _extent, number, place, "length or depth");
+                Note(ref _extent, note.Number, note.Place, "length or depth");
                 break;
             case EitherKind.Diameter:
-                _sizes.Add(number);
-                if (number.Place.End > _sizeEnd)
-                {
-                    _sizeEnd = number.Place.End;
-                }
-
+                AddNamedSize(note.Number);
+                break;
+            case EitherKind.RoughnessNumber:
+                Note(ref _finish, new FinishNote(FeatureWord.Finish, note.Number), note.Place, "roughness");
                 break;
             default:
-                TakeRoughnessNumber(number, place);
+                Note(ref _material, note.Material, note.Place, "material");
                 break;
         }
+    }
+
+    /// <summary>Decides the last such part at <paramref name="from"/> or behind it, where a word before it says what it is.</summary>
+    private bool TakeEitherFrom(int from, bool asClass)
+    {
+        int last = _either.Count - 1;
+        if (last < 0 || _either[last].Place.At < from || (!asClass && _either[last].Kind != EitherKind.RoughnessNumber))
+        {
+            return false;
+        }
+
+        EitherNote note = _either[last];
+        _either.RemoveAt(last);
+        if (asClass)
+        {
+            _classes.Add(new ClassNote(note.Class, note.Place));
+        }
+        else
+        {
+            TakeOther(note);
+        }
+
+        return true;
     }
 
     private bool TryClass()
@@ -121,25 +152,30 @@ internal ref partial struct FeatureLineReader
     }
 
     /// <summary>The stroke of a fit stands between two classes: H7/k6.</summary>
-    private void SkipFitStroke()
+    private bool SkipFitStroke()
     {
-        int next = AfterSpaces(_at);
-        if (next < _text.Length && _text[next] == '/' && LetterAt(AfterSpaces(next + 1)))
+        int stroke = AfterSpaces(_at);
+        int letter = AfterSpaces(stroke + 1);
+        if (CharAt(stroke) != '/' || !LetterAt(letter))
         {
-            _at = AfterSpaces(next + 1);
+            return false;
         }
+
+        (_at, _behindStroke) = (letter, letter);
+        return true;
     }
 
-    /// <summary>A known word glued to its number: "Ra0.8", "wall2", "HRC58".</summary>
+    /// <summary>A known word glued to its number or to what stands before the number: "wall2", "HRC58", "Ra&lt;0.8", "x-40".</summary>
     private bool TryWordWithNumber()
     {
         int end = _at;
-        while (end < _text.Length && LetterOrTimes(_text[end]) && end - _at < LongestWord)
+        while (LetterOrTimes(CharAt(end)))
         {
             end++;
         }
 
-        FeatureWord word = NumberAt(end) ? FeatureWords.Find(_text[_at..end]) : FeatureWord.None;
+        bool glued = NumberAt(end) || CharAt(end) is '<' or '≤' or '>' or '≥' || (Sign(CharAt(end)) != 0 && NumberAt(end + 1));
+        FeatureWord word = glued ? FeatureWords.Find(_text[_at..end]) : FeatureWord.None;
         if (word == FeatureWord.None)
         {
             return false;
@@ -147,298 +183,108 @@ internal ref partial struct FeatureLineReader
 
         Place place = new(_at, end - _at);
         _at = end;
-        TakeWord(word, place, assigned: false);
+        TakeWord(word, place);
         return true;
     }
 
+    /// <summary>A number without a word before it: a hardness, a quantity, two limits, a zero deviation, or else a size.</summary>
     private void TakeNumber()
     {
         if (!TryNumber(out Measured number))
         {
+            _sizeTold = true;
             return;
         }
 
         if (TryScale(out HardnessScale scale))
         {
-            Place place = new(number.Place.At, _at - number.Place.At);
-            if (TryHardness(number, scale, place, out Hardness hardness))
-            {
-                Note(ref _hardness, hardness, place, "hardness");
-            }
+            NoteHardness(new HardnessNote(number, null, scale, PlaceFrom(number.Place.At)));
         }
-        else if (TrySuffix("off") || TrySuffix("pcs") || TrySuffix("pieces"))
+        else if (TryPieces())
         {
-            NoteQuantity(number, new Place(number.Place.At, _at - number.Place.At));
+            NoteQuantity(number, PlaceFrom(number.Place.At));
         }
-        else if (number.Number.Units == 0 && !number.IsFraction && _sizes.Count > 0 && SecondDeviationFollows())
+        else if (TrySuffix("deep") || TrySuffix("long"))
+        {
+            TakeExtentBefore(number);
+        }
+        else if (number.IsZero && SecondDeviationFollows())
         {
             TakeSecondDeviation(number, 1);
         }
-        else if (TryRange(number, out Measured second))
+        else if (TrySecondLimit(number, out Measured second))
         {
-            Note(ref _limitPair, new DeviationNote(number, 1, second, 1), number.Place.To(second.Place), "pair of limits");
-            TakeUnitOf(second);
+            Place place = number.Place.To(second.Place);
+            if (TryScale(out scale))
+            {
+                NoteHardness(new HardnessNote(number, second, scale, PlaceFrom(number.Place.At)));
+            }
+            else
+            {
+                Note(ref _limits, new PairNote(number, 1, second, 1), place, "pair of limits");
+            }
         }
         else
         {
-            AddSize(number);
-            TakeUnitOf(number);
+            _sizes.Add(number);
         }
     }
 
-    private void TakeUnitOf(Measured number)
+    /// <summary>"40 deep", "40 long"; in "40 deep 25" either number could be meant.</summary>
+    private void TakeExtentBefore(Measured number)
     {
-        if (number.Unit is WrittenUnit.Millimetre or WrittenUnit.Inch)
+        Place place = PlaceFrom(number.Place.At);
+        SkipToValue();
+        if (NumberAt(_at) && TryNumber(out Measured second))
         {
-            NoteUnit(number.Unit == WrittenUnit.Inch ? LengthUnit.Inch : LengthUnit.Millimetre, number.Place);
-        }
-    }
-
-    /// <summary>A number, a fraction of an inch, and the unit behind it. Reports what is wrong with it and then returns false.</summary>
-    private bool TryNumber(out Measured number)
-    {
-        int start = _at;
-        number = default;
-        if (!DecimalText.TryRead(_text[_at..], out ExactDecimal value, out int length))
-        {
-            Place whole = NumberRun(start);
-            _at = Math.Max(whole.End, start + 1);
-            Report($"'{Show(whole)}' has more digits than a size can hold.", whole, "at most 18 digits");
-            return false;
-        }
-
-        _at += length;
-        if (!AtEnd && Current is '.' or ',' && DigitAt(_at + 1))
-        {
-            Place whole = NumberRun(start);
-            _at = whole.End;
-            Report($"'{Show(whole)}' has more than one decimal mark.", whole, "one decimal point or comma, and no mark for thousands");
-            return false;
-        }
-
-        int numerator = 0;
-        bool fraction = value.Places == 0 && TryFraction(ref value, out numerator);
-        WrittenUnit unit = ReadUnit();
-        number = new Measured(value, numerator, fraction, unit, new Place(start, _at - start));
-        return true;
-    }
-
-    private readonly Place NumberRun(int start)
-    {
-        int end = start;
-        while (end < _text.Length && (char.IsAsciiDigit(_text[end]) || _text[end] is '.' or ','))
-        {
-            end++;
-        }
-
-        return new Place(start, end - start);
-    }
-
-    /// <summary>"1/4" or "1-1/2": 2, 4, 8 … 128 below the stroke, and a true fraction.</summary>
-    private bool TryFraction(ref ExactDecimal whole, out int in128ths)
-    {
-        int at = _at;
-        long top = whole.Units;
-        long inches = 0;
-        if (at < _text.Length && _text[at] == '-' && DecimalText.TryRead(_text[(at + 1)..], out ExactDecimal mixed, out int mixedLength) && mixed.Places == 0)
-        {
-            (inches, top) = (whole.Units, mixed.Units);
-            at += 1 + mixedLength;
-        }
-
-        in128ths = 0;
-        if (at >= _text.Length || _text[at] != '/'
-            || !DecimalText.TryRead(_text[(at + 1)..], out ExactDecimal below, out int length)
-            || below.Places > 0 || below.Units is not (2 or 4 or 8 or 16 or 32 or 64 or 128) || top <= 0 || top >= below.Units)
-        {
-            return false;
-        }
-
-        _at = at + 1 + length;
-        whole = new ExactDecimal(inches, 0);
-        in128ths = (int)(top * 128 / below.Units);
-        return true;
-    }
-
-    private WrittenUnit ReadUnit()
-    {
-        if (!AtEnd && Current is '"' or '″')
-        {
-            _at++;
-            return WrittenUnit.Inch;
-        }
-
-        return TrySuffix("mm") ? WrittenUnit.Millimetre
-            : TrySuffix("inch") || TrySuffix("in") ? WrittenUnit.Inch
-            : TrySuffix("um") || TrySuffix("µm") || TrySuffix("μm") ? WrittenUnit.Micrometre
-            : TrySuffix("uin") || TrySuffix("µin") || TrySuffix("μin") ? WrittenUnit.Microinch
-            : WrittenUnit.None;
-    }
-
-    /// <summary>Passes over the word, glued or after spaces, where it ends there.</summary>
-    private bool TrySuffix(ReadOnlySpan<char> word)
-    {
-        int at = AfterSpaces(_at);
-        int end = at + word.Length;
-        if (end > _text.Length || !_text[at..end].Equals(word, StringComparison.OrdinalIgnoreCase)
-            || (end < _text.Length && (char.IsLetterOrDigit(_text[end]) || _text[end] == '=')))
-        {
-            return false;
-        }
-
-        _at = end;
-        return true;
-    }
-
-    private bool TryScale(out HardnessScale scale)
-    {
-        scale = HardnessScale.HRC;
-        if (TrySuffix("hrc"))
-        {
-            return true;
-        }
-
-        scale = HardnessScale.HB;
-        if (TrySuffix("hbw") || TrySuffix("hb"))
-        {
-            return true;
-        }
-
-        scale = HardnessScale.HV;
-        return TrySuffix("hv");
-    }
-
-    private bool TryRange(Measured first, out Measured second)
-    {
-        second = default;
-        int at = AfterSpaces(_at);
-        if (at >= _text.Length)
-        {
-            return false;
-        }
-
-        int after = Sign(_text[at]) < 0 || _text[at] == '/' ? at + 1
-            : _text[at] == '.' && at + 1 < _text.Length && _text[at + 1] == '.' ? at + 2
-            : at > _at && at + 2 < _text.Length && _text.Slice(at, 3).Equals("to ", StringComparison.OrdinalIgnoreCase) ? at + 3
-            : -1;
-        bool glued = at == _at;
-        if (after < 0 || !NumberAt(AfterSpaces(after)) || (!glued && AfterSpaces(after) == after && _text[at] != '/'))
-        {
-            // "60 -0.03" is a deviation; "60-60.03" and "60 - 60.03" are limits.
-            return false;
-        }
-
-        int back = _at;
-        int problems = _problems?.Count ?? 0;
-        _at = AfterSpaces(after);
-        if (TryNumber(out second) && second.Number.ToDouble() * 2 >= first.Number.ToDouble() && !second.IsFraction)
-        {
-            return true;
-        }
-
-        _problems?.RemoveRange(problems, _problems.Count - problems);
-        _at = back;
-        return false;
-    }
-
-    private bool TryDeviations()
-    {
-        int start = _at;
-        if (Current == '±' || (Current == '+' && (_text[_at..].StartsWith("+/-") || _text[_at..].StartsWith("+-"))))
-        {
-            _at += Current == '±' ? 1 : _text[_at + 1] == '/' ? 3 : 2;
-            SkipSpaces();
-            if (!NumberAt(_at))
-            {
-                _at = start;
-                return false;
-            }
-
-            if (TryNumber(out Measured both))
-            {
-                Note(ref _deviations, new DeviationNote(both, 1, both, -1), new Place(start, _at - start), "pair of deviations");
-                TakeUnitOf(both);
-            }
-
-            return true;
-        }
-
-        int sign = Sign(Current);
-        int number = AfterSpaces(_at + 1);
-        if (!NumberAt(number))
-        {
-            return false;
-        }
-
-        _at = number;
-        if (!TryNumber(out Measured first))
-        {
-            return true;
-        }
-
-        first = first with { Place = new Place(start, _at - start) };
-        if (SecondDeviationFollows())
-        {
-            TakeSecondDeviation(first, sign);
-        }
-        else if (_sizes.Count == 0)
-        {
-            Report($"'{Show(first.Place)}' stands where a size is expected.", first.Place, "a size above 0, without a sign");
-        }
-        else
-        {
-            Report($"'{Show(first.Place)}' is one deviation; the other one is missing.", first.Place,
-                $"both, such as {(sign > 0 ? "+" : "-")}{DecimalText.Format(first.Number.Units, first.Number.Places)}/0");
-        }
-
-        return true;
-    }
-
-    /// <summary>A stroke or space, then a signed number or a plain zero.</summary>
-    private readonly bool SecondDeviationFollows()
-    {
-        int at = AfterSpaces(_at);
-        bool stroke = at < _text.Length && _text[at] == '/';
-        at = stroke ? AfterSpaces(at + 1) : at;
-        if (at >= _text.Length)
-        {
-            return false;
-        }
-
-        bool signed = Sign(_text[at]) != 0 && NumberAt(AfterSpaces(at + 1));
-        bool zero = DecimalText.TryRead(_text[at..], out ExactDecimal plain, out int length) && plain.Units == 0 && (stroke || at + length == WordEnd(at));
-        return signed || zero;
-    }
-
-    private void TakeSecondDeviation(Measured first, int firstSign)
-    {
-        SkipSpaces();
-        if (Current == '/')
-        {
-            _at++;
-            SkipSpaces();
-        }
-
-        int start = _at;
-        int sign = Sign(Current);
-        if (sign != 0)
-        {
-            _at = AfterSpaces(_at + 1);
-        }
-
-        if (!TryNumber(out Measured second))
-        {
+            Place both = number.Place.To(second.Place);
+            _sizeTold = true;
+            Report($"'{Show(both)}' has a number before and behind.", both, "x before the length or depth, such as x 40");
             return;
         }
 
-        second = second with { Place = new Place(start, _at - start) };
-        if (second.Unit == WrittenUnit.Micrometre && first.Unit == WrittenUnit.None)
+        Note(ref _extent, number, place, "length or depth");
+    }
+
+    private bool TryPieces() => TrySuffix("off") || TrySuffix("pcs") || TrySuffix("pieces");
+
+    private void TakeSize(FeatureWord word, Place place)
+    {
+        if (TryMeasured(word, place, out Measured size))
         {
-            first = first with { Unit = WrittenUnit.Micrometre };
+            AddNamedSize(size);
+        }
+        else
+        {
+            _sizeTold = true;
+        }
+    }
+
+    private void AddNamedSize(Measured size)
+    {
+        _sizes.Add(size);
+        _namedSizeAt = _namedSizeAt < 0 ? size.Place.At : _namedSizeAt;
+    }
+
+    private readonly Place PlaceFrom(int start) => new(start, _at - start);
+
+    private readonly bool IsRightAfterSize(int at)
+    {
+        foreach (Measured size in _sizes.Items)
+        {
+            if (AfterSpaces(size.Place.End) == at)
+            {
+                return true;
+            }
         }
 
-        Note(ref _deviations, new DeviationNote(first, firstSign, second, sign == 0 ? 1 : sign), first.Place.To(second.Place), "pair of deviations");
-        TakeUnitOf(first);
-        TakeUnitOf(second);
+        return false;
+    }
+
+    /// <summary>Takes back the last size, which has turned out to be part of something that is told.</summary>
+    private void DropLastSize()
+    {
+        _sizes.RemoveAt(_sizes.Count - 1);
+        _sizeTold = true;
     }
 }

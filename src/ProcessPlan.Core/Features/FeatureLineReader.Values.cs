@@ -1,71 +1,40 @@
-using ProcessPlan.Core.Text;
 using ProcessPlan.Core.Values;
 
 namespace ProcessPlan.Core.Features;
 
-/// <content>What belongs to a word: its number, its hardness, its range.</content>
+/// <content>What belongs to a word: its roughness, its hardness, its name and range.</content>
 internal ref partial struct FeatureLineReader
 {
     private const int MostPieces = 1_000_000_000;
 
-    /// <summary>The number behind a word. Reports and returns false where there is none.</summary>
-    private bool TryMeasured(Place word, out Measured number)
+    private const string CoatingExpected = "such as coat zinc-nickel 8-12um";
+
+    /// <summary>A hardness as written; a range has its end in <paramref name="To"/>.</summary>
+    private readonly record struct HardnessNote(Measured Number, Measured? To, HardnessScale Scale, Place Place);
+
+    private void TakeGeometry(FeatureWord word, Place place)
     {
-        SkipToValue();
-        if (NumberAt(_at))
-        {
-            return TryNumber(out number);
-        }
-
-        number = default;
-        if (!AtEnd && Sign(Current) < 0 && NumberAt(AfterSpaces(_at + 1)))
-        {
-            int start = _at;
-            _at = AfterSpaces(_at + 1);
-            if (TryNumber(out Measured negative))
-            {
-                Place place = new(start, negative.Place.End - start);
-                Report($"'{Show(place)}' behind '{Show(word)}' is negative.", place, "a number above 0");
-            }
-
-            return false;
-        }
-
-        Report($"'{Show(word)}' needs a number behind it.", word, $"a number, such as {Show(word)} 10");
-        return false;
-    }
-
-    private void TakeMeasured(ref Noted<Measured> slot, Place word, string what)
-    {
-        if (TryMeasured(word, out Measured number))
-        {
-            Note(ref slot, number, word.To(number.Place), what);
-        }
-    }
-
-    private void TakeGeometry(GeometryKind kind, Place word)
-    {
-        if (!TryMeasured(word, out Measured zone))
+        if (!TryMeasured(word, place, out Measured zone))
         {
             return;
         }
 
-        _geometry ??= [];
-        foreach ((GeometryKind known, _) in _geometry)
+        GeometryKind kind = (GeometryKind)(word - FeatureWord.Cylindricity);
+        foreach (GeometryNote known in _geometry.Items)
         {
-            if (known == kind)
+            if (known.Kind == kind)
             {
-                Report($"A second '{Show(word)}'.", word.To(zone.Place), "each form or position once");
+                Report($"A second '{Show(place)}'.", place.To(zone.Place), "each form or position once");
                 return;
             }
         }
 
-        _geometry.Add((kind, zone));
+        _geometry.Add(new GeometryNote(kind, zone));
     }
 
     private void NoteQuantity(Measured number, Place place)
     {
-        if (number.Number.Places > 0 || number.IsFraction || number.Number.Units is < 1 or > MostPieces || number.Unit != WrittenUnit.None)
+        if (!number.IsBareWhole || number.Number.Units is < 1 or > MostPieces)
         {
             Report($"'{Show(place)}' is no number of pieces.", place, "a whole number from 1, such as 200off");
             return;
@@ -74,129 +43,176 @@ internal ref partial struct FeatureLineReader
         Note(ref _quantity, (int)number.Number.Units, place, "number of pieces");
     }
 
-    private void TakeQuantityAfter(Place word)
-    {
-        if (TryMeasured(word, out Measured number))
-        {
-            NoteQuantity(number, word.To(number.Place));
-        }
-    }
-
+    /// <summary>"Ra 0.8", "Ra&lt;0.8", "Ra 0.8 max": roughness is a greatest value, however it is said.</summary>
     private void TakeRoughness(FeatureWord word, Place place)
     {
-        if (!TryMeasured(place, out Measured number))
+        SkipSpaces();
+        if (CharAt(_at) is '>' or '≥')
         {
-            return;
+            Report($"'{Show(place)}' asks for a least roughness.", place.To(new Place(_at, 1)), $"the greatest one, such as {Show(place)} {FeatureWords.Example(word)}");
+            _at++;
+        }
+        else if (CharAt(_at) is '<' or '≤')
+        {
+            _at++;
         }
 
-        // "Ra 0.8 in C45": nobody gives roughness in inches, so the unit is that of the line.
-        TakeUnitOf(number);
-        number = number.Unit is WrittenUnit.Millimetre or WrittenUnit.Inch ? number with { Unit = WrittenUnit.None } : number;
-        Note(ref _finish, new FinishNote(word, number), place.To(number.Place), "roughness");
+        if (TryMeasured(word, place, out Measured number))
+        {
+            _ = TrySuffix("max");
+            Note(ref _finish, new FinishNote(word, number), PlaceFrom(place.At), "roughness");
+        }
     }
 
-    private void TakeRoughnessNumber(Measured number, Place place) =>
-        Note(ref _finish, new FinishNote(FeatureWord.None, number), place, "roughness");
-
-    private bool TryHardness(Measured number, HardnessScale scale, Place place, out Hardness hardness)
+    private bool TryScale(out HardnessScale scale)
     {
-        hardness = default;
-        if (number.Unit == WrittenUnit.None && !number.IsFraction && TryHardness(number.Number, scale, out hardness))
+        scale = TrySuffix("hrc") ? HardnessScale.HRC : TrySuffix("hbw") || TrySuffix("hb") ? HardnessScale.HB : HardnessScale.HV;
+        return scale != HardnessScale.HV || TrySuffix("hv");
+    }
+
+    /// <summary>"58HRC", "58-62 HRC", "HRC 58", "HRC58", "hrc=58".</summary>
+    private bool TryHardness(out HardnessNote note)
+    {
+        Mark start = Here;
+        int letters = _at;
+        while (LetterAt(letters))
         {
-            return true;
+            letters++;
         }
 
-        Report($"'{Show(place)}' is outside the scale.", place, $"{(scale == HardnessScale.HRC ? "20 to 70" : "30 to 1000")} {scale}");
+        FeatureWord word = FeatureWords.Find(_text[_at..letters]);
+        bool scaleFirst = word is >= FeatureWord.Hrc and <= FeatureWord.Hv;
+        HardnessScale scale = scaleFirst ? HardnessScale.HRC + (word - FeatureWord.Hrc) : default;
+        if (scaleFirst)
+        {
+            _at = letters;
+            SkipToValue();
+        }
+
+        if (NumberAt(_at) && TryNumber(out Measured number))
+        {
+            Measured? to = EndOfRange();
+            if (scaleFirst || TryScale(out scale))
+            {
+                note = new HardnessNote(number, to, scale, PlaceFrom(start.At));
+                return true;
+            }
+        }
+
+        GoBack(start);
+        note = default;
         return false;
     }
 
-    private static bool TryHardness(ExactDecimal points, HardnessScale scale, out Hardness hardness)
+    private Measured? EndOfRange()
     {
-        bool tenths = points.TryScale(10, out long whole);
-        hardness = new Hardness(whole, scale);
-        return tenths && (scale == HardnessScale.HRC ? hardness.Points is >= 20 and <= 70 : hardness.Points is >= 30 and <= 1000);
+        int second = SecondOfRange();
+        _at = second < 0 ? _at : second;
+        return second >= 0 && TryNumber(out Measured end) ? end : null;
     }
 
-    /// <summary>"hardness 28HRC", "hardness=28HRC", "HRC 28", "HRC28".</summary>
-    private void TakeHardness(Place word)
+    /// <summary>The hardness, or null after telling why it is none that can be taken.</summary>
+    private Hardness? Accept(HardnessNote note)
     {
-        if (!TryMeasured(word, out Measured number))
+        if (note.To is not null)
         {
-            return;
+            Report($"'{Show(note.Place)}' is a range; one hardness is taken.", note.Place,
+                $"one value, such as {Show(note.Number.Place)}{note.Scale}");
+            return null;
         }
 
-        ReadOnlySpan<char> name = _text.Slice(word.At, word.Length);
-        HardnessScale scale;
-        if (name.Equals("hardness", StringComparison.OrdinalIgnoreCase))
+        if (note.Number.IsBare && Hardness.TryCreate(note.Number.Number, note.Scale, out Hardness hardness))
         {
-            if (!TryScale(out scale))
-            {
-                Report($"'{Show(word.To(number.Place))}' does not say its scale.", number.Place, "HRC, HB or HV behind the number");
-                return;
-            }
+            return hardness;
+        }
+
+        Report($"'{Show(note.Place)}' is outside the scale.", note.Place, Hardness.RangeOf(note.Scale));
+        return null;
+    }
+
+    private void NoteHardness(HardnessNote note)
+    {
+        if (Accept(note) is { } hardness)
+        {
+            Note(ref _hardness, hardness, note.Place, "hardness");
+        }
+    }
+
+    private void TakeHardness(FeatureWord word, Place place)
+    {
+        if (word == FeatureWord.Hardness)
+        {
+            SkipToValue();
         }
         else
         {
-            scale = name[1] is 'r' or 'R' ? HardnessScale.HRC : name[1] is 'v' or 'V' ? HardnessScale.HV : HardnessScale.HB;
+            _at = place.At;
         }
 
-        Place place = new(word.At, _at - word.At);
-        if (TryHardness(number, scale, place, out Hardness hardness))
+        if (TryHardness(out HardnessNote note))
         {
-            Note(ref _hardness, hardness, place, "hardness");
+            NoteHardness(note);
+            return;
+        }
+
+        _at = Math.Max(_at, place.End);
+        ReportNoHardness(place);
+    }
+
+    private void ReportNoHardness(Place word)
+    {
+        if (!NumberAt(_at))
+        {
+            string scale = FeatureWords.Find(At(word)) is >= FeatureWord.Hrc and <= FeatureWord.Hv ? "" : "HRC";
+            Report($"'{Show(word)}' needs a hardness behind it.", word, $"a hardness, such as {Show(word)} 58{scale}");
+        }
+        else if (TryNumber(out Measured number))
+        {
+            _ = EndOfRange();
+            Report($"'{Show(PlaceFrom(word.At))}' does not say its scale.", PlaceFrom(number.Place.At),
+                $"{Show(number.Place)}HRC, {Show(number.Place)}HB or {Show(number.Place)}HV");
         }
     }
 
     /// <summary>"hardened 58HRC", "case 0.8", "case 0.8 58HRC", "nitrided 0.3".</summary>
     private void TakeTreatment(FeatureWord word, Place place)
     {
-        if (!TryMeasured(place, out Measured number))
-        {
-            return;
-        }
-
-        Hardness? hardness = null;
+        SkipToValue();
         Measured? depth = null;
-        if (TryScale(out HardnessScale scale))
+        Hardness? hardness = null;
+        if (TryHardness(out HardnessNote asked))
         {
-            if (!TryHardness(number, scale, new Place(number.Place.At, _at - number.Place.At), out Hardness asked))
-            {
-                return;
-            }
-
-            hardness = asked;
+            hardness = Accept(asked);
         }
         else if (word == FeatureWord.Hardened)
         {
-            Report($"'{Show(place.To(number.Place))}' does not say its scale.", number.Place, "HRC, HB or HV behind the number");
-            return;
+            ReportNoHardness(place);
         }
-        else
+        else if (TryMeasured(word, place, out Measured deep))
         {
-            depth = number;
+            depth = deep;
             hardness = HardnessOfCase();
         }
 
-        TreatmentKind kind = word == FeatureWord.Hardened ? TreatmentKind.Hardened : word == FeatureWord.Case ? TreatmentKind.CaseHardened : TreatmentKind.Nitrided;
-        Note(ref _treatment, new TreatmentNote(kind, hardness, depth), new Place(place.At, _at - place.At), "treatment");
+        if (depth is not null || hardness is not null)
+        {
+            Note(ref _treatment, new TreatmentNote(TreatmentKind.Hardened + (word - FeatureWord.Hardened), hardness, depth), PlaceFrom(place.At), "treatment");
+        }
     }
 
     /// <summary>A hardness right behind the depth is that of the case if it is too hard to be the hardness as delivered.</summary>
     private Hardness? HardnessOfCase()
     {
-        int back = _at;
+        const double LeastHrc = 45;
+        const double LeastOther = 450;
+        Mark behindDepth = Here;
         SkipSpaces();
-        if (NumberAt(_at) && DecimalText.TryRead(_text[_at..], out ExactDecimal number, out int length))
+        if (TryHardness(out HardnessNote note) && note.Number.Number.ToDouble() >= (note.Scale == HardnessScale.HRC ? LeastHrc : LeastOther))
         {
-            _at += length;
-            if (TryScale(out HardnessScale scale) && TryHardness(number, scale, out Hardness hardness)
-                && number.ToDouble() >= (scale == HardnessScale.HRC ? 45 : 450))
-            {
-                return hardness;
-            }
+            return Accept(note);
         }
 
-        _at = back;
+        GoBack(behindDepth);
         return null;
     }
 
@@ -204,51 +220,74 @@ internal ref partial struct FeatureLineReader
     private void TakeCoating(Place word)
     {
         SkipToValue();
-        int start = _at;
-        int end = _at;
-        while (!AtEnd && !NumberAt(_at))
+        Place name = TakeCoatingName();
+        if (FeatureWords.Find(_text[_at..WordEnd(_at)]) is FeatureWord.Before or FeatureWord.After)
         {
-            _at = WordEnd(_at);
-            end = _at;
-            if (!AtEnd && Current == '=')
+            TakePart();
+            SkipSpaces();
+        }
+
+        Mark behindName = Here;
+        if (NumberAt(_at))
+        {
+            if (!TryNumber(out Measured least))
             {
-                break;
+                return;
             }
 
-            SkipSeparators();
+            if (EndOfRange() is { } most)
+            {
+                NoteCoating(word, name, least, most);
+                return;
+            }
+
+            bool otherNumber = LetterAt(_at) || TryScale(out _) || TryPieces();
+            if (!otherNumber)
+            {
+                Report($"'{Show(least.Place)}' is one thickness; a coating varies.", least.Place, "least and greatest build-up per surface, such as 8-12um");
+                return;
+            }
+
+            GoBack(behindName);
         }
 
-        Place name = new(start, Math.Max(end - start, 0));
-        if (name.Length == 0 || AtEnd || !NumberAt(_at))
-        {
-            Report($"'{Show(word)}' needs the name of the coating and its build-up per surface.", word, "such as coat zinc-nickel 8-12um");
-            return;
-        }
+        Place said = name.Length > 0 ? word.To(name) : word;
+        Report($"'{Show(said)}' needs {(name.Length > 0 ? "" : "a name and ")}its build-up per surface behind it.", said, CoatingExpected);
+    }
 
-        if (!TryNumber(out Measured least))
+    private void NoteCoating(Place word, Place name, Measured least, Measured most)
+    {
+        if (name.Length == 0)
         {
-            return;
-        }
-
-        int dash = AfterSpaces(_at);
-        if (dash >= _text.Length || Sign(_text[dash]) >= 0 || !NumberAt(AfterSpaces(dash + 1)))
-        {
-            Report($"'{Show(least.Place)}' is one thickness; a coating varies.", least.Place, "least and greatest build-up per surface, such as 8-12um");
-            return;
-        }
-
-        _at = AfterSpaces(dash + 1);
-        if (!TryNumber(out Measured most))
-        {
+            Report($"'{Show(word)}' needs the name of the coating before its build-up.", word, CoatingExpected);
             return;
         }
 
         // Build-up is spoken in micrometres; only another written unit changes that.
         most = most.Unit == WrittenUnit.None ? most with { Unit = WrittenUnit.Micrometre } : most;
         least = least.Unit == WrittenUnit.None ? least with { Unit = most.Unit } : least;
-        Note(ref _coating, new CoatingNote(_text.Slice(name.At, name.Length).ToString(), least, most), word.To(most.Place), "coating");
+        Note(ref _coating, new CoatingNote(At(name).ToString(), least, most), word.To(most.Place), "coating");
     }
 
-    /// <summary>Ra or Rz with its number, or no word and an N number.</summary>
-    private readonly record struct FinishNote(FeatureWord Word, Measured Number);
+    /// <summary>Words up to the first that is a number, a word of the line, a material or, behind the first word, has a digit.</summary>
+    private Place TakeCoatingName()
+    {
+        int start = _at;
+        int end = _at;
+        while (!AtEnd && !NumberAt(_at) && Current != '=')
+        {
+            ReadOnlySpan<char> word = _text[_at..WordEnd(_at)];
+            bool first = end == start;
+            if (FeatureWords.Find(word) != FeatureWord.None || (!first && (word.ContainsAnyInRange('0', '9') || _materials.TryFind(word, out _))))
+            {
+                break;
+            }
+
+            end = WordEnd(_at);
+            _at = end;
+            SkipSeparators();
+        }
+
+        return new Place(start, end - start);
+    }
 }

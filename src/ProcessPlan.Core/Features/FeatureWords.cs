@@ -13,6 +13,7 @@ internal enum FeatureWord
     Diameter,
     Tolerance,
     Extent,
+    Deep,
     Through,
     Blind,
     End,
@@ -20,10 +21,14 @@ internal enum FeatureWord
     Wall,
     OuterDiameter,
     Interrupted,
+    Finish,
     Ra,
     Rz,
     Material,
     Hardness,
+    Hrc,
+    Hb,
+    Hv,
     Hardened,
     Case,
     Nitrided,
@@ -71,13 +76,14 @@ internal static class FeatureWords
         ["tol"] = FeatureWord.Tolerance,
         ["tolerance"] = FeatureWord.Tolerance,
         ["class"] = FeatureWord.Tolerance,
+        ["fit"] = FeatureWord.Tolerance,
         ["x"] = FeatureWord.Extent,
         ["×"] = FeatureWord.Extent,
         ["*"] = FeatureWord.Extent,
         ["depth"] = FeatureWord.Extent,
-        ["deep"] = FeatureWord.Extent,
+        ["deep"] = FeatureWord.Deep,
         ["length"] = FeatureWord.Extent,
-        ["long"] = FeatureWord.Extent,
+        ["long"] = FeatureWord.Deep,
         ["thru"] = FeatureWord.Through,
         ["through"] = FeatureWord.Through,
         ["blind"] = FeatureWord.Blind,
@@ -86,18 +92,21 @@ internal static class FeatureWords
         ["wall"] = FeatureWord.Wall,
         ["od"] = FeatureWord.OuterDiameter,
         ["interrupted"] = FeatureWord.Interrupted,
+        ["finish"] = FeatureWord.Finish,
         ["ra"] = FeatureWord.Ra,
         ["rz"] = FeatureWord.Rz,
         ["mat"] = FeatureWord.Material,
         ["material"] = FeatureWord.Material,
         ["hardness"] = FeatureWord.Hardness,
-        ["hrc"] = FeatureWord.Hardness,
-        ["hb"] = FeatureWord.Hardness,
-        ["hv"] = FeatureWord.Hardness,
+        ["hrc"] = FeatureWord.Hrc,
+        ["hb"] = FeatureWord.Hb,
+        ["hbw"] = FeatureWord.Hb,
+        ["hv"] = FeatureWord.Hv,
         ["hardened"] = FeatureWord.Hardened,
         ["case"] = FeatureWord.Case,
         ["nitrided"] = FeatureWord.Nitrided,
         ["coat"] = FeatureWord.Coat,
+        ["coating"] = FeatureWord.Coat,
         ["before"] = FeatureWord.Before,
         ["after"] = FeatureWord.After,
         ["limits"] = FeatureWord.Limits,
@@ -125,6 +134,7 @@ internal static class FeatureWords
         ["mm"] = FeatureWord.Millimetre,
         ["in"] = FeatureWord.Inch,
         ["inch"] = FeatureWord.Inch,
+        ["inches"] = FeatureWord.Inch,
         ["unit"] = FeatureWord.Unit,
         ["2768-f"] = FeatureWord.GeneralTolerance,
         ["2768-m"] = FeatureWord.GeneralTolerance,
@@ -135,51 +145,39 @@ internal static class FeatureWords
     private static readonly Dictionary<string, FeatureWord>.AlternateLookup<ReadOnlySpan<char>> BySpan =
         ByText.GetAlternateLookup<ReadOnlySpan<char>>();
 
+    public static IReadOnlyCollection<string> All => ByText.Keys;
+
     public static FeatureWord Find(ReadOnlySpan<char> text) => BySpan.TryGetValue(text, out FeatureWord word) ? word : FeatureWord.None;
 
-    /// <summary>The known word or material with the fewest changed letters, if there are at most two and fewer than half of the word.</summary>
-    public static string? Nearest(ReadOnlySpan<char> text, MaterialNames materials)
+    /// <summary>What a word that needs a number is followed by, for example.</summary>
+    public static string Example(FeatureWord word) => word switch
     {
-        string? best = null;
-        int least = Math.Min(2, (text.Length - 1) / 2) + 1;
-        foreach (string known in ByText.Keys.Concat(materials.Designations))
-        {
-            int changes = Changes(text, known, least);
-            if (changes < least)
-            {
-                (best, least) = (known, changes);
-            }
-        }
+        FeatureWord.Extent or FeatureWord.Deep => "40",
+        FeatureWord.Bottom => "5",
+        FeatureWord.Wall => "2",
+        FeatureWord.OuterDiameter => "50",
+        FeatureWord.Ra => "0.8",
+        FeatureWord.Rz => "6.3",
+        FeatureWord.Hrc => "58",
+        FeatureWord.Hb => "200",
+        FeatureWord.Hv => "700",
+        FeatureWord.Case or FeatureWord.Nitrided => "0.5",
+        FeatureWord.Cast or FeatureWord.Cored => "20",
+        FeatureWord.Bar => "30",
+        FeatureWord.Off => "200",
+        >= FeatureWord.Cylindricity and <= FeatureWord.Perpendicularity => "0.01",
+        _ => "25",
+    };
 
-        return best;
-    }
-
-    /// <summary>Levenshtein distance without regard to case, or <paramref name="limit"/> where it is not below that.</summary>
-    private static int Changes(ReadOnlySpan<char> a, ReadOnlySpan<char> b, int limit)
+    /// <summary>What may stand behind a word that only names its value.</summary>
+    public static string ExpectedBehind(FeatureWord name) => name switch
     {
-        const int Longest = 40;
-        if (a.Length > Longest || b.Length > Longest || Math.Abs(a.Length - b.Length) >= limit)
-        {
-            return limit;
-        }
-
-        Span<int> row = stackalloc int[Longest + 1];
-        for (int j = 0; j <= b.Length; j++)
-        {
-            row[j] = j;
-        }
-
-        for (int i = 1; i <= a.Length; i++)
-        {
-            int diagonal = row[0];
-            row[0] = i;
-            for (int j = 1; j <= b.Length; j++)
-            {
-                int same = char.ToLowerInvariant(a[i - 1]) == char.ToLowerInvariant(b[j - 1]) ? 0 : 1;
-                (row[j], diagonal) = (Math.Min(Math.Min(row[j] + 1, row[j - 1] + 1), diagonal + same), row[j]);
-            }
-        }
-
-        return Math.Min(row[b.Length], limit);
-    }
+        FeatureWord.Kind => "hole, shaft, slot or tongue",
+        FeatureWord.End => "thru or blind",
+        FeatureWord.Start => "solid, cast 20, cored 20 or bar 30",
+        FeatureWord.Unit => "mm or in",
+        FeatureWord.Finish => "Ra 0.8, Rz 6.3 or N7",
+        FeatureWord.Limits => "two limits such as 60.000-60.030, or before or after the coating",
+        _ => "a class such as H7, deviations such as +0.030/0, or a general tolerance such as 2768-m",
+    };
 }

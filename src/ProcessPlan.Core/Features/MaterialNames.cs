@@ -1,6 +1,7 @@
 namespace ProcessPlan.Core.Features;
 
-/// <summary>The names under which the materials of a shop book may be called in a line. Case, spaces and hyphens do not matter.</summary>
+/// <summary>The names under which the materials of a shop book may be called in a line. Case, spaces and hyphens do not matter, nor whether
+/// a number is written with a point or a comma.</summary>
 public sealed class MaterialNames
 {
     private const int LongestName = 40;
@@ -12,19 +13,24 @@ public sealed class MaterialNames
     public MaterialNames(IEnumerable<(string Designation, IReadOnlyList<string> Aliases)> materials)
     {
         _bySpan = _designations.GetAlternateLookup<ReadOnlySpan<char>>();
+        List<string> designations = [];
         foreach ((string designation, IReadOnlyList<string> aliases) in materials)
         {
+            designations.Add(designation);
             Add(designation, designation);
             foreach (string alias in aliases)
             {
                 Add(alias, designation);
             }
         }
+
+        Designations = designations;
     }
 
     public static MaterialNames None { get; } = new([]);
 
-    public IEnumerable<string> Designations => _designations.Values.Distinct();
+    /// <summary>Each material once, in the order of the shop book.</summary>
+    public IReadOnlyList<string> Designations { get; }
 
     public bool TryFind(ReadOnlySpan<char> name, out string designation)
     {
@@ -36,7 +42,9 @@ public sealed class MaterialNames
 
         Span<char> folded = stackalloc char[LongestName];
         int length = Fold(name, folded);
-        return length > 0 && _bySpan.TryGetValue(folded[..length], out designation!);
+        bool found = _bySpan.TryGetValue(folded[..length], out string? known);
+        designation = known ?? "";
+        return found;
     }
 
     private void Add(string name, string designation)
@@ -58,7 +66,7 @@ public sealed class MaterialNames
         {
             if (c is not ' ' and not '-' and not '_')
             {
-                folded[length++] = c;
+                folded[length++] = c == ',' ? '.' : c;
             }
         }
 

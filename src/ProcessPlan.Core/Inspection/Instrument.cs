@@ -22,7 +22,7 @@ public sealed record Instrument(
 
     public double RatioTo(Deviation tolerance) => tolerance.Picometres / (double)Uncertainty.Picometres;
 
-    /// <summary>The quickest instrument whose uncertainty is at most a fifth of the tolerance; where there is none, the most accurate, and that is said.</summary>
+    /// <summary>The coarsest instrument whose uncertainty is at most a fifth of the tolerance; where there is none, the finest, and that is said.</summary>
     public static (Instrument Instrument, bool IsGood) For(bool inside, Length size, Deviation tolerance)
     {
         Instrument? best = null;
@@ -35,8 +35,7 @@ public sealed record Instrument(
             }
 
             bool good = instrument.RatioTo(tolerance) >= LeastRatio;
-            bool better = best is null || (good && !bestIsGood)
-                || (good == bestIsGood && (good ? instrument.MinutesPerCheck < best.MinutesPerCheck : instrument.Uncertainty < best.Uncertainty));
+            bool better = best is null || (good && !bestIsGood) || (!good && !bestIsGood && instrument.Uncertainty < best.Uncertainty);
             if (better)
             {
                 (best, bestIsGood) = (instrument, good);

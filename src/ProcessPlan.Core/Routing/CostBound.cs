@@ -1,29 +1,34 @@
 using ProcessPlan.Core.Capability;
+using ProcessPlan.Core.Costing;
 using ProcessPlan.Core.Shop;
 
 namespace ProcessPlan.Core.Routing;
 
 /// <summary>
-/// A bound from below for what a chain still costs: the set-up and handling of the machine that the step stands on, and the tool change of each
-/// operation that must at least come, on the cheapest machine that does it. Never more than the true cost, so best first stays exact.
+/// A bound from below for the operations that must at least stand before a step: each on its cheapest machine, without handling, set-up or stock,
+/// at the smallest size it could have. Never more than the true cost, so best first stays exact.
 /// </summary>
 internal sealed class CostBound
 {
-    private readonly int _quantity;
-    private readonly Dictionary<Candidate, double> _restBefore = [];
+    private readonly Dictionary<Candidate, double> _before = new(ReferenceEqualityComparer.Instance);
 
     /// <param name="job">The job.</param>
+    /// <param name="data">Speeds and feeds of its material.</param>
+    /// <param name="drills">The shop's drills for it.</param>
     /// <param name="candidates">All processes for it.</param>
-    /// <param name="mayPrecede">Whether the first may stand before the second, on the way.</param>
-    public CostBound(Job job, IReadOnlyList<Candidate> candidates, Func<Candidate, Candidate, bool> mayPrecede)
+    /// <param name="mayStart">Whether a process can begin a route.</param>
+    /// <param name="mayPrecede">Whether the first may stand before the second.</param>
+    public CostBound(
+        Job job, CuttingData data, Drills drills, IReadOnlyList<Candidate> candidates, Predicate<Candidate> mayStart, Func<Candidate, Candidate, bool> mayPrecede)
     {
-        _quantity = job.Quantity;
+        Dictionary<Candidate, double> own = new(ReferenceEqualityComparer.Instance);
         foreach (Candidate candidate in candidates)
         {
-            _restBefore[candidate] = candidate.Process.StartsRough ? 0 : double.PositiveInfinity;
+            _before[candidate] = mayStart(candidate) ? 0 : double.PositiveInfinity;
+            own[candidate] = candidate.NoAtAll is null ? LeastOf(candidate, job, data, drills) : double.PositiveInfinity;
         }
 
-        // The ladder from coarse to fine is short: after as many rounds as there are processes nothing changes any more.
+        // The ladder from coarse to fine is short: after a few rounds nothing changes any more.
         for (bool changed = true; changed;)
         {
             changed = false;
@@ -31,9 +36,10 @@ internal sealed class CostBound
             {
                 foreach (Candidate before in candidates)
                 {
-                    if (before.NoAtAll is null && mayPrecede(before, after) && LeastOf(before) + _restBefore[before] < _restBefore[after])
+                    double least = own[before] + _before[before];
+                    if (least < _before[after] && mayPrecede(before, after))
                     {
-                        _restBefore[after] = LeastOf(before) + _restBefore[before];
+                        _before[after] = least;
                         changed = true;
                     }
                 }
@@ -41,21 +47,23 @@ internal sealed class CostBound
         }
     }
 
-    /// <summary>At least this much is still to come for a good piece.</summary>
-    public double Of(Step step)
-    {
-        Machine machine = step.Machine!;
-        double own = machine.RatePerMinute * (machine.SetUpMinutes / _quantity + machine.HandlingMinutes + machine.ToolChangeMinutes);
-        double rest = _restBefore[step.Candidate!];
-        return own + (step.IsLast ? 0 : double.IsPositiveInfinity(rest) ? 0 : rest);
-    }
+    /// <summary>At least this much comes before the step for a good piece; infinite where no chain can reach the blank.</summary>
+    public double Before(Candidate candidate) => _before[candidate];
 
-    private static double LeastOf(Candidate candidate)
+    private static double LeastOf(Candidate candidate, Job job, CuttingData data, Drills drills)
     {
+        Process process = candidate.Process;
         double least = double.PositiveInfinity;
         foreach (Machine machine in candidate.Machines)
         {
-            least = Math.Min(least, machine.RatePerMinute * machine.ToolChangeMinutes);
+            double cutting = process.SizedBy switch
+            {
+                ToolUse.Drill => drills.LeastCost(machine),
+                null => machine.RatePerMinute * CutTime.For(new Cut(
+                    process, data, job.IsInternal ? process.Smallest : job.Feature.Limits.Min, job.Extent, new Values.Stock(0), process.LeftRa, Effort.Routine)).Minutes,
+                _ => 0,
+            };
+            least = Math.Min(least, machine.RatePerMinute * machine.ToolChangeMinutes + cutting);
         }
 
         return least;

@@ -16,16 +16,19 @@ namespace ProcessPlan.Core.Routing;
 internal sealed class RouteSearch
 {
     /// <summary>The largest hole drilled in solid metal with one drill; larger ones need a pilot (after the sizes of handbook table A1; from memory).</summary>
-    private static readonly Length LargestSingleDrill = Length.FromMillimetres(26);
+    public static readonly Length LargestSingleDrill = Length.FromMillimetres(26);
 
-    /// <summary>Above this size a reamer is not asked to go from a drilled hole to IT7 in one pass (common practice, no source).</summary>
+    /// <summary>Above this size a reamer is not asked to go from a drilled or rough-bored hole to IT7 in one pass (common practice, no source).</summary>
     private static readonly Length LargestReamAfterDrill = Length.FromMillimetres(12);
 
     /// <summary>A cut that the machinist sets gains at most this many grades (textbook rule: roughing 2 to 4, finishing 1 to 2; from memory).</summary>
     private const int MostGradesGained = 4;
 
-    /// <summary>Pilot over drill, in the middle of the handbook's pairs 15 for 28 to 25 for 48.</summary>
-    private const double PilotShare = 0.55;
+    /// <summary>What drilling and rough boring leave.</summary>
+    private static readonly ToleranceGrade RoughGrade = ToleranceGrade.It(12);
+
+    /// <summary>A process that takes no more than this in all removes micrometres a minute: its greatest stock is a hard limit.</summary>
+    private static readonly Stock LittleStock = Stock.FromMicrometres(200);
 
     /// <summary>Permissible deviation of a cast size (ISO 8062-3, DCTG 10, 25 to 63 mm: 2.8 mm in all; from memory).</summary>
     private static readonly Deviation CastTolerance = Deviation.FromMicrometres(1400);
@@ -39,6 +42,7 @@ internal sealed class RouteSearch
     private readonly List<Change> _changes;
     private readonly CuttingData _data;
     private readonly CostBound _bound;
+    private readonly Drills _drills;
     private readonly PriorityQueue<Step, (double Cost, int Order)> _open = new();
     private int _order;
 
@@ -49,7 +53,11 @@ internal sealed class RouteSearch
         _candidates = candidates;
         _changes = Change.For(job, shop);
         _data = CuttingData.For(job.Group);
-        _bound = new CostBound(job, candidates, (before, after) => MayPrecede(before, after.Process, null, after.LeftGrade, isLast: false));
+        _drills = new Drills(job, shop, _data);
+        _bound = new CostBound(job, _data, _drills, candidates, MayStart, static (before, after) =>
+            MayPrecede(before, after, null, after.LeftGrade, isLast: false)
+            || MayPrecede(before, after, null, after.HeldGrade(Effort.Routine), isLast: true)
+            || MayPrecede(before, after, null, after.HeldGrade(Effort.Special), isLast: true));
     }
 
     /// <summary>Steps whose ways back were looked through; pinned in tests.</summary>
@@ -93,13 +101,24 @@ internal sealed class RouteSearch
     /// <summary>The least stock of a step after another one, or after the blank.</summary>
     public StockNeed NeedOf(Step step, Step before) => before.IsBlank
         ? Need(step, before.BlankName!.StartsWith("bar", StringComparison.Ordinal) ? "bar" : "casting", before.Leaving!.Value.Most, new Deviation(before.Leaving.Value.Width), false, false)
-        : Need(step, before.Process.Name, step.Window.Most, LeftTolerance(before.Candidate!, step, before.Tool is null ? null : before.Leaving),
+        : Need(step, before.Process.Name, step.Reach.Most, LeftTolerance(before.Candidate!, step, before.Tool is null ? null : before.Leaving),
             before.ChangesAfter.Length == 0 && before.Machine == step.Machine, Array.Exists(before.ChangesAfter, static change => change.Hardens));
 
     private void Push(Step step)
     {
-        double rest = step.IsBlank ? 0 : _bound.Of(step);
-        _open.Enqueue(step, (step.Settled + rest, _order++));
+        double cost = step.Settled;
+        if (!step.IsBlank)
+        {
+            // At least: this step with as little stock as its own window, on a machine that the part must come to once, and what must stand before it.
+            MetalWindow nearest = new(step.Window.Most, step.Window.Most);
+            cost += CostOf(step, nearest, arrives: true).PerGoodPiece(step.YieldToEnd, _job.Quantity);
+            cost += MayStart(step.Candidate!) ? 0 : _bound.Before(step.Candidate!);
+        }
+
+        if (cost < double.PositiveInfinity)
+        {
+            _open.Enqueue(step, (cost, _order++));
+        }
     }
 
     /// <summary>Operations that can finish the feature; changes that come after the last cut have moved the window already.</summary>
@@ -150,7 +169,8 @@ internal sealed class RouteSearch
 
             foreach (Tool? tool in LastTools(candidate, window, effort))
             {
-                double yield = Yield(candidate, tool, effort, window);
+                double yield = Yield(candidate, tool, effort, window, window);
+                MetalWindow reach = Reach(candidate, tool, effort, window);
                 foreach (Machine machine in candidate.Machines)
                 {
                     if (tool is null || tool.Stamped <= machine.Largest)
@@ -162,6 +182,7 @@ internal sealed class RouteSearch
                             Tool = tool,
                             Effort = effort,
                             Leaving = window,
+                            Reach = reach,
                             ChangesLeft = changesLeft,
                             ChangesAfter = after,
                             Yield = yield,
@@ -196,7 +217,7 @@ internal sealed class RouteSearch
         SizeWindow sizes = window.Sizes(_job.IsInternal);
         if (use == ToolUse.Ream)
         {
-            return ReamerChoice.Best(_shop.ToolsNear(use, sizes), sizes, _job.Feature.Class) is { } reamer ? [reamer] : [];
+            return [.. ReamerChoice.Best(_shop.ToolsNear(use, sizes), sizes, _job.Feature.Class, tool => Yield(candidate, tool, effort, window, window))];
         }
 
         List<Tool?> fitting = [];
@@ -228,22 +249,37 @@ internal sealed class RouteSearch
     }
 
     /// <summary>Spread from the grade held (a sixth of it), or from the tool's predicted range; the share of it inside the window.</summary>
-    private double Yield(Candidate candidate, Tool? tool, Effort effort, MetalWindow window)
+    /// <param name="candidate">The process.</param>
+    /// <param name="tool">Its tool, or null.</param>
+    /// <param name="effort">With how much care.</param>
+    /// <param name="held">What the machinist aims into.</param>
+    /// <param name="good">What counts as good.</param>
+    private double Yield(Candidate candidate, Tool? tool, Effort effort, MetalWindow held, MetalWindow good)
     {
-        if (tool is null)
-        {
-            double half = window.Width / 2.0;
-            return NormalYield.Of(-half, half, 0, candidate.HeldWidth(effort).Picometres / 6.0);
-        }
-
-        MetalWindow cut = MetalWindow.Of(SizedCut.Predict(tool, _job.Group, IsCareful(candidate, effort)).Sizes, _job.IsInternal);
-        return NormalYield.Of(window.Least, window.Most, (cut.Least + cut.Most) / 2.0, cut.Width / 6.0);
+        MetalWindow aim = tool is null ? held : Cut(candidate, tool, effort);
+        double spread = tool is null ? candidate.HeldWidth(effort).Picometres : aim.Width;
+        return NormalYield.Of(good.Least, good.Most, (aim.Least + aim.Most) / 2.0, spread / 6.0);
     }
+
+    /// <summary>What a tool of fixed size is predicted to leave.</summary>
+    private MetalWindow Cut(Candidate candidate, Tool tool, Effort effort) =>
+        MetalWindow.Of(SizedCut.Predict(tool, _job.Group, IsCareful(candidate, effort)).Sizes, _job.IsInternal);
+
+    /// <summary>The part of the drawing's window that the last step needs: what the tool cuts, or what the process holds from the end with the most metal.</summary>
+    private MetalWindow Reach(Candidate candidate, Tool? tool, Effort effort, MetalWindow window)
+    {
+        MetalWindow cut = tool is null ? new MetalWindow(window.Most - candidate.HeldWidth(effort).Picometres, window.Most) : Cut(candidate, tool, effort);
+        return new MetalWindow(Math.Max(window.Least, cut.Least), Math.Min(window.Most, cut.Most));
+    }
+
+    /// <summary>Whether a process can cut the blank of this job, before any size is looked at.</summary>
+    private bool MayStart(Candidate candidate) => candidate.Process.StartsRough
+        && (_job.Start.Kind != StartKind.Solid || _job.Kind != FeatureKind.Hole || candidate.Process.SizedBy == ToolUse.Drill);
 
     /// <summary>Tries to begin the route with this step.</summary>
     private void Start(Step step)
     {
-        if (step.ChangesLeft > 0 || !step.Process.StartsRough || (_job.AsksForPosition && !step.Places))
+        if (step.ChangesLeft > 0 || !MayStart(step.Candidate!) || (_job.AsksForPosition && !step.Places))
         {
             return;
         }
@@ -251,9 +287,13 @@ internal sealed class RouteSearch
         switch (_job.Start.Kind)
         {
             case StartKind.Solid when _job.IsInternal:
-                if (step.Process.SizedBy == ToolUse.Drill ? step.Tool!.Stamped <= LargestSingleDrill : _job.Kind == FeatureKind.Slot)
+                if (step.Process.SizedBy == ToolUse.Drill && _drills.Of(step.Tool!) is { CanOpen: true } drill)
                 {
-                    PushBlank(step, null, "solid metal");
+                    PushDrilled(step, drill);
+                }
+                else if (_job.Kind == FeatureKind.Slot)
+                {
+                    Push(Blank(step, null, "solid metal"));
                 }
 
                 break;
@@ -273,7 +313,7 @@ internal sealed class RouteSearch
         MetalWindow entering = Entering(step, need.Least, []);
         if (entering.Holds(blank))
         {
-            PushBlank(step, blank, name);
+            Push(Blank(step, blank, name));
         }
         else
         {
@@ -298,7 +338,7 @@ internal sealed class RouteSearch
             need = Need(step, "bar", blank.Most, new Deviation(blank.Width), sameClamping: false, afterHeat: false).Least;
             if (Entering(step, need, []).Holds(blank))
             {
-                PushBlank(step, blank, $"bar {bar.Size}");
+                Push(Blank(step, blank, $"bar {bar.Size}"));
                 return;
             }
 
@@ -309,10 +349,11 @@ internal sealed class RouteSearch
         }
     }
 
-    private void PushBlank(Step first, MetalWindow? sizes, string name)
+    private Step Blank(Step first, MetalWindow? sizes, string name)
     {
+        first = sizes is { } entering ? Held(first, entering) : first;
         double cost = first.Settled + CostOf(first, sizes, arrives: true).PerGoodPiece(first.YieldToEnd, _job.Quantity);
-        Push(new Step { Leaving = sizes, Next = first, NextEntering = sizes, NextArrives = true, Settled = cost, YieldToEnd = first.YieldToEnd, BlankName = name });
+        return new Step { Leaving = sizes, Next = first, NextEntering = sizes, NextArrives = true, Settled = cost, YieldToEnd = first.YieldToEnd, BlankName = name };
     }
 
     /// <summary>Puts every possible operation before this step.</summary>
@@ -321,7 +362,7 @@ internal sealed class RouteSearch
         ToleranceGrade held = step.IsLast ? step.Candidate!.HeldGrade(step.Effort) : step.Candidate!.LeftGrade;
         foreach (Candidate before in _candidates)
         {
-            if (before.NoAtAll is not null || !MayPrecede(before, step.Process, step.Tool, held, step.IsLast))
+            if (before.NoAtAll is not null || !MayPrecede(before, step.Candidate!, step.Tool, held, step.IsLast))
             {
                 continue;
             }
@@ -344,15 +385,16 @@ internal sealed class RouteSearch
 
     /// <summary>Whether one process makes sense before another, before any size is looked at.</summary>
     /// <param name="before">The process before.</param>
-    /// <param name="process">The process after it.</param>
+    /// <param name="after">The process after it.</param>
     /// <param name="tool">Its tool; null where the machinist sets the size, or for any tool.</param>
     /// <param name="held">The grade that it holds.</param>
     /// <param name="isLast">Whether it finishes the feature.</param>
-    private static bool MayPrecede(Candidate before, Process process, Tool? tool, ToleranceGrade held, bool isLast)
+    private static bool MayPrecede(Candidate before, Candidate after, Tool? tool, ToleranceGrade held, bool isLast)
     {
+        Process process = after.Process;
         if (process.SizedBy == ToolUse.Drill)
         {
-            return before.Process == process && (tool is null || tool.Stamped > LargestSingleDrill);
+            return false;
         }
 
         if (before.Process == process || (before.Process.SizedBy == ToolUse.Ream && process.SizedBy == ToolUse.Ream))
@@ -361,10 +403,13 @@ internal sealed class RouteSearch
         }
 
         bool drilled = before.Process.SizedBy == ToolUse.Drill;
-        bool coarser = before.LeftGrade > held || (process.StartsRough && before.LeftGrade == held && drilled);
+        // What it can hold with care counts, so that less care never asks for another operation before.
+        ToleranceGrade finest = isLast ? after.HeldGrade(Effort.Special) : held;
+        bool coarser = before.LeftGrade > finest || (process.StartsRough && before.LeftGrade == finest && drilled);
         bool fineEnough = before.Process.LeftGrade <= process.EnterGrade;
         bool smallStep = process.SizedBy is not null || before.LeftGrade.Ordinal - held.Ordinal <= MostGradesGained;
-        bool tooFarForOneReamer = process.SizedBy == ToolUse.Ream && drilled && isLast && held <= ToleranceGrade.It(7) && tool!.Stamped > LargestReamAfterDrill;
+        bool tooFarForOneReamer = process.SizedBy == ToolUse.Ream && before.LeftGrade >= RoughGrade && isLast && held <= ToleranceGrade.It(7)
+            && tool?.Stamped > LargestReamAfterDrill;
         return coarser && fineEnough && smallStep && !tooFarForOneReamer;
     }
 
@@ -373,14 +418,24 @@ internal sealed class RouteSearch
         bool same = between.Length == 0 && machine == step.Machine;
         bool heat = Array.Exists(between, static change => change.Hardens);
         Deviation tolerance = LeftTolerance(before, step, null);
-        Stock need = Need(step, before.Process.Name, step.Window.Most, tolerance, same, heat).Least;
-        MetalWindow entering = Entering(step, need, between);
+        StockNeed need = Need(step, before.Process.Name, step.Reach.Most, tolerance, same, heat);
+        MetalWindow entering = Entering(step, need.Least, between);
         if (before.Process.SizedBy is { } use)
         {
             PrecedeWithTools(step, before, machine, between, changesLeft, entering, use);
             return;
         }
 
+        PrecedeWithSetting(step, before, machine, between, changesLeft, entering, tolerance);
+        if (need.Larger is { } larger)
+        {
+            // The handbook's larger stock stays open to a large lot: more on a finishing cut can save a roughing pass.
+            PrecedeWithSetting(step, before, machine, between, changesLeft, Entering(step, larger, between), tolerance);
+        }
+    }
+
+    private void PrecedeWithSetting(Step step, Candidate before, Machine machine, Change[] between, int changesLeft, MetalWindow entering, Deviation tolerance)
+    {
         Length resolution = tolerance >= Deviation.FromMicrometres(50) ? Hundredth : Micrometre;
         long least = new Length(entering.Least).RoundUp(resolution).Picometres;
         MetalWindow leaving = new(least, least + tolerance.Picometres);
@@ -397,7 +452,7 @@ internal sealed class RouteSearch
     /// <summary>Tolerance that the step before leaves: its grade at the size of the joint, or the range of its tool.</summary>
     private static Deviation LeftTolerance(Candidate before, Step step, MetalWindow? cut) =>
         cut is { } range ? new Deviation(range.Width)
-        : Iso286.TryWidth(MetalWindow.Size(step.Window.Most), before.LeftGrade, out Deviation width) ? width
+        : Iso286.TryWidth(MetalWindow.Size(step.Reach.Most), before.LeftGrade, out Deviation width) ? width
         : before.RoutineWidth!.Value;
 
     private void PrecedeWithTools(Step step, Candidate before, Machine machine, Change[] between, int changesLeft, MetalWindow entering, ToolUse use)
@@ -410,15 +465,18 @@ internal sealed class RouteSearch
 
         bool fits = false;
         long nearest = long.MaxValue;
-        (double Cost, Tool Tool, MetalWindow Leaving)? best = null;
-        foreach (Tool tool in _shop.ToolsNear(use, entering.Sizes(_job.IsInternal)))
+        (double Cost, Drill Drill)? cheapest = null;
+        ReadOnlySpan<Tool> tools = _shop.ToolsNear(use, entering.Sizes(_job.IsInternal));
+        for (int i = tools.Length - 1; i >= 0; i--)
         {
+            Tool tool = tools[i];
             if (tool.Stamped > machine.Largest)
             {
-                break;
+                continue;
             }
 
-            MetalWindow leaving = MetalWindow.Of(SizedCut.Predict(tool, _job.Group, IsCareful(before, Effort.Routine)).Sizes, _job.IsInternal);
+            Drill? drill = use == ToolUse.Drill ? _drills.Of(tool) : null;
+            MetalWindow leaving = drill?.Leaving ?? Cut(before, tool, Effort.Routine);
             if (!entering.Holds(leaving))
             {
                 nearest = Math.Min(nearest, Math.Max(entering.Least - leaving.Least, leaving.Most - entering.Most));
@@ -426,14 +484,23 @@ internal sealed class RouteSearch
             }
 
             fits = true;
-            if (use != ToolUse.Drill)
+            if (drill is null)
             {
                 Push(Before(step, before, machine, tool, leaving, between, changesLeft));
             }
-            else if (DrillingCost(step, before, machine, tool, leaving, between) is { } cost && (best is null || cost < best.Value.Cost))
+            else if (CanDrill(drill, step, between))
             {
                 // A drill ends the way back, alone or with its pilot: of all sizes only the cheapest can belong to a best route.
-                best = (cost, tool, leaving);
+                double after = CostOf(step, Grown(leaving, between), machine != step.Machine || between.Length > 0).PerGoodPiece(step.YieldToEnd, _job.Quantity);
+                if (after >= cheapest?.Cost)
+                {
+                    // A smaller drill leaves this step still more to cut.
+                    break;
+                }
+
+                double drilling = drill.CutMinutes + (drill.Pilot is null ? 0 : drill.PilotMinutes + machine.ToolChangeMinutes);
+                double cost = after + (drilling * machine.RatePerMinute + drill.Wear) / step.YieldToEnd;
+                cheapest = cheapest is null || cost < cheapest.Value.Cost ? (cost, drill) : cheapest;
             }
         }
 
@@ -441,65 +508,24 @@ internal sealed class RouteSearch
         {
             Miss(step, before.Process.Name, nearest);
         }
-        else if (best is { } drill)
+        else if (cheapest is { Drill: var chosen })
         {
-            PushDrilled(Before(step, before, machine, drill.Tool, drill.Leaving, between, changesLeft));
+            PushDrilled(Before(step, before, machine, chosen.Tool, chosen.Leaving, between, changesLeft), chosen);
         }
     }
 
-    /// <summary>What the step, the drill before it and its pilot cost, as far as it depends on the drill; null where the pilot is missing.</summary>
-    private double? DrillingCost(Step step, Candidate before, Machine machine, Tool tool, MetalWindow leaving, Change[] between)
-    {
-        if (step.ChangesLeft > between.Length || _job.Start.Kind != StartKind.Solid || (tool.Stamped > LargestSingleDrill && PilotFor(tool) is null))
-        {
-            return null;
-        }
+    private bool CanDrill(Drill drill, Step step, Change[] between) =>
+        step.ChangesLeft <= between.Length && _job.Start.Kind == StartKind.Solid && drill.CanOpen;
 
-        double cut = CutTime.For(new Cut(before.Process, _data, tool.Stamped, _job.Extent, null, before.Process.LeftRa, Effort.Routine)).Minutes;
-        double pilot = tool.Stamped > LargestSingleDrill ? machine.ToolChangeMinutes + CutTime.For(new Cut(before.Process, _data, PilotFor(tool)!.Stamped, _job.Extent, null, before.Process.LeftRa, Effort.Routine)).Minutes : 0;
-        return CostOf(step, Grown(leaving, between), machine != step.Machine || between.Length > 0).PerGoodPiece(step.YieldToEnd, _job.Quantity)
-            + (cut + pilot) * machine.RatePerMinute / step.YieldToEnd;
-    }
-
-    private void PushDrilled(Step drill)
+    private void PushDrilled(Step step, Drill drill)
     {
-        if (_job.AsksForPosition && !drill.Places)
+        if (_job.AsksForPosition && !step.Places)
         {
             return;
         }
 
-        if (drill.Tool!.Stamped <= LargestSingleDrill)
-        {
-            PushBlank(drill, null, "solid metal");
-            return;
-        }
-
-        Tool pilot = PilotFor(drill.Tool)!;
-        MetalWindow leaving = MetalWindow.Of(SizedCut.Predict(pilot, _job.Group, careful: false).Sizes, _job.IsInternal);
-        PushBlank(Before(drill, drill.Candidate!, drill.Machine!, pilot, leaving, [], 0), null, "solid metal");
-    }
-
-    /// <summary>The drill nearest to the usual share of the size among those that go into solid metal.</summary>
-    private Tool? PilotFor(Tool drill)
-    {
-        Length wanted = new((long)(drill.Stamped.Picometres * PilotShare));
-        Tool? best = null;
-        foreach (Tool tool in _shop.Tools(ToolUse.Drill))
-        {
-            if (tool.Stamped > LargestSingleDrill)
-            {
-                break;
-            }
-
-            if (best is null || Distance(tool) < Distance(best))
-            {
-                best = tool;
-            }
-        }
-
-        return best;
-
-        long Distance(Tool tool) => Math.Abs(tool.Stamped.Picometres - wanted.Picometres);
+        Step first = drill.Pilot is { } pilot ? Before(step, step.Candidate!, step.Machine!, pilot, _drills.Of(pilot).Leaving, [], 0) : step;
+        Push(Blank(first, null, "solid metal"));
     }
 
     private StockNeed Need(Step step, string before, long metal, Deviation tolerance, bool sameClamping, bool afterHeat) =>
@@ -508,8 +534,8 @@ internal sealed class RouteSearch
     /// <summary>The window that must be left by the operation before, with the changes between taken off at their extremes; may be closed.</summary>
     private static MetalWindow Entering(Step step, Stock least, Change[] between)
     {
-        Stock most = step.Process.MostStockAt(MetalWindow.Size(step.Window.Least));
-        MetalWindow window = new(step.Window.Most + least.Picometres, step.Window.Least + most.Picometres);
+        // Counted to the drawing's own limit some stock must be left as well.
+        MetalWindow window = new(Math.Max(step.Reach.Most + least.Picometres, step.Window.Most + Micrometre.Picometres), step.Reach.Least + MostStock(step));
         for (int i = between.Length - 1; i >= 0; i--)
         {
             window = between[i].Before(window);
@@ -518,17 +544,38 @@ internal sealed class RouteSearch
         return window;
     }
 
+    private static long MostStock(Step step) => step.Process.MostStockAt(MetalWindow.Size(step.Reach.Most)).Picometres;
+
+    /// <summary>
+    /// A hone or lap as the last step, held so far inside the drawing's window that it never takes more than it can: it does not open a bore right
+    /// through a wide tolerance. Any other step as it is: a tool of fixed size cuts what it cuts, and a cut to a setting ends at its aim.
+    /// </summary>
+    private Step Held(Step step, MetalWindow entering)
+    {
+        long least = entering.Most - MostStock(step);
+        if (step.Tool is not null || MostStock(step) > LittleStock.Picometres || least <= step.Window.Least)
+        {
+            return step;
+        }
+
+        MetalWindow held = new(least, step.Window.Most);
+        double yield = Yield(step.Candidate!, step.Tool, step.Effort, held, step.Window);
+        return step with { Leaving = held, IsHeldInside = true, Yield = yield, YieldToEnd = yield };
+    }
+
     private Step Before(Step step, Candidate before, Machine machine, Tool? tool, MetalWindow leaving, Change[] between, int changesLeft)
     {
         MetalWindow entering = Grown(leaving, between);
+        step = Held(step, entering);
         bool arrives = machine != step.Machine || between.Length > 0;
-        double yield = tool is null ? Yield(before, null, Effort.Routine, leaving) : 1;
+        double yield = tool is null ? Yield(before, null, Effort.Routine, leaving, leaving) : 1;
         return new Step
         {
             Candidate = before,
             Machine = machine,
             Tool = tool,
             Leaving = leaving,
+            Reach = leaving,
             Next = step,
             NextEntering = entering,
             NextArrives = arrives,

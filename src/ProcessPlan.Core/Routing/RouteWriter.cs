@@ -1,5 +1,6 @@
 using System.Globalization;
 using ProcessPlan.Core.Capability;
+using ProcessPlan.Core.Costing;
 using ProcessPlan.Core.Features;
 using ProcessPlan.Core.Inspection;
 using ProcessPlan.Core.Shop;
@@ -54,9 +55,7 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
     {
         Process process = step.Process;
         StepCost cost = search.CostOf(step, before.NextEntering, before.NextArrives);
-        SizeWindow size = step.Window.Sizes(job.IsInternal);
-        SizeWindow? drawing = step.IsLast && step.ChangesAfter.Length == 0 ? job.Feature.Limits : null;
-        SizeWindow held = drawing ?? size;
+        SizeWindow held = step.Window.Sizes(job.IsInternal);
         ToleranceGrade? grade = step.IsLast ? Iso286.NearestGrade(job.Nominal, held.Width) : step.Candidate!.LeftGrade;
         (Stock? least, Stock? most) = before.NextEntering is { } from
             ? (new Stock(from.Least - step.Window.Most), new Stock(from.Most - step.Window.Least))
@@ -112,7 +111,7 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
                 new Reason("size", $"the size moves by {change.LeastGrowth} to {change.MostGrowth} on {Across} [{change.Origin}]"),
                 new Reason("cost", supplier is null
                     ? "this shop knows no supplier: not in the price"
-                    : $"the larger of the lot charge {supplier.LotCharge} and {job.Quantity} · {supplier.PiecePrice}, over {job.Quantity} pieces"),
+                    : string.Create(CultureInfo.InvariantCulture, $"the larger of the lot charge {supplier.LotCharge} and {job.Quantity} · {supplier.PiecePrice}, over {job.Quantity} pieces")),
             ],
         };
     }
@@ -139,6 +138,11 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
         {
             string effort = step.Effort == Effort.Routine ? "with routine effort" : "with special effort";
             string lost = candidate.GradesLost > 0 ? $" ({candidate.LossReason}: {candidate.GradesLost} grade worse)" : "";
+            if (step.IsHeldInside)
+            {
+                because.Add("held inside the drawing's limits, so that it never has to take more than it can");
+            }
+
             because.Add($"holds {candidate.HeldGrade(step.Effort)} {effort}{lost}, leaves {step.Process.Ra(step.Effort)}");
         }
         else if (most is null)
@@ -208,7 +212,13 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
                 yield return new Reason("stock", line);
             }
 
-            yield return new Reason("stock", $"{process.Name} takes at most {process.MostStockAt(held.Max)} here [{process.Origin}]");
+            if (step.Reach != step.Window)
+            {
+                string how = step.Tool is { } sized ? $"as {sized.Label} is predicted to cut" : $"where it holds {step.Candidate!.HeldWidth(step.Effort).Format()} µm from the near limit";
+                yield return new Reason("stock", $"{new Stock(from.Least - step.Reach.Most)} to {new Stock(from.Most - step.Reach.Least)} {how}");
+            }
+
+            yield return new Reason("stock", $"{process.Name} takes at most {process.MostStockAt(MetalWindow.Size(step.Reach.Most))} here [{process.Origin}]");
         }
 
         yield return new Reason("grade", $"{process.Name}: routine {process.RoutineGrade}, special {process.SpecialGrade?.ToString() ?? "none"}; leaves {process.LeftRa} on the way [{process.Origin}]");
@@ -216,7 +226,12 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
         yield return new Reason("minutes", string.Create(CultureInfo.InvariantCulture,
             $"cut {cost.Cutting.Minutes:0.00} + tool change {cost.Machine.ToolChangeMinutes:0.00} + checking {cost.Checking:0.00} + handling {cost.Handling:0.00} = {cost.Minutes:0.00} min"));
         yield return new Reason("cost", string.Create(CultureInfo.InvariantCulture,
-            $"{cost.Machine.RatePerHour:0.##}/60 · ({cost.Minutes:0.00} min / yield to the end {step.YieldToEnd:0.0000} + set-up {cost.SetUp:0} min / {job.Quantity}) = {cost.PerGoodPiece(step.YieldToEnd, job.Quantity):0.00} {shop.Currency}"));
+            $"({cost.Machine.RatePerHour:0.##}/60 · {cost.Minutes:0.00} min + wear {cost.Wear:0.000}) / yield to the end {step.YieldToEnd:0.0000} + {cost.Machine.RatePerHour:0.##}/60 · set-up {cost.SetUp:0} min / {job.Quantity} = {cost.PerGoodPiece(step.YieldToEnd, job.Quantity):0.00} {shop.Currency}"));
+        if (cost.Wear > 0)
+        {
+            yield return new Reason("cost", $"wear: {ToolWear.Explain(cost.Cut, step.Tool, cost.Cutting.Minutes)} {shop.Currency} [{ToolWear.Citation}]");
+        }
+
         yield return new Reason("inspection", $"{instrument.Name}: U {instrument.Uncertainty.Format()} µm against {held.Width.Format()} µm [{instrument.Origin}]");
     }
 
@@ -224,9 +239,10 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
     {
         if (step.IsLast)
         {
-            return job.Feature.Class is { } toleranceClass && step.ChangesAfter.Length == 0
+            string inside = step.IsHeldInside ? $"as much as it can by the greatest stock of {step.Process.Name}: " : "";
+            return inside + (job.Feature.Class is { } toleranceClass && step.ChangesAfter.Length == 0
                 ? $"the drawing's limits, {toleranceClass} [{Iso286.Cite(job.Nominal, toleranceClass.Grade)}; {Iso286.Cite(job.Nominal, toleranceClass)}]"
-                : step.ChangesAfter.Length == 0 ? "the drawing's limits" : "the drawing's limits, less what comes after at its extremes";
+                : step.ChangesAfter.Length == 0 ? "the drawing's limits" : "the drawing's limits, less what comes after at its extremes");
         }
 
         if (step.Tool is { } tool)

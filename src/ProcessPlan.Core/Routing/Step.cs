@@ -1,12 +1,15 @@
 using ProcessPlan.Core.Capability;
+using ProcessPlan.Core.Inspection;
 using ProcessPlan.Core.Shop;
 using ProcessPlan.Core.Values;
 
 namespace ProcessPlan.Core.Routing;
 
 /// <summary>One step of a chain that grows backwards from the drawing; the last to be put on is the blank.</summary>
-internal sealed class Step
+internal sealed record Step
 {
+    private (MetalWindow? Window, double Minutes) _checking;
+
     /// <summary>The process, or null for the blank.</summary>
     public Candidate? Candidate { get; init; }
 
@@ -18,6 +21,15 @@ internal sealed class Step
 
     /// <summary>What it leaves; for a blank its own limits, null in solid metal.</summary>
     public MetalWindow? Leaving { get; init; }
+
+    /// <summary>
+    /// Where the cut really ends: the window itself for a step on the way; for the last one only what its tool is predicted to cut of the drawing's
+    /// window, or what its process holds from the near limit, so that a wider tolerance asks for nothing more.
+    /// </summary>
+    public MetalWindow Reach { get; init; }
+
+    /// <summary>Whether the last step is held to less than the drawing allows, because it takes so little.</summary>
+    public bool IsHeldInside { get; init; }
 
     /// <summary>The step after it; null for the last one.</summary>
     public Step? Next { get; init; }
@@ -48,6 +60,18 @@ internal sealed class Step
 
     /// <summary>What a blank is, in words.</summary>
     public string? BlankName { get; init; }
+
+    /// <summary>Minutes for measuring one piece; it depends on the step's own window only, and is asked for often.</summary>
+    public double Checking(bool isInternal)
+    {
+        if (_checking.Window != Leaving)
+        {
+            SizeWindow sizes = Window.Sizes(isInternal);
+            _checking = (Leaving, Instrument.For(isInternal, sizes.Max, sizes.Width).Instrument.MinutesPerCheck * Checks.PerPiece(Process, Effort));
+        }
+
+        return _checking.Minutes;
+    }
 
     public Process Process => Candidate!.Process;
 

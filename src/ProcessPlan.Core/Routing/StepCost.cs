@@ -1,6 +1,5 @@
 using ProcessPlan.Core.Capability;
 using ProcessPlan.Core.Costing;
-using ProcessPlan.Core.Inspection;
 using ProcessPlan.Core.Shop;
 using ProcessPlan.Core.Values;
 
@@ -13,7 +12,8 @@ namespace ProcessPlan.Core.Routing;
 /// <param name="Handling">Minutes for loading; zero where the part is on the machine already.</param>
 /// <param name="Machine">The machine.</param>
 /// <param name="SetUp">Minutes once a lot; zero where the part is on the machine already.</param>
-internal readonly record struct StepCost(Cut Cut, CutTime Cutting, double Checking, double Handling, Machine Machine, double SetUp)
+/// <param name="Wear">Cost of the wear on the tool.</param>
+internal readonly record struct StepCost(Cut Cut, CutTime Cutting, double Checking, double Handling, Machine Machine, double SetUp, double Wear)
 {
     /// <summary>Run time of a piece.</summary>
     public double Minutes => Cutting.Minutes + Machine.ToolChangeMinutes + Checking + Handling;
@@ -27,21 +27,20 @@ internal readonly record struct StepCost(Cut Cut, CutTime Cutting, double Checki
     {
         Process process = step.Process;
         MetalWindow window = step.Window;
-        SizeWindow leaving = window.Sizes(job.IsInternal);
         Cut cut = new(
             process,
             data,
-            step.Tool?.Stamped ?? (job.IsInternal ? leaving.Max : MetalWindow.Size(entering?.Most ?? window.Most)),
+            step.Tool?.Stamped ?? MetalWindow.Size(job.IsInternal ? step.Reach.Least : entering?.Most ?? window.Most),
             job.Extent,
-            entering is { } from ? new Stock(from.Most - window.Least) : null,
+            entering is { } from ? new Stock(from.Most - step.Reach.Least) : null,
             step.IsLast ? process.Ra(step.Effort) : process.LeftRa,
             step.Effort);
-        (Instrument instrument, _) = Instrument.For(job.IsInternal, leaving.Max, leaving.Width);
         Machine machine = step.Machine!;
-        return new StepCost(cut, CutTime.For(cut), instrument.MinutesPerCheck * Checks.PerPiece(process, step.Effort),
-            arrives ? machine.HandlingMinutes : 0, machine, arrives ? machine.SetUpMinutes : 0);
+        CutTime time = CutTime.For(cut);
+        return new StepCost(cut, time, step.Checking(job.IsInternal),
+            arrives ? machine.HandlingMinutes : 0, machine, arrives ? machine.SetUpMinutes : 0, ToolWear.Of(cut, step.Tool, time.Minutes));
     }
 
-    /// <summary>Cost of a good piece: run time over the yield to the end of the route, and its share of the set-up.</summary>
-    public double PerGoodPiece(double yieldToEnd, int quantity) => Machine.RatePerMinute * (Minutes / yieldToEnd + SetUp / quantity);
+    /// <summary>Cost of a good piece: run time and wear over the yield to the end of the route, and its share of the set-up.</summary>
+    public double PerGoodPiece(double yieldToEnd, int quantity) => (Machine.RatePerMinute * Minutes + Wear) / yieldToEnd + Machine.RatePerMinute * SetUp / quantity;
 }

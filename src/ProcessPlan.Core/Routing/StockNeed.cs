@@ -17,6 +17,12 @@ internal readonly record struct StockNeed
 
     private const double SameClampingShare = 0.06;
     private const double TurretIndex = 50;
+
+    /// <summary>Setting error on a magnetic table (up to 10 in Kosilova and Meshcheryakov; from memory).</summary>
+    private const double MagneticTable = 10;
+
+    /// <summary>The handbook leaves so much more for grinding hardened metal.</summary>
+    private const long GrindingAfterHeat = 100;
     private const double BarBendPerMm = 1.0;
     private const double CentresFromRatio = 4;
     private const double HeatBendPerMm = 0.5;
@@ -63,6 +69,9 @@ internal readonly record struct StockNeed
     /// <summary>The least stock that is planned with.</summary>
     public Stock Least => Quantity <= SmallLot && TableLeast is { } table && table > Analytical ? table : Analytical;
 
+    /// <summary>The handbook's larger stock where a large lot may keep it but need not; null where it is no choice.</summary>
+    public Stock? Larger => Quantity > SmallLot && TableLeast is { } table && table > Analytical ? table : null;
+
     /// <summary>What <paramref name="process"/> must at least remove after <paramref name="before"/>.</summary>
     /// <param name="process">The operation.</param>
     /// <param name="before">The operation or blank before, as the surface table calls it.</param>
@@ -86,8 +95,9 @@ internal readonly record struct StockNeed
         double setting = process.SelfGuided || process.Ability == "drill" ? 0 : SettingError(process, job, size, sameClamping, blank);
         double layer = keepLayer ? state.LayerMicrometres : 0;
         bool flat = !job.Feature.IsRound;
-        double spatial = flat ? error + setting : Math.Sqrt(error * error + setting * setting);
-        (Stock? table, Citation? origin) = HandbookStock(process.Name, before, size);
+        (Stock? table, Citation? origin) = HandbookStock(process.Name, before, job.Nominal);
+        bool grinds = process.Ability.StartsWith("grind", StringComparison.Ordinal);
+        table = afterHeat && grinds ? table + Stock.FromMicrometres(GrindingAfterHeat) : table;
         return new StockNeed
         {
             Rz = state.RzMicrometres,
@@ -96,13 +106,17 @@ internal readonly record struct StockNeed
             Setting = setting,
             Flat = flat,
             Surface = state,
-            Analytical = new Estimate(2 * (state.RzMicrometres + layer + spatial)).RoundUp(new Length(Length.PicometresPerMicrometre)),
+            Analytical = Twice(state.RzMicrometres, layer, error, setting, flat).RoundUp(new Length(Length.PicometresPerMicrometre)),
             Table = table,
             TableOrigin = origin,
             TableLeast = table is { } basic && basic.Picometres > toleranceBefore.Picometres ? new Stock(basic.Picometres - toleranceBefore.Picometres) : null,
             Quantity = job.Quantity,
         };
     }
+
+    /// <summary>2·(Rz + h + √(ρ² + ε²)) on a round feature; on a flat one the errors lie in one line, 2·(Rz + h + ρ + ε).</summary>
+    internal static Estimate Twice(double rz, double layer, double error, double setting, bool flat) =>
+        new(2 * (rz + layer + (flat ? error + setting : Math.Sqrt(error * error + setting * setting))));
 
     /// <summary>The sum with its figures and where they come from.</summary>
     public IEnumerable<string> Explain()
@@ -113,7 +127,7 @@ internal readonly record struct StockNeed
         yield return $"least stock, analytical: 2·(Rz {Text(Rz)} + h {Text(Layer)}{spatial}) = {Analytical.Picometres / Length.PicometresPerMicrometre} µm [{Surface.Origin}]";
         if (Table is { } table)
         {
-            string used = Least == Analytical ? "not used" : $"used for lots up to {SmallLot}";
+            string used = Larger is not null ? "kept in a large lot only where that is cheaper" : Least == Analytical ? "not used" : $"used for lots up to {SmallLot}";
             yield return $"handbook stock {table}, {used} [{TableOrigin}]";
         }
     }
@@ -157,13 +171,19 @@ internal readonly record struct StockNeed
 
     private static double SettingError(Process process, Job job, Length size, bool sameClamping, bool blank)
     {
-        if (IsOnCentres(job))
+        // Cylindrical grinding runs on dead centres whatever the length: no radial error.
+        if (IsOnCentres(job) || process.Ability == "grind-round")
         {
             return 0;
         }
 
+        if (process.Ability == "grind-flat")
+        {
+            return MagneticTable;
+        }
+
         (double Hot, double Pre, double Finish) row = Chuck.TryFind(size, out (double Hot, double Pre, double Finish) found) ? found : (600, 140, 70);
         double fresh = blank ? row.Hot : process.RoutineGrade <= ToleranceGrade.It(8) ? row.Finish : row.Pre;
-        return sameClamping ? SameClampingShare * row.Pre + TurretIndex : fresh;
+        return sameClamping ? SameClampingShare * row.Pre + (process.Ability == "grind-hole" ? 0 : TurretIndex) : fresh;
     }
 }

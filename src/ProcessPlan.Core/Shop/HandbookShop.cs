@@ -28,7 +28,7 @@ public static class HandbookShop
             string note = row["note"];
             Standing standing = note.Contains("from memory", StringComparison.Ordinal) ? Standing.FromMemory : table.Standing;
             string designation = row["designation"];
-            materials.Add(new Material(designation, row.IsEmpty("aliases") ? [] : row["aliases"].Split(','), row["group"], row["iso513"],
+            materials.Add(new Material(designation, row.IsEmpty("aliases") ? [] : [.. row["aliases"].Split(',')], row["group"], row["iso513"],
                 row.DoubleOrNull("hbFrom"), row.DoubleOrNull("hbTo"), row.Double("expansion"), row["skin"] == "yes", note,
                 table.Cite(designation) with { Standing = standing }));
         }
@@ -41,7 +41,7 @@ public static class HandbookShop
         List<Machine> machines = [];
         foreach (TableRow row in table.Rows)
         {
-            machines.Add(new Machine(Spaced(row["name"]), row["abilities"].Split(','), row.Decimal("rate"), row.Double("setUp"), row.Double("handling"),
+            machines.Add(new Machine(Spaced(row["name"]), [.. row["abilities"].Split(',')], row.Decimal("rate"), row.Double("setUp"), row.Double("handling"),
                 row.Double("toolChange"), Length.FromMillimetres(row.Decimal("from")), Length.FromMillimetres(row.Decimal("to")), row.Double("power")));
         }
 
@@ -65,7 +65,8 @@ public static class HandbookShop
             for (decimal size = row.Decimal("from"); size <= to; size += step)
             {
                 Length stamped = Length.FromMillimetres(size);
-                tools.Add(new Tool(Spaced(row["name"]), use, stamped, OwnSize(stamped, row["made"]), row["made"], row["material"]));
+                tools.Add(new Tool(Spaced(row["name"]), use, stamped, OwnSize(stamped, row["made"]), row["made"], row["material"],
+                    row.Decimal("price") + row.Decimal("perMm") * size, row.Double("life")));
             }
         }
 

@@ -14,7 +14,7 @@ namespace ProcessPlan.Core.Shop;
 /// <param name="PowerKw">Power at the spindle.</param>
 public sealed record Machine(
     string Name,
-    IReadOnlyList<string> Abilities,
+    ValueList<string> Abilities,
     decimal RatePerHour,
     double SetUpMinutes,
     double HandlingMinutes,

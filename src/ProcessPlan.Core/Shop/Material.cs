@@ -1,4 +1,5 @@
 using ProcessPlan.Core.Standards;
+using ProcessPlan.Core.Values;
 
 namespace ProcessPlan.Core.Shop;
 
@@ -15,7 +16,7 @@ namespace ProcessPlan.Core.Shop;
 /// <param name="Origin">Where the figures come from.</param>
 public sealed record Material(
     string Designation,
-    IReadOnlyList<string> Aliases,
+    ValueList<string> Aliases,
     string Group,
     string Iso513,
     double? HbFrom,

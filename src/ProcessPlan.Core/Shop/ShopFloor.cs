@@ -28,7 +28,7 @@ public sealed class ShopFloor
             _tools[use.Key] = sorted;
         }
 
-        Names = new MaterialNames(materials.Select(static material => (material.Designation, material.Aliases)));
+        Names = NamesOf(materials);
     }
 
     public string Name { get; }
@@ -46,6 +46,13 @@ public sealed class ShopFloor
 
     /// <summary>The names under which a feature line may call the materials.</summary>
     public MaterialNames Names { get; }
+
+    /// <summary>The material of a line that names none: C45 where the shop has it, else its first one.</summary>
+    public Material UsualMaterial => _materials.GetValueOrDefault(HandbookShop.DefaultMaterial) ?? Materials[0];
+
+    /// <summary>The names of materials, for reading a line without planning it.</summary>
+    public static MaterialNames NamesOf(IEnumerable<Material> materials) =>
+        new(materials.Select(static material => (material.Designation, (IReadOnlyList<string>)material.Aliases)));
 
     /// <exception cref="KeyNotFoundException">The shop has no such material.</exception>
     public Material Material(string designation) => _materials[designation];
@@ -102,7 +109,7 @@ public sealed class ShopFloor
 /// <param name="Sizes">in these diameters, by size,</param>
 /// <param name="Deviation">with this permissible deviation either way.</param>
 /// <param name="Origin">Where the figures come from.</param>
-public sealed record BarSeries(Length Over, Length UpTo, IReadOnlyList<Length> Sizes, Deviation Deviation, Citation Origin);
+public sealed record BarSeries(Length Over, Length UpTo, ValueList<Length> Sizes, Deviation Deviation, Citation Origin);
 
 /// <param name="Size">Nominal diameter.</param>
 /// <param name="Limits">Smallest and largest diameter as delivered.</param>

@@ -94,7 +94,7 @@ internal static class Iso286Tables
         return shafts;
     }
 
-    private static long[]?[] ByGrade(params ReadOnlySpan<(int Grade, PublishedTable Table, string Column)> columns)
+    private static long[]?[] ByGrade(params (int Grade, PublishedTable Table, string Column)[] columns)
     {
         long[]?[] byGrade = new long[]?[ToleranceGrade.Count];
         foreach ((int grade, PublishedTable table, string column) in columns)

@@ -76,10 +76,13 @@ public sealed class PublishedTable
         bool inHead = true;
         List<TableRow> rows = [];
         int number = 0;
-        foreach (ReadOnlySpan<char> raw in text.AsSpan().EnumerateLines())
+        ReadOnlySpan<char> rest = text;
+        while (!rest.IsEmpty)
         {
             number++;
-            ReadOnlySpan<char> line = raw.Trim();
+            int end = rest.IndexOf('\n');
+            ReadOnlySpan<char> line = (end < 0 ? rest : rest[..end]).Trim();
+            rest = end < 0 ? [] : rest[(end + 1)..];
             if (line.IsEmpty || line[0] == '#')
             {
                 continue;

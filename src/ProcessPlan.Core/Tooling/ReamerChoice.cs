@@ -31,25 +31,38 @@ public static class ReamerChoice
         return true;
     }
 
-    /// <summary>The best suited reamer: the one made for this class of hole first, else the largest, which has the longest life.</summary>
+    /// <summary>
+    /// The best suited reamer: the one that leaves the largest share of good holes, to a ten-thousandth; among equals the one made for this class of
+    /// hole, else the smallest, which asks least of the hole before it (every suited one has its wear left). Behind it the smallest of all, if that
+    /// is another: it may be the only one that the drills of the crib can serve.
+    /// </summary>
     /// <param name="near">Reamers of about this size.</param>
     /// <param name="hole">Limits of the hole.</param>
     /// <param name="asked">The class asked for, if any.</param>
-    public static Tool? Best(ReadOnlySpan<Tool> near, SizeWindow hole, ToleranceClass? asked)
+    /// <param name="yield">Share of good holes that a reamer leaves.</param>
+    public static IEnumerable<Tool> Best(ReadOnlySpan<Tool> near, SizeWindow hole, ToleranceClass? asked, Func<Tool, double> yield)
     {
+        const int YieldPlaces = 4;
         Tool? best = null;
-        bool bestIsMadeFor = false;
+        Tool? smallest = null;
+        (double Yield, bool MadeFor, Length Size) merit = default;
         foreach (Tool tool in near)
         {
-            bool madeFor = asked is { } toleranceClass && tool.Made == toleranceClass.ToString();
-            bool better = best is null || (madeFor && !bestIsMadeFor) || (madeFor == bestIsMadeFor && tool.Own.Max > best.Own.Max);
-            if (better && Suits(tool, hole, out _))
+            if (!Suits(tool, hole, out _))
             {
-                (best, bestIsMadeFor) = (tool, madeFor);
+                continue;
+            }
+
+            (double Yield, bool MadeFor, Length Size) own =
+                (Math.Round(yield(tool), YieldPlaces), asked is { } toleranceClass && tool.Made == toleranceClass.ToString(), new Length(-tool.Own.Max.Picometres));
+            smallest = smallest is null || tool.Own.Max < smallest.Own.Max ? tool : smallest;
+            if (best is null || own.CompareTo(merit) > 0)
+            {
+                (best, merit) = (tool, own);
             }
         }
 
-        return best;
+        return best is null ? [] : best == smallest ? [best] : [best, smallest!];
     }
 
     /// <summary>A quarter of the hole tolerance whose 35 % is the reamer's own tolerance.</summary>

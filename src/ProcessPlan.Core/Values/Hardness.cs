@@ -28,6 +28,20 @@ public readonly record struct Hardness(long Tenths, HardnessScale Scale)
 
     public double Points => Tenths / 10.0;
 
+    /// <summary>The hardness of so many points, where they lie on the scale and are exact to the tenth.</summary>
+    public static bool TryCreate(ExactDecimal points, HardnessScale scale, out Hardness hardness)
+    {
+        bool exact = points.TryScale(10, out long tenths);
+        hardness = new Hardness(tenths, scale);
+        (int least, int most) = Range(scale);
+        return exact && tenths >= 10 * least && tenths <= 10 * most;
+    }
+
+    /// <summary>The points that a scale is used for, in words: "20 to 70 HRC".</summary>
+    public static string RangeOf(HardnessScale scale) => $"{Range(scale).Least} to {Range(scale).Most} {scale}";
+
+    private static (int Least, int Most) Range(HardnessScale scale) => scale == HardnessScale.HRC ? (20, 70) : (30, 1000);
+
     /// <summary>
     /// Reads <c>58HRC</c>, <c>28,5 HRC</c>, <c>240 HB</c>, <c>240 HBW</c> or <c>700 HV</c>, in any case of letters, from the start of
     /// <paramref name="text"/>.

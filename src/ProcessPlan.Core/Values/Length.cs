@@ -25,9 +25,9 @@ public readonly record struct Length(long Picometres) : IComparable<Length>
     /// <exception cref="ArgumentOutOfRangeException">The value is finer than a picometre or out of range.</exception>
     public static Length FromMillimetres(decimal millimetres)
     {
-        decimal picometres = millimetres * PicometresPerMillimetre;
-        return picometres == decimal.Truncate(picometres) && Math.Abs(picometres) <= long.MaxValue
-            ? new Length((long)picometres)
+        const decimal Most = (decimal)long.MaxValue / PicometresPerMillimetre;
+        return Math.Abs(millimetres) <= Most && decimal.IsInteger(millimetres * PicometresPerMillimetre)
+            ? new Length((long)(millimetres * PicometresPerMillimetre))
             : throw new ArgumentOutOfRangeException(nameof(millimetres), millimetres, "A length holds nine decimal places of a millimetre.");
     }
 

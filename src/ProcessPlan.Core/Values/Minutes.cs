@@ -10,8 +10,8 @@ public readonly record struct Minutes(double Value)
 
     public static Minutes operator *(Minutes minutes, double factor) => new(minutes.Value * factor);
 
-    /// <summary>Two decimals below ten minutes, one below a hundred, whole minutes above.</summary>
-    public string Format() => Value.ToString(Value < 10 ? "0.00" : Value < 100 ? "0.0" : "0", CultureInfo.InvariantCulture);
+    /// <summary>Three digits: two decimals below ten minutes, one below a hundred, whole minutes above, by the value as it is shown.</summary>
+    public string Format() => Value.ToString(Value < 9.995 ? "0.00" : Value < 99.95 ? "0.0" : "0", CultureInfo.InvariantCulture);
 
     public override string ToString() => Format() + " min";
 }

@@ -12,5 +12,5 @@ public readonly record struct Money(decimal Amount, string Currency)
 
     public string Format() => Rounded.ToString("0.00", CultureInfo.InvariantCulture);
 
-    public override string ToString() => $"{Format()} {Currency}";
+    public override string ToString() => $"{Format()} {Currency}".TrimEnd();
 }

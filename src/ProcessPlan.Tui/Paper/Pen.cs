@@ -7,12 +7,29 @@ internal sealed record Pen
 {
     public static readonly Pen Blocks = new()
     {
-        Line = '─', ZeroLine = '│', Zone = '▒', Metal = '█', Aim = '◆', Block = '█', Pointer = '▸', Tick = '┴', More = '↓',
+        Line = '─',
+        ZeroLine = '│',
+        Zone = '▒',
+        Metal = '█',
+        Aim = '◆',
+        Block = '█',
+        Pointer = '▸',
+        Tick = '┴',
+        More = '↓',
     };
 
     public static readonly Pen Ascii = new()
     {
-        IsAscii = true, Line = '-', ZeroLine = '|', Zone = '=', Metal = '#', Aim = 'o', Block = '#', Pointer = '>', Tick = '+', More = 'v',
+        IsAscii = true,
+        Line = '-',
+        ZeroLine = '|',
+        Zone = '=',
+        Metal = '#',
+        Aim = 'o',
+        Block = '#',
+        Pointer = '>',
+        Tick = '+',
+        More = 'v',
     };
 
     public bool IsAscii { get; private init; }

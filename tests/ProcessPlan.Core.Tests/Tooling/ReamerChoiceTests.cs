@@ -1,0 +1,71 @@
+using ProcessPlan.Core.Shop;
+using ProcessPlan.Core.Standards;
+using ProcessPlan.Core.Tooling;
+using ProcessPlan.Core.Values;
+
+namespace ProcessPlan.Core.Tests.Tooling;
+
+public class ReamerChoiceTests
+{
+    private static readonly ShopFloor Floor = HandbookShop.Load();
+
+    // A stock H7 reamer must not be handed to an M7, N7, P7, F8 or G6 hole (needs of the trade); H7, H8 and H9 are what it is for or can serve.
+    [Theory]
+    [InlineData("H7", true)]
+    [InlineData("H8", true)]
+    [InlineData("H9", true)]
+    [InlineData("H6", false)]
+    [InlineData("JS7", false)]
+    [InlineData("K7", false)]
+    [InlineData("M7", false)]
+    [InlineData("N7", false)]
+    [InlineData("P7", false)]
+    [InlineData("G6", false)]
+    [InlineData("F8", false)]
+    public void Suits_AStockH7Reamer_OnlyHolesWhoseLimitsHoldIt(string hole, bool suits)
+    {
+        foreach (Tool reamer in Floor.Tools(ToolUse.Ream).Where(tool => tool.Made == "H7" && tool.Stamped.Millimetres > 3))
+        {
+            ReamerChoice.Suits(reamer, Hole(reamer.Stamped, hole), out string because).Should().Be(suits, "{0} in {1}: {2}", reamer.Label, hole, because);
+            because.Should().NotBeEmpty();
+        }
+    }
+
+    // 10 D8 asks for a reamer of 10.050 to 10.058 (Dormer); the stock size 10.05 with +0/+5 covers 10.050 to 10.055.
+    [Fact]
+    public void Suits_TheHundredthStepReamer_For10D8Is10Point05()
+    {
+        SizeWindow hole = Hole(Length.FromMillimetres(10), "D8");
+        Tool[] suited = [.. Floor.Tools(ToolUse.Ream).Where(tool => ReamerChoice.Suits(tool, hole, out _))];
+        suited.Should().Contain(tool => tool.Stamped == Length.FromMillimetres(10.05m));
+        suited.Should().OnlyContain(tool => tool.Own.Max <= Length.FromMillimetres(10.058m), "DIN 1420");
+    }
+
+    [Fact]
+    public void Best_EqualYields_IsTheReamerMadeForTheClassThenTheSmallest()
+    {
+        SizeWindow hole = Hole(Length.FromMillimetres(10), "H7");
+        ToleranceClass.TryRead("H7", out ToleranceClass h7, out _);
+        Tool[] near = [.. Floor.Tools(ToolUse.Ream).Where(tool => tool.Stamped.Millimetres is > 9.9m and < 10.1m)];
+        ReamerChoice.Best(near, hole, h7, static _ => 1).First().Label.Should().Be("machine reamer 10 H7");
+        SizeWindow wide = Hole(Length.FromMillimetres(10), "H10");
+        Tool smallest = ReamerChoice.Best(near, wide, null, static _ => 1).Single();
+        near.Where(tool => ReamerChoice.Suits(tool, wide, out _)).Should().HaveCountGreaterThan(2).And.OnlyContain(tool => tool.Own.Max >= smallest.Own.Max);
+    }
+
+    [Fact]
+    public void Best_ABetterYield_GoesFirstAndTheSmallestStaysBehindIt()
+    {
+        SizeWindow hole = Hole(Length.FromMillimetres(10), "H9");
+        Tool[] near = [.. Floor.Tools(ToolUse.Ream).Where(tool => tool.Stamped.Millimetres is > 9.9m and < 10.1m)];
+        Tool best = Floor.Tools(ToolUse.Ream).Single(tool => tool.Stamped == Length.FromMillimetres(10.02m));
+        ReamerChoice.Best(near, hole, null, tool => tool == best ? 0.99 : 0.98).Select(tool => tool.Label).Should().Equal(best.Label, "machine reamer 10 H7");
+        ReamerChoice.Best([], hole, null, static _ => 1).Should().BeEmpty();
+    }
+
+    private static SizeWindow Hole(Length nominal, string hole)
+    {
+        ToleranceClass.TryRead(hole, out ToleranceClass toleranceClass, out _).Should().BeTrue();
+        return Iso286.Find(nominal, toleranceClass).LimitsAt(nominal);
+    }
+}
