@@ -39,13 +39,20 @@ internal sealed class Bench
     private string _draft = "";
     private int _recall;
 
-    public Bench(MaterialNames materials, LengthUnit unit = LengthUnit.Millimetre)
+    /// <param name="materials">The materials that a line may name.</param>
+    /// <param name="line">The line that stands there at first, not read yet.</param>
+    /// <param name="unit">The unit shown at first.</param>
+    public Bench(MaterialNames materials, string line = "", LengthUnit unit = LengthUnit.Millimetre)
     {
         _materials = materials;
+        Text = line;
         Unit = unit;
     }
 
-    public string Text { get; private set; } = "";
+    public string Text { get; private set; }
+
+    /// <summary>Whether the text has been read at all; only the first one stands unread for a moment.</summary>
+    public bool IsRead { get; private set; }
 
     /// <summary>What is wrong with the text; nothing for a text that was read, and for an empty one.</summary>
     public IReadOnlyList<Problem> Problems { get; private set; } = [];
@@ -94,12 +101,12 @@ internal sealed class Bench
     /// <summary>Takes the text as it stands after a key. A text that was read waits for its answer from then on.</summary>
     public void Type(string text)
     {
-        if (text == Text)
+        if (IsRead && text == Text)
         {
             return;
         }
 
-        Text = text;
+        (Text, IsRead) = (text, true);
         Problems = [];
         Waiting = null;
         if (string.IsNullOrWhiteSpace(text))

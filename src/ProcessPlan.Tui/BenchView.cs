@@ -37,13 +37,17 @@ internal sealed class BenchView : Runnable
         Add(_field);
     }
 
-    /// <summary>Begins with the line that stands in the field; the screen must run by then.</summary>
+    /// <summary>Reads the line that the field starts with, once the screen has been painted: a person can type before the first plan is there.</summary>
     protected override void OnIsRunningChanged(bool newIsRunning)
     {
         base.OnIsRunningChanged(newIsRunning);
         if (newIsRunning)
         {
-            Read(_field.Text);
+            App?.AddTimeout(TimeSpan.Zero, () =>
+            {
+                Read(_field.Text);
+                return false;
+            });
         }
     }
 

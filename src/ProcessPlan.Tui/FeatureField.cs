@@ -50,23 +50,25 @@ internal sealed class FeatureField : TextField
 
     protected override bool OnKeyDown(Key key) => _take(key) || base.OnKeyDown(key);
 
-    /// <summary>The library opens a menu of its own on the right button: it knows nothing of our keys, so it stays shut.</summary>
     protected override bool OnMouseEvent(Mouse mouse)
     {
         SuperView?.SetNeedsDraw();
-        return (mouse.Flags & (MouseFlags.RightButtonPressed | MouseFlags.RightButtonClicked | MouseFlags.RightButtonReleased)) != 0 || base.OnMouseEvent(mouse);
+        return base.OnMouseEvent(mouse);
     }
 
-    /// <summary>The library marks the whole text when the field is entered, and the next letter would wipe it out.</summary>
+    /// <summary>
+    /// In place of what the library does here: it marks the whole text, so that the next letter would wipe it out, and builds a menu that knows nothing
+    /// of our keys.
+    /// </summary>
     protected override void OnHasFocusChanged(bool newHasFocus, View? previousFocusedView, View? focusedView)
     {
-        int caret = InsertionPoint;
-        base.OnHasFocusChanged(newHasFocus, previousFocusedView, focusedView);
-        if (newHasFocus)
+        if (App?.Mouse.IsGrabbed(this) == true)
         {
-            ClearAllSelection();
-            InsertionPoint = caret;
+            App.Mouse.UngrabMouse();
         }
+
+        ClearAllSelection();
+        InsertionPoint = Math.Min(InsertionPoint, Text.Length); // setting it shows or hides the caret
     }
 
     protected override bool OnDrawingContent(DrawContext? context)

@@ -18,10 +18,10 @@ public static class Screen
     private static readonly TimeSpan LongestLeave = TimeSpan.FromSeconds(2);
 
     /// <summary>Runs the screen until it is left.</summary>
-    /// <param name="shop">What the plans are made from.</param>
+    /// <param name="openShop">Opens what the plans are made from; called once, aside, while the terminal is being prepared.</param>
     /// <param name="options">How the screen looks and starts.</param>
     /// <returns>0 after a normal end, also by a signal; else 3 with one sentence on standard error.</returns>
-    public static int Run(ShopFloor shop, ScreenOptions options)
+    public static int Run(Func<ShopFloor> openShop, ScreenOptions options)
     {
         if (Environment.GetEnvironmentVariable("TERM") is null or "" or "dumb" && !OperatingSystem.IsWindows())
         {
@@ -31,7 +31,7 @@ public static class Screen
         try
         {
             ForeignSettings.KeepOut(typeof(IApplication).Module);
-            return Show(shop, options);
+            return Show(Task.Run(openShop), options);
         }
         catch (Exception fault)
         {
@@ -47,7 +47,7 @@ public static class Screen
 
     /// <summary>Apart, so that the library is not touched before its settings are kept out.</summary>
     [MethodImpl(MethodImplOptions.NoInlining)]
-    private static int Show(ShopFloor shop, ScreenOptions options)
+    private static int Show(Task<ShopFloor> opening, ScreenOptions options)
     {
         if (!Driver.IsAttachedToTerminal(out _, out _))
         {
@@ -61,7 +61,8 @@ public static class Screen
         {
             app.Init();
             app.Driver!.Force16Colors = true;
-            using BenchView view = new(new Bench(shop.Names, options.Unit), options, feature => Planner.Plan(feature, shop, Routes), static work => Task.Run(work));
+            ShopFloor shop = opening.GetAwaiter().GetResult();
+            using BenchView view = new(new Bench(shop.Names, options.Line, options.Unit), options, feature => Planner.Plan(feature, shop, Routes), static work => Task.Run(work));
             foreach (PosixSignal signal in (PosixSignal[])[PosixSignal.SIGTERM, PosixSignal.SIGHUP, PosixSignal.SIGINT, PosixSignal.SIGQUIT])
             {
                 signals.Add(PosixSignalRegistration.Create(signal, context =>

@@ -23,7 +23,7 @@ internal static class Screens
     }
 
     [MethodImpl(MethodImplOptions.NoInlining)]
-    private static int Open(bool ascii, LengthUnit? unit) => Screen.Run(HandbookShop.Load(), new ScreenOptions
+    private static int Open(bool ascii, LengthUnit? unit) => Screen.Run(HandbookShop.Load, new ScreenOptions
     {
         Ascii = ascii,
         Unit = unit ?? LengthUnit.Millimetre,

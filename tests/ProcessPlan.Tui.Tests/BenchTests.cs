@@ -34,6 +34,16 @@ public class BenchTests
     }
 
     [Fact]
+    public void The_first_line_stands_there_before_it_is_read()
+    {
+        Bench bench = new(Terminal.Shop.Names, Line);
+        (bench.Text, bench.IsRead).Should().Be((Line, false));
+        bench.Type(Line);
+        bench.IsRead.Should().BeTrue();
+        bench.Waiting.Should().NotBeNull();
+    }
+
+    [Fact]
     public void A_half_typed_line_keeps_the_last_answer_and_calls_it_old()
     {
         Bench bench = Answered();

@@ -16,7 +16,7 @@ public class ScreenTests
         {
             Environment.SetEnvironmentVariable("TERM", term);
             Console.SetError(error);
-            return (Screen.Run(Terminal.Shop, new ScreenOptions()), error.ToString());
+            return (Screen.Run(static () => Terminal.Shop, new ScreenOptions()), error.ToString());
         }
         finally
         {

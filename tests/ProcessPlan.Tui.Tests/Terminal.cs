@@ -24,7 +24,7 @@ internal sealed class Terminal : IDisposable
     public Terminal(ScreenOptions? options = null, int width = 80, int height = 24, Func<Feature, Plan>? plan = null, Action<Action>? aside = null)
     {
         options ??= new ScreenOptions();
-        Bench = new Bench(Shop.Names, options.Unit);
+        Bench = new Bench(Shop.Names, options.Line, options.Unit);
         _app = Application.Create(new VirtualTimeProvider());
         _app.Init(DriverRegistry.Names.ANSI);
         _app.Driver!.SetScreenSize(width, height);

@@ -70,7 +70,7 @@ internal static class BenchPage
 
         if (bench.Answer is null || !bench.IsCurrent)
         {
-            sheet.Write(0, 1, bench.Waiting is not null ? "…" : "Type a feature, for example: " + ScreenOptions.FirstLine, Ink.Faint);
+            sheet.Write(0, 1, bench.Waiting is not null || !bench.IsRead ? "…" : "Type a feature, for example: " + ScreenOptions.FirstLine, Ink.Faint);
             DrawStale(sheet, bench, 2);
             return;
         }

@@ -30,7 +30,11 @@ internal sealed class Table
 
     public void WriteHead(Sheet sheet, int x, int y) => Write(sheet, x, y, [.. _columns.Select(static column => column.Title)], Ink.Faint);
 
-    public void WriteRow(Sheet sheet, int x, int y, int row, Ink ink) => Write(sheet, x, y, _rows[row], ink);
+    public void WriteRow(Sheet sheet, int x, int y, int row, Ink ink)
+    {
+        sheet.Write(x, y, new string(' ', Needed), ink);
+        Write(sheet, x, y, _rows[row], ink);
+    }
 
     private void Write(Sheet sheet, int x, int y, string[] cells, Ink ink)
     {
