@@ -22,7 +22,7 @@ public sealed class ShopTests : IDisposable
                    8  machines
                 1526  tools
                   31  materials
-                  10  bars
+                  11  bars
                    4  suppliers
 
             """);
