@@ -325,8 +325,9 @@ internal sealed class RouteSearch
     {
         if (_job.Start.Size is { } typed)
         {
-            BarSeries series = _shop.Bars.FirstOrDefault(series => series.Over < typed && typed <= series.UpTo) ?? _shop.Bars[^1];
-            StartFromSize(step, typed, series.Deviation, "bar", $"bar {typed}");
+            // A bar beside the series of the shop is taken with the tolerance of the largest, or of a cast blank.
+            BarSeries? series = _shop.Bars.FirstOrDefault(series => series.Over < typed && typed <= series.UpTo) ?? (_shop.Bars.Count > 0 ? _shop.Bars[^1] : null);
+            StartFromSize(step, typed, series?.Deviation ?? CastTolerance, "bar", $"bar {typed}");
             return;
         }
 

@@ -50,6 +50,12 @@ public sealed class ShopFloor
     /// <summary>The material of a line that names none: C45 where the shop has it, else its first one.</summary>
     public Material UsualMaterial => _materials.GetValueOrDefault(HandbookShop.DefaultMaterial) ?? Materials[0];
 
+    /// <summary>The material that a line without one is planned in: the usual one, or the first of the shop.</summary>
+    /// <exception cref="InvalidOperationException">The shop has no material at all.</exception>
+    public Material DefaultMaterial => _materials.TryGetValue(HandbookShop.DefaultMaterial, out Material? usual) ? usual
+        : Materials.Count > 0 ? Materials[0]
+        : throw new InvalidOperationException($"The shop '{Name}' has no materials; nothing can be planned in it.");
+
     /// <summary>The names of materials, for reading a line without planning it.</summary>
     public static MaterialNames NamesOf(IEnumerable<Material> materials) =>
         new(materials.Select(static material => (material.Designation, (IReadOnlyList<string>)material.Aliases)));
