@@ -146,7 +146,7 @@ internal sealed class BenchView : Runnable
     private bool Take(Key key)
     {
         string name = NameOf(key);
-        bool taken = KeyChart.Press(_bench, name);
+        bool taken = (!IsTooSmall || name == KeyChart.Leave) && KeyChart.Press(_bench, name);
         if (taken)
         {
             Show();

@@ -10,6 +10,9 @@ internal sealed record Stroke(string Key, string? Letter, string Does, Action<Be
 /// <summary>Every key of the bench, once: the screen acts by it and the help prints it.</summary>
 internal static class KeyChart
 {
+    /// <summary>The key that leaves the program, the only one that works where the window is too small.</summary>
+    public const string Leave = "Ctrl+Q";
+
     private const int PageOfLines = 5;
 
     /// <summary>Keys that do the same wherever the hand is.</summary>
@@ -26,7 +29,7 @@ internal static class KeyChart
         new("PageUp", null, "lower text: up", static bench => bench.ScrollBy(-PageOfLines)),
         new("PageDown", null, "lower text: down", static bench => bench.ScrollBy(PageOfLines)),
         new("Esc", null, "back: to the bench, to the line", static bench => bench.Back()),
-        new("Ctrl+Q", null, "leave", static bench => bench.Quit()),
+        new(Leave, null, "leave", static bench => bench.Quit()),
     ];
 
     /// <summary>Keys while the hand is on the line; all others belong to the text.</summary>

@@ -158,7 +158,14 @@ public class BenchViewTests
         string before = terminal.Text;
         terminal.Resize(59, 24).Text.Should().StartWith("Window too small: 59 x 24.");
         terminal.Resize(80, 15).Text.Should().StartWith("Window too small: 80 x 15.");
-        terminal.Type("letters typed blind").Resize(80, 24).Text.Should().Be(before, "nothing is typed into a line that is not shown");
+        terminal.Type("letters typed blind").Press("F2", "F4", "Tab").Resize(80, 24).Text.Should().Be(before, "nothing is done that is not shown");
+    }
+
+    [Fact]
+    public void A_small_window_can_be_left()
+    {
+        using Terminal terminal = new(width: 20, height: 5);
+        terminal.Press("Ctrl+Q").IsRunning.Should().BeFalse();
     }
 
     [Fact]
