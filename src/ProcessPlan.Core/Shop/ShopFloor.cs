@@ -48,11 +48,8 @@ public sealed class ShopFloor
     public MaterialNames Names { get; }
 
     /// <summary>The material of a line that names none: C45 where the shop has it, else its first one.</summary>
-    public Material UsualMaterial => _materials.GetValueOrDefault(HandbookShop.DefaultMaterial) ?? Materials[0];
-
-    /// <summary>The material that a line without one is planned in: the usual one, or the first of the shop.</summary>
     /// <exception cref="InvalidOperationException">The shop has no material at all.</exception>
-    public Material DefaultMaterial => _materials.TryGetValue(HandbookShop.DefaultMaterial, out Material? usual) ? usual
+    public Material UsualMaterial => _materials.TryGetValue(HandbookShop.DefaultMaterial, out Material? usual) ? usual
         : Materials.Count > 0 ? Materials[0]
         : throw new InvalidOperationException($"The shop '{Name}' has no materials; nothing can be planned in it.");
 
