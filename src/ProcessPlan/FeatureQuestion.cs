@@ -19,44 +19,49 @@ internal sealed class FeatureQuestion
         Arity = ArgumentArity.ZeroOrMore,
     };
 
-    public Option<bool> Json { get; } = new("--json") { Description = "Answer as one JSON document; - always answers as JSON, one document a line" };
+    private Flag Json { get; } = new("--json", "Answer as one JSON document; - always answers as JSON, one document a line");
 
     private UnitChoice Unit { get; } = new("the one that was typed");
 
-    public Option<bool> Ascii { get; } = PlainLettersOption();
+    private Flag Ascii { get; } = PlainLettersFlag();
 
-    public static Option<bool> PlainLettersOption() => new("--ascii") { Description = "Plain characters only: um, dia, +/-" };
+    public static Flag PlainLettersFlag() => new("--ascii", "Plain characters only: um, dia, +/-");
 
     /// <summary>Adds the line and the choices to a command.</summary>
     public void AddTo(Command command)
     {
         command.Arguments.Add(Feature);
-        command.Options.Add(Json);
+        command.Options.Add(Json.Option);
         command.Options.Add(Unit.Option);
-        command.Options.Add(Ascii);
+        command.Options.Add(Ascii.Option);
+    }
+
+    /// <summary>What the command line asks, options and all.</summary>
+    public FeatureAsked In(ParseResult parsed)
+    {
+        string[] words = parsed.GetValue(Feature) ?? [];
+        RefuseMisuse(parsed.CommandResult.Command, words);
+        return new FeatureAsked(words, Json.In(parsed), Unit.In(parsed), Ascii.In(parsed));
     }
 
     /// <summary>Reads the line or lines and has them answered; each answer says the exit code that it means.</summary>
-    public int Answer(
-        ParseResult parsed,
+    public static int Answer(
+        FeatureAsked asked,
         Streams streams,
         Func<MaterialNames> materials,
         Func<Utf8JsonWriter, FeatureRequest, int> writeJson,
         Func<TextWriter, FeatureRequest, LengthUnit?, int> writeText)
     {
-        string[] words = parsed.GetValue(Feature) ?? [];
-        RefuseMisuse(parsed.CommandResult.Command, words);
-        LengthUnit? unit = Unit.In(parsed);
-        if (words is [StandardInput])
+        if (asked.Words is [StandardInput])
         {
             return new FeatureStream(materials(), writeJson).Answer(streams);
         }
 
-        string line = string.Join(' ', words);
+        string line = string.Join(' ', asked.Words);
         Parsed<FeatureRequest> read = FeatureLine.Parse(line, materials());
-        return parsed.GetValue(Json)
+        return asked.Json
             ? AnswerAsJson(streams.Output, read, writeJson)
-            : AnswerAsText(streams, line, read, unit, parsed.GetValue(Ascii), writeText);
+            : AnswerAsText(streams, line, read, asked.Unit, asked.Ascii, writeText);
     }
 
     private static void RefuseMisuse(Command command, string[] words)
@@ -113,3 +118,10 @@ internal sealed class FeatureQuestion
 
     private static TextWriter Letters(TextWriter target, bool ascii) => ascii ? new PlainLetters(target) : target;
 }
+
+/// <summary>One question about features.</summary>
+/// <param name="Words">The words of the line, or - for standard input.</param>
+/// <param name="Json">Answer as JSON.</param>
+/// <param name="Unit">The unit that comes first; null for the one that was typed.</param>
+/// <param name="Ascii">Plain characters only.</param>
+internal sealed record FeatureAsked(string[] Words, bool Json = false, LengthUnit? Unit = null, bool Ascii = false);

@@ -42,8 +42,8 @@ internal static class PlanCommand
             ShopFloor shop = choice.Floor(parsed);
             int routes = parsed.GetValue(alternatives) + 1;
             WhyAsked? asked = parsed.GetResult(why) is null ? null : parsed.GetValue(why) ?? new WhyAsked(null, null);
-            return question.Answer(
-                parsed,
+            return FeatureQuestion.Answer(
+                question.In(parsed),
                 streams,
                 () => shop.Names,
                 (json, request) => Write(json, request, Plans(request, shop, routes)),

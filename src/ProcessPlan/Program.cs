@@ -8,7 +8,7 @@ internal static class Program
 {
     private static readonly (string Name, Func<Streams, Command> Create)[] Commands =
     [
-        ("limits", LimitsCommand.Create),
+        (LimitsCommand.Name, LimitsCommand.Create),
         ("plan", PlanCommand.Create),
         ("shop", ShopCommand.Create),
     ];
@@ -30,7 +30,9 @@ internal static class Program
     {
         try
         {
-            return CommandsFor(args.FirstOrDefault(), streams).Answer(args, streams);
+            return args is [LimitsCommand.Name, _, ..] && !Array.Exists(args, IsOption)
+                ? LimitsCommand.Answer(args[1..], streams)
+                : CommandsFor(args.FirstOrDefault(), streams).Answer(args, streams);
         }
         catch (UsageException usage)
         {
@@ -51,6 +53,9 @@ internal static class Program
         }
     }
 
+    /// <summary>"-0" and "-" belong to a feature; these do not.</summary>
+    private static bool IsOption(string word) => word.StartsWith("--", StringComparison.Ordinal) || word is "-h" or "-?" or "/h" or "/?";
+
     private static int Tell(Streams streams, string sentence, int exit)
     {
         try
@@ -70,10 +75,19 @@ internal static class Program
     {
         RootCommand root = new("Plans how a machinist makes a hole, shaft, slot or tongue to its drawing. Without a command it opens the screens.");
         Screens.AddTo(root);
-        (string Name, Func<Streams, Command> Create)[] meant = Array.FindAll(Commands, command => command.Name == first);
-        foreach ((_, Func<Streams, Command> create) in meant.Length > 0 ? meant : Commands)
+        bool isMeant(string name) => name == first;
+        bool any = false;
+        foreach ((string name, _) in Commands)
         {
-            root.Subcommands.Add(create(streams));
+            any |= isMeant(name);
+        }
+
+        foreach ((string name, Func<Streams, Command> create) in Commands)
+        {
+            if (!any || isMeant(name))
+            {
+                root.Subcommands.Add(create(streams));
+            }
         }
 
         return root;

@@ -15,11 +15,11 @@ internal static class Screens
     /// <summary>Lets the call without a command open the screens.</summary>
     public static void AddTo(RootCommand root)
     {
-        Option<bool> ascii = FeatureQuestion.PlainLettersOption();
+        Flag ascii = FeatureQuestion.PlainLettersFlag();
         UnitChoice unit = new("mm");
-        root.Options.Add(ascii);
+        root.Options.Add(ascii.Option);
         root.Options.Add(unit.Option);
-        root.SetAction(parsed => Open(parsed.GetValue(ascii), unit.In(parsed)));
+        root.SetAction(parsed => Open(ascii.In(parsed), unit.In(parsed)));
     }
 
     [MethodImpl(MethodImplOptions.NoInlining)]

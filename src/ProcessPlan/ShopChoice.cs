@@ -18,12 +18,17 @@ internal sealed class ShopChoice
     public ShopFloor Floor(ParseResult parsed) => BookPath(parsed) is { } path ? Read(path) : HandbookShop.Load();
 
     /// <summary>The names of the shop's materials, for reading a line without planning it.</summary>
-    public MaterialNames Materials(ParseResult parsed) => BookPath(parsed) is { } path
-        ? Read(path).Names
-        : ShopFloor.NamesOf(HandbookShop.Materials());
+    public MaterialNames Materials(ParseResult parsed) => MaterialsIn(BookPath(parsed));
+
+    /// <summary>The same where no book is named.</summary>
+    public static MaterialNames UsualMaterials() => MaterialsIn(OwnBookPath);
+
+    private static MaterialNames MaterialsIn(string? path) => path is not null ? Read(path).Names : ShopFloor.NamesOf(HandbookShop.Materials());
 
     /// <summary>The book that is named, or the user's own if it exists.</summary>
-    public string? BookPath(ParseResult parsed) => parsed.GetValue(Shop) ?? (OwnBook.Path is { } own && File.Exists(own) ? own : null);
+    public string? BookPath(ParseResult parsed) => parsed.GetValue(Shop) ?? OwnBookPath;
+
+    private static string? OwnBookPath => OwnBook.Path is { } own && File.Exists(own) ? own : null;
 
     /// <remarks>Kept apart, so that a command without a book does not load what reads one: that takes longer than answering.</remarks>
     [MethodImpl(MethodImplOptions.NoInlining)]

@@ -52,12 +52,12 @@ internal sealed class ShopCommand
     private Command Show()
     {
         Argument<string> name = new("TABLE") { Description = TableNames + "; without one, what the shop has of each", Arity = ArgumentArity.ZeroOrOne };
-        Option<bool> json = new("--json") { Description = "Answer as one JSON document, with every column" };
-        Command show = new("show", "Shows the shop, or one table of it") { name, json, _choice.Shop };
+        Flag json = new("--json", "Answer as one JSON document, with every column");
+        Command show = new("show", "Shows the shop, or one table of it") { name, json.Option, _choice.Shop };
         show.SetAction(parsed =>
         {
             BookTable? table = parsed.GetValue(name) is { } asked ? Table(asked) : null;
-            return parsed.GetValue(json) ? WriteJson(Edition(parsed), table is null ? BookTables.All : [table]) : Show(parsed, table);
+            return json.In(parsed) ? WriteJson(Edition(parsed), table is null ? BookTables.All : [table]) : Show(parsed, table);
         });
         return show;
     }
@@ -100,8 +100,8 @@ internal sealed class ShopCommand
     private Command Import()
     {
         Argument<string> source = new("FILE") { Description = $"A table as CSV, named after it: {TableNames}" };
-        Option<bool> yes = new("--yes") { Description = "Makes the changes; without it they are only shown" };
-        Command import = new("import", "Reads one table from CSV: shows what would change, and changes it when told to") { source, yes, _choice.Shop };
+        Flag yes = new("--yes", "Makes the changes; without it they are only shown");
+        Command import = new("import", "Reads one table from CSV: shows what would change, and changes it when told to") { source, yes.Option, _choice.Shop };
         import.SetAction(parsed =>
         {
             string path = parsed.GetValue(source)!;
@@ -121,7 +121,7 @@ internal sealed class ShopCommand
             ImportText.Write(read, Say);
             if (read.Differences.Count > 0)
             {
-                Say(parsed.GetValue(yes) ? Save(parsed, edition, read) : "Nothing is changed yet; --yes changes it.");
+                Say(yes.In(parsed) ? Save(parsed, edition, read) : "Nothing is changed yet; --yes changes it.");
             }
 
             return ExitCode.Done;

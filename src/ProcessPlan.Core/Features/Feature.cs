@@ -51,7 +51,7 @@ public sealed record Feature
     public Coating? Coating { get; init; }
 
     /// <summary>Form and position asked for, in the order of <see cref="GeometryKind"/>.</summary>
-    public ValueList<GeometryRequirement> Geometry { get; init; } = [];
+    public ValueList<GeometryRequirement> Geometry { get; init; } = ValueList<GeometryRequirement>.Empty;
 
     public StartForm? Start { get; init; }
 

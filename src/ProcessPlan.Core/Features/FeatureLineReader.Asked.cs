@@ -133,9 +133,15 @@ internal ref partial struct FeatureLineReader
             return [];
         }
 
-        List<GeometryRequirement> asked = [];
-        foreach (GeometryNote note in _geometry.Items)
+        if (_geometry.Count == 0)
         {
+            return ValueList<GeometryRequirement>.Empty;
+        }
+
+        List<GeometryRequirement> asked = [];
+        for (int i = 0; i < _geometry.Count; i++)
+        {
+            GeometryNote note = _geometry[i];
             if (TryConvert(note.Zone, out Length zone))
             {
                 asked.Add(new GeometryRequirement(note.Kind, zone));

@@ -69,8 +69,9 @@ internal ref partial struct FeatureLineReader
     private void DecideSize()
     {
         _size = _limits.Is ? null : SizeAmongNumbers();
-        foreach (Measured number in _sizes.Items)
+        for (int i = 0; i < _sizes.Count; i++)
         {
+            Measured number = _sizes[i];
             Place place = number.Place;
             if (place == _size?.Place)
             {
@@ -104,9 +105,10 @@ internal ref partial struct FeatureLineReader
             return _sizes.Count == 0 ? null : _sizes[0];
         }
 
-        _sizes.Items.Sort(static (a, b) => a.Place.At.CompareTo(b.Place.At));
-        foreach (Measured number in _sizes.Items)
+        _sizes.Sort(static (a, b) => a.Place.At.CompareTo(b.Place.At));
+        for (int i = 0; i < _sizes.Count; i++)
         {
+            Measured number = _sizes[i];
             if (number.Place.At == _namedSizeAt)
             {
                 return number;
@@ -115,8 +117,9 @@ internal ref partial struct FeatureLineReader
 
         Measured? withTolerance = null;
         Measured? noMaterial = null;
-        foreach (Measured number in _sizes.Items)
+        for (int i = 0; i < _sizes.Count; i++)
         {
+            Measured number = _sizes[i];
             withTolerance ??= ToleranceFollows(number.Place.End) ? number : null;
             noMaterial ??= _materials.TryFind(At(number.Place), out _) ? null : number;
         }
@@ -137,8 +140,9 @@ internal ref partial struct FeatureLineReader
     {
         int next = AfterSpaces(end);
         bool follows = (_deviations.Is && _deviations.Place.At == next) || (_general.Is && _general.Place.At == next);
-        foreach (ClassNote note in _classes.Items)
+        for (int i = 0; i < _classes.Count; i++)
         {
+            ClassNote note = _classes[i];
             follows |= note.Place.At == next;
         }
 
@@ -148,7 +152,7 @@ internal ref partial struct FeatureLineReader
     /// <summary>One tolerance a line, or the two classes of a fit.</summary>
     private void RefuseMoreTolerances()
     {
-        _classes.Items.Sort(static (a, b) => a.Place.At.CompareTo(b.Place.At));
+        _classes.Sort(static (a, b) => a.Place.At.CompareTo(b.Place.At));
         if (_classes.Count > 2)
         {
             Report($"'{Show(_classes[2].Place)}' is a third tolerance class.", _classes[2].Place, "one class, or two for a fit such as H7/k6");

@@ -270,8 +270,9 @@ internal ref partial struct FeatureLineReader
 
     private readonly bool IsRightAfterSize(int at)
     {
-        foreach (Measured size in _sizes.Items)
+        for (int i = 0; i < _sizes.Count; i++)
         {
+            Measured size = _sizes[i];
             if (AfterSpaces(size.Place.End) == at)
             {
                 return true;

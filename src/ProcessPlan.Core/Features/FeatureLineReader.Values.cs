@@ -20,8 +20,9 @@ internal ref partial struct FeatureLineReader
         }
 
         GeometryKind kind = (GeometryKind)(word - FeatureWord.Cylindricity);
-        foreach (GeometryNote known in _geometry.Items)
+        for (int i = 0; i < _geometry.Count; i++)
         {
+            GeometryNote known = _geometry[i];
             if (known.Kind == kind)
             {
                 Report($"A second '{Show(place)}'.", place.To(zone.Place), "each form or position once");

@@ -56,7 +56,8 @@ internal enum FeatureWord
 
 internal static class FeatureWords
 {
-    private static readonly Dictionary<string, FeatureWord> ByText = new(StringComparer.OrdinalIgnoreCase)
+    // Boxed on purpose: the runtime carries dictionaries of references compiled, one of enums would be compiled at every start.
+    private static readonly Dictionary<string, object> ByText = new(StringComparer.OrdinalIgnoreCase)
     {
         ["hole"] = FeatureWord.Hole,
         ["bore"] = FeatureWord.Hole,
@@ -142,12 +143,12 @@ internal static class FeatureWords
         ["2768-v"] = FeatureWord.GeneralTolerance,
     };
 
-    private static readonly Dictionary<string, FeatureWord>.AlternateLookup<ReadOnlySpan<char>> BySpan =
+    private static readonly Dictionary<string, object>.AlternateLookup<ReadOnlySpan<char>> BySpan =
         ByText.GetAlternateLookup<ReadOnlySpan<char>>();
 
     public static IReadOnlyCollection<string> All => ByText.Keys;
 
-    public static FeatureWord Find(ReadOnlySpan<char> text) => BySpan.TryGetValue(text, out FeatureWord word) ? word : FeatureWord.None;
+    public static FeatureWord Find(ReadOnlySpan<char> text) => BySpan.TryGetValue(text, out object? word) ? (FeatureWord)word : FeatureWord.None;
 
     /// <summary>What a word that needs a number is followed by, for example.</summary>
     public static string Example(FeatureWord word) => word switch

@@ -9,18 +9,17 @@ public sealed class MaterialNames
     private readonly Dictionary<string, string> _designations = new(StringComparer.OrdinalIgnoreCase);
     private readonly Dictionary<string, string>.AlternateLookup<ReadOnlySpan<char>> _bySpan;
 
-    /// <param name="materials">The designation of each material and the other names it goes by.</param>
-    public MaterialNames(IEnumerable<(string Designation, IReadOnlyList<string> Aliases)> materials)
+    /// <param name="materials">Each material by all its names, the designation first.</param>
+    public MaterialNames(IEnumerable<IReadOnlyList<string>> materials)
     {
         _bySpan = _designations.GetAlternateLookup<ReadOnlySpan<char>>();
         List<string> designations = [];
-        foreach ((string designation, IReadOnlyList<string> aliases) in materials)
+        foreach (IReadOnlyList<string> names in materials)
         {
-            designations.Add(designation);
-            Add(designation, designation);
-            foreach (string alias in aliases)
+            designations.Add(names[0]);
+            foreach (string name in names)
             {
-                Add(alias, designation);
+                Add(name, names[0]);
             }
         }
 

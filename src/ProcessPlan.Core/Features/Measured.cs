@@ -75,8 +75,6 @@ internal struct Several<T>
 
     public readonly T this[int index] => _items![index];
 
-    public readonly Span<T> Items => _items.AsSpan(0, Count);
-
     public void Add(T item)
     {
         _items ??= new T[2];
@@ -86,6 +84,14 @@ internal struct Several<T>
         }
 
         _items[Count++] = item;
+    }
+
+    public readonly void Sort(Comparison<T> comparison)
+    {
+        if (Count > 1)
+        {
+            _items.AsSpan(0, Count).Sort(comparison);
+        }
     }
 
     public void RemoveAt(int index)

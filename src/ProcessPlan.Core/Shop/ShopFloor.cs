@@ -55,7 +55,7 @@ public sealed class ShopFloor
 
     /// <summary>The names of materials, for reading a line without planning it.</summary>
     public static MaterialNames NamesOf(IEnumerable<Material> materials) =>
-        new(materials.Select(static material => (material.Designation, (IReadOnlyList<string>)material.Aliases)));
+        new(materials.Select(static material => (IReadOnlyList<string>)[material.Designation, .. material.Aliases]));
 
     /// <exception cref="KeyNotFoundException">The shop has no such material.</exception>
     public Material Material(string designation) => _materials[designation];

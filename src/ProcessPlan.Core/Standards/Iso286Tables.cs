@@ -22,7 +22,7 @@ internal static class Iso286Tables
     public static readonly long[] SubEnds = Column(ShaftsAToJ, "upto", Length.PicometresPerMillimetre);
 
     /// <summary>The main step of each sub-step.</summary>
-    public static readonly int[] MainOfSub = Array.ConvertAll(SubEnds, end => StepOf(MainEnds, end));
+    public static readonly int[] MainOfSub = MainSteps();
 
     /// <summary>Widths by grade, then main step.</summary>
     public static readonly long[][] Widths = ReadWidths();
@@ -103,6 +103,17 @@ internal static class Iso286Tables
         }
 
         return byGrade;
+    }
+
+    private static int[] MainSteps()
+    {
+        int[] steps = new int[SubEnds.Length];
+        for (int i = 0; i < steps.Length; i++)
+        {
+            steps[i] = StepOf(MainEnds, SubEnds[i]);
+        }
+
+        return steps;
     }
 
     private static long[] Column(PublishedTable table, string column, long unit = Length.PicometresPerMicrometre)

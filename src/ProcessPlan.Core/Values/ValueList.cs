@@ -11,6 +11,9 @@ public sealed class ValueList<T> : IReadOnlyList<T>, IEquatable<ValueList<T>>
 
     internal ValueList(T[] items) => _items = items;
 
+    /// <summary>The list without items.</summary>
+    public static ValueList<T> Empty { get; } = new([]);
+
     public int Count => _items.Length;
 
     public T this[int index] => _items[index];

@@ -10,17 +10,17 @@ internal static class Line
 {
     public static readonly MaterialNames Materials = new(
     [
-        ("C15", ["1.0401", "1015"]),
-        ("C45", ["1.0503", "1045"]),
-        ("42CrMo4", ["1.7225", "4140"]),
-        ("34CrNiMo6", ["4340"]),
-        ("X5CrNi18-10", ["1.4301", "304"]),
-        ("X2CrNiMo17-12-2", ["1.4404", "316L", "316"]),
-        ("X40CrMoV5-1", ["1.2344", "H13"]),
-        ("X153CrMoV12", ["1.2379", "D2"]),
-        ("EN-AW-6061", ["6061", "AW6061"]),
-        ("EN-GJL-250", ["GG25"]),
-        ("PA6.6", ["PA66"]),
+        ["C15", "1.0401", "1015"],
+        ["C45", "1.0503", "1045"],
+        ["42CrMo4", "1.7225", "4140"],
+        ["34CrNiMo6", "4340"],
+        ["X5CrNi18-10", "1.4301", "304"],
+        ["X2CrNiMo17-12-2", "1.4404", "316L", "316"],
+        ["X40CrMoV5-1", "1.2344", "H13"],
+        ["X153CrMoV12", "1.2379", "D2"],
+        ["EN-AW-6061", "6061", "AW6061"],
+        ["EN-GJL-250", "GG25"],
+        ["PA6.6", "PA66"],
     ]);
 
     public static Parsed<FeatureRequest> Parse(string line) => FeatureLine.Parse(line, Materials);

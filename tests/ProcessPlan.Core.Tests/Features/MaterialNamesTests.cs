@@ -4,7 +4,7 @@ namespace ProcessPlan.Core.Tests.Features;
 
 public sealed class MaterialNamesTests
 {
-    private static readonly MaterialNames Names = new([("EN-AW-6061", ["6061", "AW6061"]), ("X5CrNi18-10", ["1.4301", "304"]), ("C45", ["1.0503", "6061"])]);
+    private static readonly MaterialNames Names = new([["EN-AW-6061", "6061", "AW6061"], ["X5CrNi18-10", "1.4301", "304"], ["C45", "1.0503", "6061"]]);
 
     [Theory]
     [InlineData("EN-AW-6061", "EN-AW-6061")]
@@ -44,7 +44,7 @@ public sealed class MaterialNamesTests
     [Fact]
     public void New_NameTooLong_Throws()
     {
-        Action tooLong = static () => _ = new MaterialNames([(new string('C', 41), [])]);
+        Action tooLong = static () => _ = new MaterialNames([[new string('C', 41)]]);
         tooLong.Should().Throw<ArgumentException>().WithMessage("The material name 'CCCCC*' is longer than 40 characters.*");
     }
 }
