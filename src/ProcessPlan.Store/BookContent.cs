@@ -75,7 +75,9 @@ internal sealed class BookContent
     /// <exception cref="ShopBookException">The file is another program's, or a newer version of this program wrote it.</exception>
     public static BookContent Open(LiteDatabase book)
     {
-        BookContent content = new(book, HeadOf(book));
+        // The head says how the rest is to be read; only that of the first schema has no sum.
+        BsonDocument head = HeadOf(book);
+        BookContent content = new(book, head.IsStamped() ? Intact(head, Head) : head);
         int schema = content._head[Schema].AsInt32;
         if (schema > CurrentSchema)
         {
@@ -110,7 +112,7 @@ internal sealed class BookContent
 
         return Intact(_head, Head)[Sum].AsInt64 == sum
             ? new ShopEdition(_head["name"].AsString, _head["currency"].AsString, Revision, tables)
-            : throw new ShopBookException("Rows of the shop book are missing; it was left as it is. Use a backup.");
+            : throw new DamagedBookException("Rows of the shop book are missing; it was left as it is. Use a backup.");
     }
 
     /// <summary>Begins the next revision.</summary>
@@ -266,5 +268,5 @@ internal sealed class BookContent
 
     private static BsonDocument Intact(BsonDocument document, string table) => document.IsIntact()
         ? document
-        : throw new ShopBookException($"{table} {document[Id].AsInt64} in the shop book is not what was written there; it was left as it is. Use a backup.");
+        : throw new DamagedBookException($"{table} {document[Id].AsInt64} in the shop book is not what was written there; it was left as it is. Use a backup.");
 }

@@ -1,3 +1,4 @@
+using System.Collections.Concurrent;
 using System.Globalization;
 using LiteDB;
 using LiteDB.Engine;
@@ -25,6 +26,11 @@ internal sealed class BookFile
 
     /// <summary>Any longer, and the user would rather be told.</summary>
     private static readonly TimeSpan Patience = TimeSpan.FromSeconds(3);
+
+    /// <summary>
+    /// Databases that failed are closed, but kept: what the library could not let go of it tries again when it is collected, and an exception there ends the process.
+    /// </summary>
+    private static readonly ConcurrentBag<LiteDatabase> Failed = [];
 
     private readonly TimeSpan _patience;
 
@@ -165,6 +171,10 @@ internal sealed class BookFile
             File.Move(part, path, overwrite);
             return result;
         }
+        catch (IOException failure) when (failure is not ShopBookException)
+        {
+            throw new ShopBookException($"{path} cannot be written: {failure.Message}", failure);
+        }
         finally
         {
             File.Delete(part);
@@ -176,24 +186,28 @@ internal sealed class BookFile
     {
         try
         {
-            using LiteDatabase book = Open(Path);
-            if (!book.BeginTrans())
+            Use(Open(Path), book =>
             {
-                throw new InvalidOperationException("A transaction was begun inside another one.");
-            }
+                if (!book.BeginTrans())
+                {
+                    throw new InvalidOperationException("A transaction was begun inside another one.");
+                }
 
-            change(book);
-            if (!book.Commit())
-            {
-                throw new InvalidOperationException("The library knows nothing of the transaction.");
-            }
+                change(book);
+                if (!book.Commit())
+                {
+                    throw new InvalidOperationException("The library knows nothing of the transaction.");
+                }
 
-            // The library leaves a commit in the system's cache, where a power cut would take it.
-            if (File.Exists(Log))
-            {
-                using SafeFileHandle log = File.OpenHandle(Log, FileMode.Open, FileAccess.ReadWrite, FileShare.ReadWrite);
-                RandomAccess.FlushToDisk(log);
-            }
+                // The library leaves a commit in the system's cache, where a power cut would take it.
+                if (File.Exists(Log))
+                {
+                    using SafeFileHandle log = File.OpenHandle(Log, FileMode.Open, FileAccess.ReadWrite, FileShare.ReadWrite);
+                    RandomAccess.FlushToDisk(log);
+                }
+
+                return true;
+            });
         }
         catch (Exception failure) when (failure is not (ShopBookException or OutOfMemoryException))
         {
@@ -217,13 +231,36 @@ internal sealed class BookFile
     {
         try
         {
-            using LiteDatabase copy = Open(data, log);
-            return use(copy);
+            return Use(Open(data, log), use);
         }
-        catch (Exception damage) when (damage is not (ShopBookException or OutOfMemoryException))
+        catch (Exception damage) when (damage is not (ShopBookException or UnauthorizedAccessException or OutOfMemoryException))
         {
             // The library throws whatever it stumbles over in a damaged file. This was a copy.
-            throw new ShopBookException($"{Path} is damaged and cannot be read ({damage.Message}); it was left as it is. Use a backup.", damage);
+            throw new DamagedBookException($"{Path} is damaged and cannot be read ({damage.Message}); it was left as it is. Use a backup.", damage);
+        }
+    }
+
+    private static T Use<T>(LiteDatabase database, Func<LiteDatabase, T> use)
+    {
+        bool isSound = false;
+        try
+        {
+            T result = use(database);
+            isSound = true;
+            return result;
+        }
+        catch (ShopBookException refusal) when (refusal is not DamagedBookException)
+        {
+            isSound = true;
+            throw;
+        }
+        finally
+        {
+            database.Dispose();
+            if (!isSound)
+            {
+                Failed.Add(database);
+            }
         }
     }
 

@@ -18,6 +18,8 @@ internal static class RowCheck
         return document;
     }
 
+    public static bool IsStamped(this BsonDocument document) => document.ContainsKey(Check);
+
     public static bool IsIntact(this BsonDocument document) => document[Check].IsInt64 && document[Check].AsInt64 == Sum(document);
 
     /// <summary>The sum that stands in the document.</summary>
@@ -59,7 +61,7 @@ internal static class RowCheck
                 Add(ref sum, value.AsBinary);
                 break;
             default:
-                throw new ShopBookException($"The shop book holds a value of type {value.Type}, which no book holds.");
+                throw new DamagedBookException($"The shop book holds a value of type {value.Type}, which no book holds; it was left as it is. Use a backup.");
         }
     }
 

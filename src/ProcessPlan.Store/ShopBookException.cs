@@ -14,3 +14,6 @@ public sealed class BookChangedException(string path, long read, long now)
 
     public long Now { get; } = now;
 }
+
+/// <summary>What stands in the file is not what was written there.</summary>
+internal sealed class DamagedBookException(string sentence, Exception? cause = null) : ShopBookException(sentence, cause);

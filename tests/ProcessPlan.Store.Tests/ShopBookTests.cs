@@ -238,7 +238,7 @@ public class ShopBookTests
             {
                 LiteDB.BsonDocument head = file.GetCollection("shop").FindById(1L);
                 head["schema"] = 99;
-                file.GetCollection("shop").Update(head);
+                file.GetCollection("shop").Update(head.Stamp());
             },
             static _ => true);
         byte[] before = File.ReadAllBytes(folder.Book);
