@@ -149,6 +149,8 @@ internal sealed class RouteSearch
         }
 
         // A change after the last cut eats tolerance, and a tool of fixed size can be worth more care than its grade asks for.
+        // A large lot may be planned by either method: the handbook's larger stock on a finishing cut can save a roughing pass.
+        bool[] methods = _job.Quantity <= StockNeed.SmallLot ? [true] : [false, true];
         foreach (Effort effort in (ReadOnlySpan<Effort>)[Effort.Routine, Effort.Special])
         {
             bool worthIt = effort == least || candidate.Process.SizedBy == ToolUse.Ream || candidate.HeldWidth(least).Picometres > window.Width;
@@ -163,10 +165,16 @@ internal sealed class RouteSearch
                 MetalWindow reach = Reach(candidate, tool, effort, window);
                 foreach (Machine machine in candidate.Machines)
                 {
-                    if (tool is null || tool.Stamped <= machine.Largest)
+                    if (tool is not null && tool.Stamped > machine.Largest)
+                    {
+                        continue;
+                    }
+
+                    foreach (bool byHandbook in methods)
                     {
                         Push(new Step
                         {
+                            ByHandbook = byHandbook,
                             Candidate = candidate,
                             Machine = machine,
                             Tool = tool,
@@ -227,15 +235,13 @@ internal sealed class RouteSearch
 
     private bool Cuts(Candidate candidate, int changesBefore)
     {
+        bool cuts = candidate.CutsSoft;
         for (int i = 0; i < changesBefore; i++)
         {
-            if (_changes[i].Hardens)
-            {
-                return candidate.CutsHard;
-            }
+            cuts = _changes[i].Spares(candidate.Process.MostStockAt(_job.Nominal)) && (_changes[i].Hardens ? candidate.CutsHard : cuts);
         }
 
-        return candidate.CutsSoft;
+        return cuts;
     }
 
     /// <summary>Spread from the grade held (a sixth of it), or from the tool's predicted range; the share of it inside the window.</summary>
@@ -404,24 +410,14 @@ internal sealed class RouteSearch
         bool same = between.Length == 0 && machine == step.Machine;
         bool heat = Array.Exists(between, static change => change.Hardens);
         Deviation tolerance = LeftTolerance(before, step, null);
-        StockNeed need = Need(step, before.Process.Name, step.Reach.Most, tolerance, same, heat);
-        MetalWindow entering = Entering(step, need.Least, between);
+        Stock need = Need(step, before.Process.Name, step.Reach.Most, tolerance, same, heat).Least;
+        MetalWindow entering = Entering(step, need, between);
         if (before.Process.SizedBy is { } use)
         {
             PrecedeWithTools(step, before, machine, between, changesLeft, entering, use);
             return;
         }
 
-        PrecedeWithSetting(step, before, machine, between, changesLeft, entering, tolerance);
-        if (need.Larger is { } larger)
-        {
-            // The handbook's larger stock stays open to a large lot: more on a finishing cut can save a roughing pass.
-            PrecedeWithSetting(step, before, machine, between, changesLeft, Entering(step, larger, between), tolerance);
-        }
-    }
-
-    private void PrecedeWithSetting(Step step, Candidate before, Machine machine, Change[] between, int changesLeft, MetalWindow entering, Deviation tolerance)
-    {
         Length resolution = tolerance >= Deviation.FromMicrometres(50) ? Hundredth : Micrometre;
         long least = new Length(entering.Least).RoundUp(resolution).Picometres;
         MetalWindow leaving = new(least, least + tolerance.Picometres);
@@ -532,7 +528,7 @@ internal sealed class RouteSearch
     }
 
     private StockNeed Need(Step step, string before, long metal, Deviation tolerance, bool sameClamping, bool afterHeat) =>
-        StockNeed.Between(step.Process, before, _job, MetalWindow.Size(metal), tolerance, sameClamping, afterHeat);
+        StockNeed.Between(step.Process, before, _job, MetalWindow.Size(metal), tolerance, sameClamping, afterHeat, step.ByHandbook);
 
     /// <summary>The window that must be left by the operation before, with the changes between taken off at their extremes; may be closed.</summary>
     private static MetalWindow Entering(Step step, Stock least, Change[] between)
@@ -574,6 +570,7 @@ internal sealed class RouteSearch
         double yield = tool is null ? Yield(before, null, Effort.Routine, leaving, leaving) : 1;
         return new Step
         {
+            ByHandbook = step.ByHandbook,
             Candidate = before,
             Machine = machine,
             Tool = tool,
