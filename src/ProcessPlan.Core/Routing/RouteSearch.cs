@@ -31,6 +31,8 @@ internal sealed class RouteSearch
     private const double LeastPilotShare = 0.5;
     private const double MostPilotShare = 0.625;
 
+    private const int YieldPlaces = 4;
+
     /// <summary>A process that takes no more than this in all removes micrometres a minute: its greatest stock is a hard limit.</summary>
     private static readonly Stock LittleStock = Stock.FromMicrometres(200);
 
@@ -215,7 +217,7 @@ internal sealed class RouteSearch
         SizeWindow sizes = window.Sizes(_job.IsInternal);
         if (use == ToolUse.Ream)
         {
-            return [.. ReamerChoice.Best(_shop.ToolsNear(use, sizes), sizes, _job.Nominal, _job.Feature.Class, tool => Yield(candidate, tool, effort, window, window))];
+            return [.. ReamerChoice.Suited(_shop.ToolsNear(use, sizes), sizes, _job.Feature.Class, tool => Yield(candidate, tool, effort, window, window))];
         }
 
         List<Tool?> fitting = [];
@@ -254,7 +256,10 @@ internal sealed class RouteSearch
     {
         MetalWindow aim = tool is null ? held : Cut(candidate, tool, effort);
         double spread = tool is null ? candidate.HeldWidth(effort).Picometres : aim.Width;
-        return NormalYield.Of(good.Least, good.Most, (aim.Least + aim.Most) / 2.0, spread / 6.0);
+        double yield = NormalYield.Of(good.Least, good.Most, (aim.Least + aim.Most) / 2.0, spread / 6.0);
+
+        // Two tools that differ by less than one hole in ten thousand are equally good.
+        return tool is null ? yield : Math.Round(yield, YieldPlaces);
     }
 
     /// <summary>What a tool of fixed size is predicted to leave.</summary>

@@ -276,7 +276,8 @@ internal sealed class ExhaustiveSearch(Job job, ShopFloor shop)
     {
         MetalWindow aim = tool is null ? held : Cut(tool, candidate, effort);
         double sigma = (tool is null ? candidate.HeldWidth(effort).Picometres : aim.Width) / 6.0;
-        return NormalYield.Of(good.Least, good.Most, (aim.Least + aim.Most) / 2.0, sigma);
+        double share = NormalYield.Of(good.Least, good.Most, (aim.Least + aim.Most) / 2.0, sigma);
+        return tool is null ? share : Math.Round(share, 4);
     }
 
     private MetalWindow Cut(Tool tool, Candidate candidate, Effort effort) =>
