@@ -88,9 +88,13 @@ internal static class RefusalWriter
         {
             Deviation? special = candidate.SpecialWidth ?? candidate.RoutineWidth;
             bool wouldHold = special <= job.Feature.Limits.Width && (job.Ra is not { } ra || candidate.Process.SpecialRa.Nanometres <= ra.Nanometres);
-            if (wouldHold && candidate.Machines.Count == 0 && candidate.NoAtAll is not null)
+            if (wouldHold && candidate.NotSuited is null && candidate.NoMachine is { } noMachine)
             {
-                open.Add($"{candidate.Process.Name} by another machine or an outside supplier ({candidate.NoAtAll})");
+                open.Add($"{candidate.Process.Name} by another machine or an outside supplier ({noMachine})");
+            }
+            else if (wouldHold && candidate.NoMachine is null && candidate.MissingRoom is { } room)
+            {
+                open.Add($"{candidate.Process.Name}, if the blind hole may be {room} deeper below full size or gets a relief: ask the designer");
             }
         }
 

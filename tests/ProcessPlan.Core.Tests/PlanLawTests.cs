@@ -20,9 +20,6 @@ public class PlanLawTests
         "centreless grinding", "superfinishing", "rough surface grinding", "surface grinding", "wire cutting",
     ];
 
-    /// <summary>Reamers are compared to a ten-thousandth of good holes, so costs may differ by as much.</summary>
-    private const decimal Noise = 1.0002m;
-
     private static readonly ShopFloor Shop = GeneratedFeatures.Shop;
 
     [Fact]
@@ -30,7 +27,7 @@ public class PlanLawTests
     {
         List<string> faults = [];
         int planned = 0;
-        foreach ((string[] words, Feature feature) in GeneratedFeatures.Take(1800, start: 1))
+        foreach ((string[] words, Feature feature) in GeneratedFeatures.Take(2500, start: 1))
         {
             Plan plan = Planner.Plan(feature, Shop, routes: 2);
             foreach (string fault in Faults(plan, feature))
@@ -46,7 +43,7 @@ public class PlanLawTests
     }
 
     [Fact]
-    public void Plan_AWiderTolerance_NeverCostsMoreAndNeverLosesTheRoute() => Compare(300, start: 2, static (feature, choice) =>
+    public void Plan_AWiderTolerance_NeverCostsMoreAndNeverLosesTheRoute() => Compare(400, start: 2, static (feature, choice) =>
     {
         // The limit that is cut last moves away: the hole may come out larger, the shaft smaller.
         Deviation more = new(feature.Limits.Width.Picometres * (1 + choice % 5) / 2);
@@ -79,13 +76,13 @@ public class PlanLawTests
     }
 
     [Fact]
-    public void Plan_ACoarserFinish_NeverCostsMoreAndNeverLosesTheRoute() => Compare(300, start: 3, static (feature, choice) => feature with
+    public void Plan_ACoarserFinish_NeverCostsMoreAndNeverLosesTheRoute() => Compare(400, start: 3, static (feature, choice) => feature with
     {
         Finish = feature.Finish is not { IsRa: true } finish || choice % 4 == 0 ? null : Roughness.Ra(finish.Nanometres * (2 + choice % 3)),
     });
 
     [Fact]
-    public void Plan_ALargerBatch_NeverCostsMoreAPieceAndNeverLosesTheRoute() => Compare(200, start: 4, static (feature, choice) => feature with
+    public void Plan_ALargerBatch_NeverCostsMoreAPieceAndNeverLosesTheRoute() => Compare(400, start: 4, static (feature, choice) => feature with
     {
         // Often right over the edge where the least stock is counted by the other method.
         Quantity = feature.Quantity <= StockNeed.SmallLot && choice % 2 == 0 ? StockNeed.SmallLot + 1 : feature.Quantity + 1 + choice * 7,
@@ -232,6 +229,8 @@ public class PlanLawTests
         bool hard = job.Hrc > Job.HardFromHrc;
         SizeWindow? entering = Blank(route, feature);
         ToleranceGrade? coarsest = null;
+        Length? layer = null;
+        string before = route.From.StartsWith("bar", StringComparison.Ordinal) ? "bar" : "casting";
         bool solid = entering is null;
         foreach (Operation operation in operations)
         {
@@ -244,6 +243,7 @@ public class PlanLawTests
                 }
 
                 hard |= operation.Condition == Condition.Hard && job.HrcAfterTreatment > Job.HardFromHrc;
+                layer = operation.Process == "nitriding" ? job.Feature.Treatment!.Depth : layer;
                 entering = operation.Size;
                 continue;
             }
@@ -254,6 +254,11 @@ public class PlanLawTests
             if (hard && !HardProcesses.Contains(operation.Process))
             {
                 yield return $"{operation.Process} on hard metal";
+            }
+
+            if (layer is { } thin && process.MostStockAt(job.Nominal).Picometres * 2 > thin.Picometres)
+            {
+                yield return $"{operation.Process} after nitriding cuts the layer away";
             }
 
             if (!size.Contains(operation.Aim!.Value))
@@ -278,7 +283,7 @@ public class PlanLawTests
 
             if (entering is { } from)
             {
-                foreach (string fault in FaultsOfStock(operation, process, from, size, last, job))
+                foreach (string fault in FaultsOfStock(operation, process, before, from, size, last, job))
                 {
                     yield return fault;
                 }
@@ -289,6 +294,7 @@ public class PlanLawTests
             }
 
             coarsest = operation.Grade;
+            before = operation.Process;
             entering = size;
         }
 
@@ -312,7 +318,7 @@ public class PlanLawTests
     }
 
     /// <summary>Removed on diameter or width at the extremes, as the contract counts it.</summary>
-    private static IEnumerable<string> FaultsOfStock(Operation operation, Process process, SizeWindow from, SizeWindow size, bool last, Job job)
+    private static IEnumerable<string> FaultsOfStock(Operation operation, Process process, string before, SizeWindow from, SizeWindow size, bool last, Job job)
     {
         (Deviation least, Deviation most) = job.IsInternal ? (size.Min - from.Max, size.Max - from.Min) : (from.Min - size.Max, from.Max - size.Min);
         if (operation.StockMin?.Picometres != least.Picometres || operation.StockMax?.Picometres != most.Picometres)
@@ -327,10 +333,14 @@ public class PlanLawTests
 
         // The last cut does not go right through the drawing's window: what its tool is predicted to cut counts, or what its process holds.
         Deviation reached = most;
+        Deviation cleaned = least;
+        Length near = job.IsInternal ? size.Min : size.Max;
         if (last && operation.Tool is { } tool)
         {
             SizeWindow cut = SizedCut.Predict(tool, job.Group, operation.Effort == Effort.Special || process.EnterGrade <= ToleranceGrade.It(9)).Sizes;
             reached = (cut.Max < size.Max ? cut.Max : size.Max) - from.Min;
+            near = cut.Min > size.Min ? cut.Min : size.Min;
+            cleaned = near - from.Max;
         }
         else if (last && !operation.Because.Any(IsHeldInside))
         {
@@ -338,9 +348,15 @@ public class PlanLawTests
             reached = new Deviation(most.Picometres - Math.Max(0, size.Width.Picometres - held));
         }
 
-        if (reached.Picometres > process.MostStockAt(job.IsInternal ? size.Min : size.Max).Picometres)
+        // At the very least the roughness that the operation before leaves must be cut away on both sides.
+        if (cleaned.ToMicrometres() < 2 * SurfaceState.After(before, near).RzMicrometres)
         {
-            yield return $"{operation.Process}: {reached} to take, it takes {process.MostStockAt(size.Max)}";
+            yield return $"{operation.Process}: {cleaned} does not clean up after {before}";
+        }
+
+        if (reached.Picometres > process.MostStockAt(near).Picometres)
+        {
+            yield return $"{operation.Process}: {reached} to take, it takes {process.MostStockAt(near)}";
         }
     }
 
@@ -431,7 +447,7 @@ public class PlanLawTests
         {
             faults.Add($"{what}: the route is lost: {Chain(hard.Routes[0])}; {easy.Refusal!.Message}");
         }
-        else if (easy.Routes[0].CostPerPiece.Amount > hard.Routes[0].CostPerPiece.Amount * Noise)
+        else if (easy.Routes[0].CostPerPiece.Amount > hard.Routes[0].CostPerPiece.Amount)
         {
             faults.Add($"{what}: {hard.Routes[0].CostPerPiece} by {Chain(hard.Routes[0])}, then {easy.Routes[0].CostPerPiece} by {Chain(easy.Routes[0])}");
         }

@@ -15,7 +15,7 @@ public sealed class Candidate
     /// <summary>Over this a turned shaft needs a steady and gives a grade away (common practice, no source).</summary>
     private const double SlenderForTurning = 12;
 
-    private static readonly Length Small = Length.FromMillimetres(3);
+    private static readonly Length Small = Length.FromMillimetres(2);
     private static readonly Length Large = Length.FromMillimetres(250);
 
     private Candidate(Process process, Job job, IReadOnlyList<Machine> machines)
@@ -46,7 +46,16 @@ public sealed class Candidate
     public ToleranceGrade LeftGrade { get; }
 
     /// <summary>Why it is out altogether, or null.</summary>
-    public string? NoAtAll { get; private set; }
+    public string? NoAtAll => NotSuited ?? NoMachine;
+
+    /// <summary>Why no machine could do it here, or null.</summary>
+    public string? NotSuited { get; private set; }
+
+    /// <summary>Why no machine of this shop does it, or null.</summary>
+    public string? NoMachine { get; private set; }
+
+    /// <summary>Room that it misses below full size in a blind hole, where that is what rules it out.</summary>
+    public Length? MissingRoom { get; private set; }
 
     /// <summary>The least effort that finishes the feature; null where it cannot.</summary>
     public Effort? Finishes { get; private set; }
@@ -104,7 +113,8 @@ public sealed class Candidate
         }
 
         Candidate candidate = new(process, job, machines) { CutsSoft = Cuts(process, job.Hrc), CutsHard = Cuts(process, job.HrcAfterTreatment ?? job.Hrc) };
-        candidate.NoAtAll = OutAltogether(candidate, job) ?? (machines.Count == 0 ? noMachine ?? "no machine of this shop does it" : null);
+        candidate.NotSuited = OutAltogether(candidate, job);
+        candidate.NoMachine = machines.Count == 0 ? noMachine ?? "no machine of this shop does it" : null;
         if (candidate.NoAtAll is null)
         {
             (candidate.Finishes, candidate.NoToFinish) = ToFinish(candidate, job);
@@ -141,6 +151,7 @@ public sealed class Candidate
 
         if (job.Kind == FeatureKind.Hole && job.End == HoleEnd.Blind && job.BottomRoom is { } room && room < process.BottomRoom)
         {
+            candidate.MissingRoom = new Length((process.BottomRoom - room).Picometres);
             return $"needs {process.BottomRoom} below full size, the blind hole has {room}";
         }
 
@@ -216,9 +227,11 @@ public sealed class Candidate
             lose($"in {job.Material.Designation}");
         }
 
-        if (process.Ability is "ream" or "bore" && (job.Nominal < Small || job.Nominal > Large))
+        // Free-cutting metals give back the grade that a small reamer loses.
+        bool free = process.Ability == "ream" && job.Group is "N1" or "N2";
+        if (process.Ability is "ream" or "bore" && ((job.Nominal < Small && !free) || job.Nominal > Large))
         {
-            lose(job.Nominal < Small ? "below 3 mm" : "above 250 mm");
+            lose(job.Nominal < Small ? "below 2 mm" : "above 250 mm");
         }
 
         return (lost, reason);

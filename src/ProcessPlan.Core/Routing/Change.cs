@@ -13,9 +13,10 @@ namespace ProcessPlan.Core.Routing;
 /// <param name="MostGrowth">Greatest growth of the metal.</param>
 /// <param name="Hardens">Whether the metal is hard after it.</param>
 /// <param name="Covers">Whether it lays on a coating, which no cut may take off again.</param>
+/// <param name="Layer">Depth of a thin hard layer, which later cuts must spare; null for any other change.</param>
 /// <param name="Supplier">Who does it, or null where the shop knows nobody.</param>
 /// <param name="Origin">Where the growth comes from.</param>
-internal sealed record Change(string Process, string Detail, Deviation LeastGrowth, Deviation MostGrowth, bool Hardens, bool Covers, Supplier? Supplier, Citation Origin)
+internal sealed record Change(string Process, string Detail, Deviation LeastGrowth, Deviation MostGrowth, bool Hardens, bool Covers, Length? Layer, Supplier? Supplier, Citation Origin)
 {
     /// <summary>Through hardening and case hardening move a size by up to a thousandth either way.</summary>
     private const long ThousandthOfSize = 1000;
@@ -38,7 +39,7 @@ internal sealed record Change(string Process, string Detail, Deviation LeastGrow
             Deviation growth(Length buildUp) => new(coating.Limits == CoatingLimits.Before ? 0 : 2 * buildUp.Picometres);
             string side = coating.Limits == CoatingLimits.Before ? "before" : "after";
             changes.Add(new Change("plating", $"{coating.Name} {coating.Least.Picometres / Length.PicometresPerMicrometre} to {coating.Most.Picometres / Length.PicometresPerMicrometre} µm a surface, the drawing's limits hold {side} it",
-                growth(coating.Least), growth(coating.Most), false, true, SupplierOf(shop, "coating"), CoatingRule));
+                growth(coating.Least), growth(coating.Most), false, true, null, SupplierOf(shop, "coating"), CoatingRule));
         }
 
         return changes;
@@ -51,13 +52,13 @@ internal sealed record Change(string Process, string Detail, Deviation LeastGrow
         if (treatment.Kind == TreatmentKind.Nitrided)
         {
             long layer = (treatment.Depth ?? Length.FromMillimetres(0.3m)).Picometres;
-            return new Change("nitriding", hardness.TrimStart() + depth, new Deviation(2 * layer * 3 / 100), new Deviation(2 * layer * 5 / 100), true, false,
+            return new Change("nitriding", hardness.TrimStart() + depth, new Deviation(2 * layer * 3 / 100), new Deviation(2 * layer * 5 / 100), true, false, new Length(layer),
                 SupplierOf(shop, "nitriding"), NitridingRule);
         }
 
         string process = treatment.Kind == TreatmentKind.Hardened ? "hardening" : "case hardening";
         Deviation thousandth = new(job.Nominal.Picometres / ThousandthOfSize);
-        return new Change(process, (hardness + depth).TrimStart(' ', ','), -thousandth, thousandth, true, false, SupplierOf(shop, process), HardeningRule);
+        return new Change(process, (hardness + depth).TrimStart(' ', ','), -thousandth, thousandth, true, false, null, SupplierOf(shop, process), HardeningRule);
     }
 
     private static Supplier? SupplierOf(ShopFloor shop, string process)
@@ -72,6 +73,9 @@ internal sealed record Change(string Process, string Detail, Deviation LeastGrow
 
         return null;
     }
+
+    /// <summary>Whether what a process can take spares the layer: at most a quarter of its depth per side (common practice, no source).</summary>
+    public bool Spares(Stock most) => Layer is not { } layer || most.Picometres <= layer.Picometres / 2;
 
     /// <summary>The window that must be entered with so that <paramref name="leaving"/> is left at the extremes; may be closed.</summary>
     public MetalWindow Before(MetalWindow leaving) => new(leaving.Least - LeastGrowth.Picometres, leaving.Most - MostGrowth.Picometres);

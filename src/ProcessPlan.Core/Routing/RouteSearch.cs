@@ -27,6 +27,8 @@ internal sealed class RouteSearch
     /// <summary>What drilling and rough boring leave.</summary>
     private static readonly ToleranceGrade RoughGrade = ToleranceGrade.It(12);
 
+    private const int YieldPlaces = 4;
+
     /// <summary>A process that takes no more than this in all removes micrometres a minute: its greatest stock is a hard limit.</summary>
     private static readonly Stock LittleStock = Stock.FromMicrometres(200);
 
@@ -159,6 +161,8 @@ internal sealed class RouteSearch
         }
 
         // A change after the last cut eats tolerance, and a tool of fixed size can be worth more care than its grade asks for.
+        // A large lot may be planned by either method: the handbook's larger stock on a finishing cut can save a roughing pass.
+        bool[] methods = _job.Quantity <= StockNeed.SmallLot ? [true] : [false, true];
         foreach (Effort effort in (ReadOnlySpan<Effort>)[Effort.Routine, Effort.Special])
         {
             bool worthIt = effort == least || candidate.Process.SizedBy == ToolUse.Ream || candidate.HeldWidth(least).Picometres > window.Width;
@@ -173,10 +177,16 @@ internal sealed class RouteSearch
                 MetalWindow reach = Reach(candidate, tool, effort, window);
                 foreach (Machine machine in candidate.Machines)
                 {
-                    if (tool is null || tool.Stamped <= machine.Largest)
+                    if (tool is not null && tool.Stamped > machine.Largest)
+                    {
+                        continue;
+                    }
+
+                    foreach (bool byHandbook in methods)
                     {
                         Push(new Step
                         {
+                            ByHandbook = byHandbook,
                             Candidate = candidate,
                             Machine = machine,
                             Tool = tool,
@@ -217,7 +227,7 @@ internal sealed class RouteSearch
         SizeWindow sizes = window.Sizes(_job.IsInternal);
         if (use == ToolUse.Ream)
         {
-            return [.. ReamerChoice.Best(_shop.ToolsNear(use, sizes), sizes, _job.Nominal, _job.Feature.Class, tool => Yield(candidate, tool, effort, window, window))];
+            return [.. ReamerChoice.Suited(_shop.ToolsNear(use, sizes), sizes, _job.Feature.Class, tool => Yield(candidate, tool, effort, window, window))];
         }
 
         List<Tool?> fitting = [];
@@ -237,15 +247,13 @@ internal sealed class RouteSearch
 
     private bool Cuts(Candidate candidate, int changesBefore)
     {
+        bool cuts = candidate.CutsSoft;
         for (int i = 0; i < changesBefore; i++)
         {
-            if (_changes[i].Hardens)
-            {
-                return candidate.CutsHard;
-            }
+            cuts = _changes[i].Spares(candidate.Process.MostStockAt(_job.Nominal)) && (_changes[i].Hardens ? candidate.CutsHard : cuts);
         }
 
-        return candidate.CutsSoft;
+        return cuts;
     }
 
     /// <summary>Spread from the grade held (a sixth of it), or from the tool's predicted range; the share of it inside the window.</summary>
@@ -258,7 +266,10 @@ internal sealed class RouteSearch
     {
         MetalWindow aim = tool is null ? held : Cut(candidate, tool, effort);
         double spread = tool is null ? candidate.HeldWidth(effort).Picometres : aim.Width;
-        return NormalYield.Of(good.Least, good.Most, (aim.Least + aim.Most) / 2.0, spread / 6.0);
+        double yield = NormalYield.Of(good.Least, good.Most, (aim.Least + aim.Most) / 2.0, spread / 6.0);
+
+        // Two tools that differ by less than one hole in ten thousand are equally good.
+        return tool is null ? yield : Math.Round(yield, YieldPlaces);
     }
 
     /// <summary>What a tool of fixed size is predicted to leave.</summary>
@@ -419,24 +430,14 @@ internal sealed class RouteSearch
         bool same = between.Length == 0 && machine == step.Machine;
         bool heat = Array.Exists(between, static change => change.Hardens);
         Deviation tolerance = LeftTolerance(before, step, null);
-        StockNeed need = Need(step, before.Process.Name, step.Reach.Most, tolerance, same, heat);
-        MetalWindow entering = Entering(step, need.Least, between);
+        Stock need = Need(step, before.Process.Name, step.Reach.Most, tolerance, same, heat).Least;
+        MetalWindow entering = Entering(step, need, between);
         if (before.Process.SizedBy is { } use)
         {
             PrecedeWithTools(step, before, machine, between, changesLeft, entering, use);
             return;
         }
 
-        PrecedeWithSetting(step, before, machine, between, changesLeft, entering, tolerance);
-        if (need.Larger is { } larger)
-        {
-            // The handbook's larger stock stays open to a large lot: more on a finishing cut can save a roughing pass.
-            PrecedeWithSetting(step, before, machine, between, changesLeft, Entering(step, larger, between), tolerance);
-        }
-    }
-
-    private void PrecedeWithSetting(Step step, Candidate before, Machine machine, Change[] between, int changesLeft, MetalWindow entering, Deviation tolerance)
-    {
         Length resolution = tolerance >= Deviation.FromMicrometres(50) ? Hundredth : Micrometre;
         long least = new Length(entering.Least).RoundUp(resolution).Picometres;
         MetalWindow leaving = new(least, least + tolerance.Picometres);
@@ -529,7 +530,7 @@ internal sealed class RouteSearch
     }
 
     private StockNeed Need(Step step, string before, long metal, Deviation tolerance, bool sameClamping, bool afterHeat) =>
-        StockNeed.Between(step.Process, before, _job, MetalWindow.Size(metal), tolerance, sameClamping, afterHeat);
+        StockNeed.Between(step.Process, before, _job, MetalWindow.Size(metal), tolerance, sameClamping, afterHeat, step.ByHandbook);
 
     /// <summary>The window that must be left by the operation before, with the changes between taken off at their extremes; may be closed.</summary>
     private static MetalWindow Entering(Step step, Stock least, Change[] between)
@@ -571,6 +572,7 @@ internal sealed class RouteSearch
         double yield = tool is null ? Yield(before, null, Effort.Routine, leaving, leaving) : 1;
         return new Step
         {
+            ByHandbook = step.ByHandbook,
             Candidate = before,
             Machine = machine,
             Tool = tool,

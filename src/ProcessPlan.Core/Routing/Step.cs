@@ -28,6 +28,9 @@ internal sealed record Step
     /// </summary>
     public MetalWindow Reach { get; init; }
 
+    /// <summary>Whether the chain leaves the handbook's stock where that is larger than the analytical one.</summary>
+    public bool ByHandbook { get; init; }
+
     /// <summary>Whether the last step is held to less than the drawing allows, because it takes so little.</summary>
     public bool IsHeldInside { get; init; }
 

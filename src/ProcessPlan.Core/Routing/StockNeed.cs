@@ -64,13 +64,10 @@ internal readonly record struct StockNeed
     /// <summary>Least stock that the handbook's figure comes to, once the tolerance of the operation before is taken off.</summary>
     private Stock? TableLeast { get; init; }
 
-    private int Quantity { get; init; }
+    private bool ByHandbook { get; init; }
 
     /// <summary>The least stock that is planned with.</summary>
-    public Stock Least => Quantity <= SmallLot && TableLeast is { } table && table > Analytical ? table : Analytical;
-
-    /// <summary>The handbook's larger stock where a large lot may keep it but need not; null where it is no choice.</summary>
-    public Stock? Larger => Quantity > SmallLot && TableLeast is { } table && table > Analytical ? table : null;
+    public Stock Least => ByHandbook && TableLeast is { } table && table > Analytical ? table : Analytical;
 
     /// <summary>What <paramref name="process"/> must at least remove after <paramref name="before"/>.</summary>
     /// <param name="process">The operation.</param>
@@ -79,8 +76,9 @@ internal readonly record struct StockNeed
     /// <param name="size">Size at the joint.</param>
     /// <param name="toleranceBefore">Tolerance that the operation before leaves.</param>
     /// <param name="sameClamping">Both on one machine, without taking the part off.</param>
-    /// <param name="afterHeat">A heat treatment lies between.</param>
-    public static StockNeed Between(Process process, string before, Job job, Length size, Deviation toleranceBefore, bool sameClamping, bool afterHeat)
+    /// <param name="afterHeat">A heat treatment lies between: what it does to a part cannot be computed finely, so the handbook's figure holds for any lot.</param>
+    /// <param name="byHandbook">The handbook's stock is kept where it is larger.</param>
+    public static StockNeed Between(Process process, string before, Job job, Length size, Deviation toleranceBefore, bool sameClamping, bool afterHeat, bool byHandbook)
     {
         SurfaceState state = SurfaceState.After(before, size);
         bool blank = before is "bar" or "casting";
@@ -110,7 +108,7 @@ internal readonly record struct StockNeed
             Table = table,
             TableOrigin = origin,
             TableLeast = table is { } basic && basic.Picometres > toleranceBefore.Picometres ? new Stock(basic.Picometres - toleranceBefore.Picometres) : null,
-            Quantity = job.Quantity,
+            ByHandbook = byHandbook || afterHeat,
         };
     }
 
@@ -127,7 +125,7 @@ internal readonly record struct StockNeed
         yield return $"least stock, analytical: 2·(Rz {Text(Rz)} + h {Text(Layer)}{spatial}) = {Analytical.Picometres / Length.PicometresPerMicrometre} µm [{Surface.Origin}]";
         if (Table is { } table)
         {
-            string used = Larger is not null ? "kept in a large lot only where that is cheaper" : Least == Analytical ? "not used" : $"used for lots up to {SmallLot}";
+            string used = Least == Analytical ? "not used" : $"used for lots up to {SmallLot}, after heat treatment, and where it is cheaper";
             yield return $"handbook stock {table}, {used} [{TableOrigin}]";
         }
     }

@@ -32,42 +32,25 @@ public static class ReamerChoice
     }
 
     /// <summary>
-    /// The best suited reamer: the one that leaves the largest share of good holes, to a ten-thousandth; among equals the one made for this class of
-    /// hole, else the smallest, which asks least of the hole before it (every suited one has its wear left). Behind it the smallest of all and the
-    /// one stamped nearest to the nominal size, where they are others: one of them may be the only one that the drills of the crib can serve.
+    /// Every suited reamer, the best first: the larger share of good holes, among equals the one made for this class of hole, else the smaller, which asks
+    /// less of the hole before it (each has its wear left). Only with the drills of the crib in view can one be chosen.
     /// </summary>
     /// <param name="near">Reamers of about this size.</param>
     /// <param name="hole">Limits of the hole.</param>
-    /// <param name="nominal">Nominal size of the hole.</param>
     /// <param name="asked">The class asked for, if any.</param>
     /// <param name="yield">Share of good holes that a reamer leaves.</param>
-    public static IEnumerable<Tool> Best(ReadOnlySpan<Tool> near, SizeWindow hole, Length nominal, ToleranceClass? asked, Func<Tool, double> yield)
+    public static IEnumerable<Tool> Suited(ReadOnlySpan<Tool> near, SizeWindow hole, ToleranceClass? asked, Func<Tool, double> yield)
     {
-        const int YieldPlaces = 4;
-        Tool? best = null;
-        Tool? smallest = null;
-        Tool? nearest = null;
-        (double Yield, bool MadeFor, Length Size) merit = default;
+        List<Tool> suited = [];
         foreach (Tool tool in near)
         {
-            if (!Suits(tool, hole, out _))
+            if (Suits(tool, hole, out _))
             {
-                continue;
-            }
-
-            (double Yield, bool MadeFor, Length Size) own =
-                (Math.Round(yield(tool), YieldPlaces), asked is { } toleranceClass && tool.Made == toleranceClass.ToString(), new Length(-tool.Own.Max.Picometres));
-            smallest = smallest is null || tool.Own.Max < smallest.Own.Max ? tool : smallest;
-            nearest = nearest is null || Away(tool) < Away(nearest) ? tool : nearest;
-            if (best is null || own.CompareTo(merit) > 0)
-            {
-                (best, merit) = (tool, own);
+                suited.Add(tool);
             }
         }
 
-        return best is null ? [] : new[] { best, smallest!, nearest! }.Distinct();
-
-        long Away(Tool tool) => Math.Abs(tool.Stamped.Picometres - nominal.Picometres);
+        return suited.OrderByDescending(yield).ThenByDescending(tool => asked is { } toleranceClass && tool.Made == toleranceClass.ToString()).ThenBy(static tool => tool.Own.Max);
     }
 
     /// <summary>A quarter of the hole tolerance whose 35 % is the reamer's own tolerance.</summary>

@@ -75,7 +75,11 @@ internal sealed class ExhaustiveSearch(Job job, ShopFloor shop)
                 {
                     MetalWindow cut = tool is null ? new MetalWindow(window.Most - candidate.HeldWidth(effort).Picometres, window.Most) : Cut(tool, candidate, effort);
                     MetalWindow reach = new(Math.Max(window.Least, cut.Least), Math.Min(window.Most, cut.Most));
-                    yield return new Node(candidate, machine, tool, effort, window, reach, Share(candidate, tool, effort, window, window), true, changesLeft, !candidate.Process.Follows);
+                    yield return new Node(candidate, machine, tool, effort, window, reach, Share(candidate, tool, effort, window, window), true, changesLeft, !candidate.Process.Follows, job.Quantity <= 50);
+                    if (job.Quantity > 50)
+                    {
+                        yield return new Node(candidate, machine, tool, effort, window, reach, Share(candidate, tool, effort, window, window), true, changesLeft, !candidate.Process.Follows, true);
+                    }
                 }
             }
         }
@@ -116,7 +120,7 @@ internal sealed class ExhaustiveSearch(Job job, ShopFloor shop)
     {
         Deviation tolerance = Iso286.TryWidth(MetalWindow.Size(node.Reach.Most), before.LeftGrade, out Deviation width) ? width : before.RoutineWidth!.Value;
         StockNeed need = StockNeed.Between(node.Process, before.Process.Name, job, MetalWindow.Size(node.Reach.Most), tolerance,
-            between.Count == 0 && machine == node.Machine, between.Exists(change => change.Hardens));
+            between.Count == 0 && machine == node.Machine, between.Exists(change => change.Hardens), node.ByHandbook);
         if (before.Process.SizedBy is { } use)
         {
             MetalWindow window = Entering(node, need.Least, between);
@@ -124,21 +128,11 @@ internal sealed class ExhaustiveSearch(Job job, ShopFloor shop)
                 .Select(tool => ((Tool?)tool, Cut(tool, before, Effort.Routine)))];
         }
 
-        Stock[] needs = need.Larger is { } larger ? [need.Least, larger] : [need.Least];
         Length resolution = tolerance >= Deviation.FromMicrometres(50) ? Length.FromMicrometres(10) : Length.FromMicrometres(1);
-        List<(Tool? Tool, MetalWindow Leaving)> leavings = [];
-        foreach (Stock stock in needs)
-        {
-            MetalWindow entering = Entering(node, stock, between);
-            long least = new Length(entering.Least).RoundUp(resolution).Picometres;
-            MetalWindow leaving = new(least, least + tolerance.Picometres);
-            if (entering.Holds(leaving))
-            {
-                leavings.Add((null, leaving));
-            }
-        }
-
-        return leavings;
+        MetalWindow entering = Entering(node, need.Least, between);
+        long least = new Length(entering.Least).RoundUp(resolution).Picometres;
+        MetalWindow leaving = new(least, least + tolerance.Picometres);
+        return entering.Holds(leaving) ? [(null, leaving)] : [];
     }
 
     private double After(Node node, Candidate before, Machine machine, Tool? tool, MetalWindow leaving, List<Change> between, int left)
@@ -152,7 +146,7 @@ internal sealed class ExhaustiveSearch(Job job, ShopFloor shop)
         node = HeldInside(node, entering);
         double own = Own(node, entering, between.Count > 0 || machine != node.Machine) + between.Sum(Charge);
         double yield = (tool is null ? Share(before, null, Effort.Routine, leaving, leaving) : 1) * node.YieldToEnd;
-        Node earlier = new(before, machine, tool, Effort.Routine, leaving, leaving, yield, false, left, node.Places || !before.Process.Follows);
+        Node earlier = new(before, machine, tool, Effort.Routine, leaving, leaving, yield, false, left, node.Places || !before.Process.Follows, node.ByHandbook);
         return own + (before.Process.SizedBy == ToolUse.Drill ? FromDrill(earlier) : UpTo(earlier));
     }
 
@@ -189,7 +183,7 @@ internal sealed class ExhaustiveSearch(Job job, ShopFloor shop)
     private double FromSize(Node node, string surface, SizeWindow sizes)
     {
         MetalWindow blank = MetalWindow.Of(sizes, job.IsInternal);
-        Stock need = StockNeed.Between(node.Process, surface, job, MetalWindow.Size(blank.Most), new Deviation(blank.Width), false, false).Least;
+        Stock need = StockNeed.Between(node.Process, surface, job, MetalWindow.Size(blank.Most), new Deviation(blank.Width), false, false, node.ByHandbook).Least;
         return Entering(node, need, []).Holds(blank) ? Begin(HeldInside(node, blank), blank) : double.PositiveInfinity;
     }
 
@@ -282,18 +276,24 @@ internal sealed class ExhaustiveSearch(Job job, ShopFloor shop)
     {
         MetalWindow aim = tool is null ? held : Cut(tool, candidate, effort);
         double sigma = (tool is null ? candidate.HeldWidth(effort).Picometres : aim.Width) / 6.0;
-        return NormalYield.Of(good.Least, good.Most, (aim.Least + aim.Most) / 2.0, sigma);
+        double share = NormalYield.Of(good.Least, good.Most, (aim.Least + aim.Most) / 2.0, sigma);
+        return tool is null ? share : Math.Round(share, 4);
     }
 
     private MetalWindow Cut(Tool tool, Candidate candidate, Effort effort) =>
         MetalWindow.Of(SizedCut.Predict(tool, job.Group, effort == Effort.Special || candidate.Process.EnterGrade <= ToleranceGrade.It(9)).Sizes, job.IsInternal);
 
-    private bool Cuts(Candidate candidate, int changesBefore) => _changes.Take(changesBefore).Any(change => change.Hardens) ? candidate.CutsHard : candidate.CutsSoft;
+    private bool Cuts(Candidate candidate, int changesBefore)
+    {
+        Change[] before = [.. _changes.Take(changesBefore)];
+        long most = candidate.Process.MostStockAt(job.Nominal).Picometres;
+        return (before.Any(change => change.Hardens) ? candidate.CutsHard : candidate.CutsSoft) && before.All(change => change.Layer is not { } layer || 2 * most <= layer.Picometres);
+    }
 
     private double Charge(Change change) => change.Supplier is { } supplier ? (double)supplier.ChargeFor(job.Quantity) / job.Quantity : 0;
 
     private sealed record Node(
-        Candidate Candidate, Machine Machine, Tool? Tool, Effort Effort, MetalWindow Window, MetalWindow Reach, double YieldToEnd, bool IsLast, int ChangesLeft, bool Places)
+        Candidate Candidate, Machine Machine, Tool? Tool, Effort Effort, MetalWindow Window, MetalWindow Reach, double YieldToEnd, bool IsLast, int ChangesLeft, bool Places, bool ByHandbook)
     {
         public Process Process => Candidate.Process;
     }

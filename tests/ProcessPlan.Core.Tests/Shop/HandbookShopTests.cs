@@ -19,7 +19,7 @@ public class HandbookShopTests
         Add(printed, 1.00m, 2.95m, 0.05m);
         Add(printed, 3.0m, 13.9m, 0.1m);
         Add(printed, 14m, 25m, 0.25m);
-        Floor.Tools(ToolUse.Drill).Select(drill => drill.Stamped.Millimetres).Where(size => size <= 25).Should().Equal(printed);
+        Floor.Tools(ToolUse.Drill).Select(drill => drill.Stamped.Millimetres).Where(size => size is >= 1 and <= 25).Should().Equal(printed);
     }
 
     // Hartner catalogue, diameter tolerances: h8 is the standard of DIN 1414.

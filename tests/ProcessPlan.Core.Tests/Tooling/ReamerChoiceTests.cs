@@ -8,7 +8,7 @@ namespace ProcessPlan.Core.Tests.Tooling;
 public class ReamerChoiceTests
 {
     private static readonly ShopFloor Floor = HandbookShop.Load();
-    private static readonly Length Ten = Length.FromMillimetres(10);
+    private static readonly Tool[] Near = [.. Floor.Tools(ToolUse.Ream).Where(tool => tool.Stamped.Millimetres is > 9.9m and < 10.2m)];
 
     // A stock H7 reamer must not be handed to an M7, N7, P7, F8 or G6 hole (needs of the trade); H7, H8 and H9 are what it is for or can serve.
     [Theory]
@@ -43,25 +43,24 @@ public class ReamerChoiceTests
     }
 
     [Fact]
-    public void Best_EqualYields_IsTheReamerMadeForTheClassThenTheSmallest()
+    public void Suited_EqualYields_BeginsWithTheReamerMadeForTheClassThenBySize()
     {
-        SizeWindow hole = Hole(Length.FromMillimetres(10), "H7");
         ToleranceClass.TryRead("H7", out ToleranceClass h7, out _);
-        Tool[] near = [.. Floor.Tools(ToolUse.Ream).Where(tool => tool.Stamped.Millimetres is > 9.9m and < 10.1m)];
-        ReamerChoice.Best(near, hole, Ten, h7, static _ => 1).First().Label.Should().Be("machine reamer 10 H7");
         SizeWindow wide = Hole(Length.FromMillimetres(10), "H10");
-        Tool smallest = ReamerChoice.Best(near, wide, Ten, null, static _ => 1).Single();
-        near.Where(tool => ReamerChoice.Suits(tool, wide, out _)).Should().HaveCountGreaterThan(2).And.OnlyContain(tool => tool.Own.Max >= smallest.Own.Max);
+        Tool[] suited = [.. ReamerChoice.Suited(Near, wide, h7, static _ => 1)];
+        suited.Should().HaveCountGreaterThan(2);
+        suited[0].Label.Should().Be("machine reamer 10 H7");
+        suited[1..].Select(tool => tool.Own.Max).Should().BeInAscendingOrder();
+        suited.Should().BeEquivalentTo(Near.Where(tool => ReamerChoice.Suits(tool, wide, out _)));
     }
 
     [Fact]
-    public void Best_ABetterYield_GoesFirstAndTheSmallestStaysBehindIt()
+    public void Suited_ABetterYield_GoesBeforeEverything()
     {
         SizeWindow hole = Hole(Length.FromMillimetres(10), "H9");
-        Tool[] near = [.. Floor.Tools(ToolUse.Ream).Where(tool => tool.Stamped.Millimetres is > 9.9m and < 10.1m)];
-        Tool best = Floor.Tools(ToolUse.Ream).Single(tool => tool.Stamped == Length.FromMillimetres(10.02m));
-        ReamerChoice.Best(near, hole, Ten, null, tool => tool == best ? 0.99 : 0.98).Select(tool => tool.Label).Should().Equal(best.Label, "machine reamer 10 H7");
-        ReamerChoice.Best([], hole, Ten, null, static _ => 1).Should().BeEmpty();
+        Tool best = Near.Single(tool => tool.Stamped == Length.FromMillimetres(10.02m));
+        ReamerChoice.Suited(Near, hole, null, tool => tool == best ? 0.99 : 0.98).First().Should().Be(best);
+        ReamerChoice.Suited([], hole, null, static _ => 1).Should().BeEmpty();
     }
 
     private static SizeWindow Hole(Length nominal, string hole)
