@@ -1,7 +1,9 @@
 using ProcessPlan.Core.Capability;
 using ProcessPlan.Core.Costing;
+using ProcessPlan.Core.Inspection;
 using ProcessPlan.Core.Shop;
 using ProcessPlan.Core.Tooling;
+using ProcessPlan.Core.Values;
 
 namespace ProcessPlan.Core.Routing;
 
@@ -9,7 +11,7 @@ namespace ProcessPlan.Core.Routing;
 /// <param name="Tool">The drill.</param>
 /// <param name="Leaving">What it leaves.</param>
 /// <param name="Pilot">The drill before it, or null.</param>
-/// <param name="Cost">Time under the tool and wear of both, and the change between them, of one piece.</param>
+/// <param name="Cost">Time under the tool, checking and wear of both, and the change between them, of one piece.</param>
 internal sealed record Drill(Tool Tool, MetalWindow Leaving, Tool? Pilot, double Cost)
 {
     /// <summary>Whether it goes into solid metal, alone or after its pilot.</summary>
@@ -43,7 +45,7 @@ internal sealed class Drills(Job job, ShopFloor shop, CuttingData data)
     /// <summary>What a drill leaves.</summary>
     public MetalWindow Leaving(Tool tool) => MetalWindow.Of(SizedCut.Predict(tool, job.Group, careful: false).Sizes, job.IsInternal);
 
-    /// <summary>The least that any drill of the shop costs under the tool, time and wear.</summary>
+    /// <summary>The least that any drill of the shop costs under the tool, time, checking and wear.</summary>
     public double LeastCost(Machine machine)
     {
         double least = double.PositiveInfinity;
@@ -55,12 +57,14 @@ internal sealed class Drills(Job job, ShopFloor shop, CuttingData data)
         return least;
     }
 
-    /// <summary>Time under the tool and wear, of one piece.</summary>
+    /// <summary>Time under the tool, checking and wear, of one piece.</summary>
     private double CostOf(Tool tool, Machine machine)
     {
+        SizeWindow hole = SizedCut.Predict(tool, job.Group, careful: false).Sizes;
+        double checking = Instrument.For(inside: true, hole.Max, hole.Width).Instrument.MinutesPerCheck * Checks.PerPiece(_drilling!, Effort.Routine);
         Cut cut = new(_drilling!, data, tool.Stamped, job.Extent, null, _drilling!.LeftRa, Effort.Routine);
         double minutes = CutTime.For(cut).Minutes;
-        return machine.RatePerMinute * minutes + ToolWear.Of(cut, tool, minutes);
+        return machine.RatePerMinute * (minutes + checking) + ToolWear.Of(cut, tool, minutes);
     }
 
     /// <summary>The cheapest pilot within the handbook's share of the drill; null where the crib has none. What comes later does not matter to it.</summary>

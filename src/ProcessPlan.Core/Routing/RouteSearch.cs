@@ -493,14 +493,16 @@ internal sealed class RouteSearch
             else if (CanDrill(drill, step, between))
             {
                 // A drill ends the way back, alone or with its pilot: of all sizes only the cheapest can belong to a best route.
-                double after = CostOf(step, Grown(leaving, between), machine != step.Machine || between.Length > 0).PerGoodPiece(step.YieldToEnd, _job.Quantity);
+                MetalWindow grown = Grown(leaving, between);
+                Step held = Held(step, grown);
+                double after = CostOf(held, grown, machine != step.Machine || between.Length > 0).PerGoodPiece(held.YieldToEnd, _job.Quantity);
                 if (after >= cheapest?.Cost)
                 {
                     // A smaller drill leaves this step still more to cut.
                     break;
                 }
 
-                double cost = after + drill.Cost / step.YieldToEnd;
+                double cost = after + drill.Cost / held.YieldToEnd;
                 cheapest = cheapest is null || cost < cheapest.Value.Cost ? (cost, drill) : cheapest;
             }
         }
