@@ -16,10 +16,13 @@ internal static class RefusalWriter
         string asked = Asked(job);
         if (search.ClosedChange is { } change)
         {
+            string[] ways = change.Covers
+                ? ["Ask the designer: limits before the coating, a closer thickness, or masking.", "Coat over size and grind to the drawing."]
+                : ["A process that cuts the hard metal to size after it: grinding, hard turning, wire cutting.", "Ask the designer whether a wider tolerance serves."];
             return new Refusal(asked,
                 $"No window exists before {change.Process}: it moves the size by {change.LeastGrowth} to {change.MostGrowth}, the tolerance is {job.Feature.Limits.Width.Format()} µm.",
                 Best(job, candidates),
-                ["Ask the designer: limits before the coating, a closer thickness, or masking.", "Coat over size and grind to the drawing."]);
+                ways);
         }
 
         List<Candidate> finishing = [.. candidates.Where(static candidate => candidate.Finishes is not null)];
@@ -29,7 +32,11 @@ internal static class RefusalWriter
         }
 
         string finishers = string.Join(", ", finishing.Select(static candidate => candidate.Process.Name));
-        string message = job.AsksForPosition && !candidates.Any(PutsTheAxisRight)
+        string message = search.BlankMiss is { } blank
+            ? $"{finishers} could finish it, but no first cut suits the blank: {blank.Before} is {blank.ShortBy.Format()} µm out of what {blank.Process} can start from."
+            : job.Hrc > Job.HardFromHrc && !candidates.Any(static candidate => candidate.NoAtAll is null && candidate.CutsSoft && candidate.Process.StartsRough)
+            ? $"The metal has {job.Hrc:0} HRC as delivered: nothing of this shop opens it from the blank."
+            : job.AsksForPosition && !candidates.Any(PutsTheAxisRight)
             ? $"{finishers} could finish it, but nothing before puts the axis right."
             : search.NearestMiss is { } miss
                 ? $"{finishers} could finish it, but the window between {miss.Before} and {miss.Process} is too narrow by {miss.ShortBy.Format()} µm at the nearest."
@@ -54,7 +61,7 @@ internal static class RefusalWriter
         Candidate? smoothest = null;
         foreach (Candidate candidate in candidates)
         {
-            if (candidate.NoAtAll is not null)
+            if (candidate.NoAtAll is not null || job.Nominal > candidate.Process.Largest)
             {
                 continue;
             }

@@ -95,7 +95,7 @@ public static class PlanJson
         json.WriteStartObject();
         json.WriteNumber(Feature, feature);
         json.WriteNumber(Rank, route.Rank);
-        json.WriteNumber(CostPerPiece, route.CostPerPiece.Rounded);
+        json.WriteNumber(CostPerPiece, route.ShownCost.Rounded);
         json.WriteString(Currency, route.CostPerPiece.Currency);
         json.WriteNumber(MinutesPerPiece, Math.Round(route.MinutesPerPiece.Value, MinutePlaces));
         json.WriteNumber(SetupMinutes, Math.Round(route.SetUp.Value, MinutePlaces));

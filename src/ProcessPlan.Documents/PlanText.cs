@@ -45,6 +45,11 @@ public sealed class PlanText(TextWriter target, LengthUnit? unit, WhyAsked? why)
 
     private void Write(Plan plan)
     {
+        if (plan.Refusal is null && why?.Operation is { } asked && !plan.Routes[0].Operations.Any(operation => operation.Number == asked))
+        {
+            TextLines.Write(target, $"(--why {asked}: this route has no operation {asked}.)", 0);
+        }
+
         UnitScale scale = new(unit ?? plan.Job.Feature.Unit);
         TextLines.Write(target, "ROUTE CARD  " + FeatureText.Line(plan.Job.Feature), 0);
         target.WriteLine(Rule);
@@ -83,7 +88,7 @@ public sealed class PlanText(TextWriter target, LengthUnit? unit, WhyAsked? why)
     private void Write(Route route, Job job, UnitScale scale)
     {
         target.WriteLine(string.Create(CultureInfo.InvariantCulture,
-            $"{route.CostPerPiece} a piece, {route.MinutesPerPiece} a piece, set-up {route.SetUp.Value:0} min a lot of {job.Quantity}"));
+            $"{route.ShownCost} a piece, {route.MinutesPerPiece} a piece, set-up {route.SetUp.Value:0} min a lot of {job.Quantity}"));
         target.WriteLine(string.Create(CultureInfo.InvariantCulture,
             $"yield {route.Yield:0.0 %} by the spread of the handbook: start {route.Blanks}, from {route.From}"));
         foreach (Operation operation in route.Operations)
@@ -143,7 +148,7 @@ public sealed class PlanText(TextWriter target, LengthUnit? unit, WhyAsked? why)
         target.WriteLine("Other ways");
         foreach (Route route in routes.Skip(1))
         {
-            Money dearer = new(route.CostPerPiece.Rounded - routes[0].CostPerPiece.Rounded, route.CostPerPiece.Currency);
+            Money dearer = new(route.ShownCost.Rounded - routes[0].ShownCost.Rounded, route.CostPerPiece.Currency);
             TextLines.Write(target, $"{route.Rank}  +{dearer} a piece: {string.Join(", ", route.Operations.Select(static operation => operation.Process))}", 2);
         }
     }

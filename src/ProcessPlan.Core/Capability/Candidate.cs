@@ -9,6 +9,11 @@ namespace ProcessPlan.Core.Capability;
 /// <summary>What one process can do for one job in one shop, and the binding reason for every no.</summary>
 public sealed class Candidate
 {
+    private const int FormPercent = 40;
+
+    /// <summary>Height of a 118° point over the diameter.</summary>
+    private const double DrillPointShare = 0.3;
+
     private const double DeepForBoring = 4;
     private const double DeepForDrilling = 5;
 
@@ -68,6 +73,9 @@ public sealed class Candidate
     public bool CutsHard { get; private init; }
 
     public string? WhyNot => NoAtAll ?? NoToFinish;
+
+    /// <summary>Roundness and cylindricity that come with the tolerance held: common practice, no source.</summary>
+    public Deviation FormError(Effort effort) => new(HeldWidth(effort).Picometres * FormPercent / 100);
 
     /// <summary>The tolerance held with an effort.</summary>
     public Deviation HeldWidth(Effort effort) => effort == Effort.Special && SpecialWidth is { } special ? special : RoutineWidth!.Value;
@@ -167,10 +175,15 @@ public sealed class Candidate
             return (null, $"for {process.Smallest.Format()} to {process.Largest}, the {job.Kind.Word()} has {job.Nominal}");
         }
 
+        if (process.SizedBy == ToolUse.Drill && job.End == HoleEnd.Blind && job.BottomRoom is { } room && room.Picometres < DrillPointShare * job.Nominal.Picometres)
+        {
+            return (null, $"its point needs {DrillPointShare:0.0} times the diameter below full size, the blind hole has {room}");
+        }
+
         bool smoothEnough(Effort effort) => job.Ra is not { } asked || process.Ra(effort).Nanometres <= asked.Nanometres;
         foreach (Effort effort in (ReadOnlySpan<Effort>)[Effort.Routine, Effort.Special])
         {
-            if (candidate.HeldWidth(effort) <= asked && smoothEnough(effort))
+            if (candidate.HeldWidth(effort) <= asked && smoothEnough(effort) && candidate.FormError(effort) <= (job.AskedForm ?? candidate.FormError(effort)))
             {
                 return (effort, null);
             }
@@ -183,7 +196,9 @@ public sealed class Candidate
             return (null, $"holds {finest}{lost}, {candidate.HeldWidth(Effort.Special).Format()} µm; asked are {asked.Format()} µm");
         }
 
-        return (null, $"leaves {process.Ra(Effort.Special)} at best, asked is {job.Feature.Finish}");
+        return smoothEnough(Effort.Special)
+            ? (null, $"its form error is {candidate.FormError(Effort.Special).Format()} µm at best (0.4 of its tolerance), asked are {job.AskedForm?.Format()} µm")
+            : (null, $"leaves {process.Ra(Effort.Special)} at best, asked is {job.Feature.Finish}");
     }
 
     private Deviation? Width(Job job, ToleranceGrade grade) =>

@@ -20,6 +20,10 @@ public sealed class Job
     /// <summary>An Rz below the finest pair of the table: no process leaves this Ra, so it is refused and not forgotten.</summary>
     private static readonly Roughness FinerThanAny = Roughness.Ra(1);
 
+    /// <summary>HB or HV from which ISO 18265 gives an HRC at all; what it cannot convert above is harder than its last row, 68 HRC.</summary>
+    private const double SoftestPointsOnTable = 250;
+    private const double HardestHrcOnTable = 68;
+
     private readonly List<string> _assumptions = [];
     private readonly List<string> _queries = [];
 
@@ -94,6 +98,18 @@ public sealed class Job
     /// <summary>Questions to put to the drawing's owner.</summary>
     public IReadOnlyList<string> Queries => _queries;
 
+    /// <summary>The closer of roundness and cylindricity, or null where neither is asked for.</summary>
+    public Deviation? AskedForm
+    {
+        get
+        {
+            Length? round = Feature.Asked(GeometryKind.Roundness);
+            Length? cylindric = Feature.Asked(GeometryKind.Cylindricity);
+            Length? closer = round is { } r && cylindric is { } c ? (r < c ? r : c) : round ?? cylindric;
+            return closer is { } zone ? zone - Length.Zero : null;
+        }
+    }
+
     /// <summary>Position or coaxiality that a tool which follows the drilled hole cannot give.</summary>
     public bool AsksForPosition
     {
@@ -104,7 +120,9 @@ public sealed class Job
         }
     }
 
-    private static double? ToHrc(Hardness hardness) => HardnessConversion.Convert(hardness, HardnessScale.HRC)?.Points;
+    /// <summary>Null below the range of HRC; above the conversion table the hardest that it knows.</summary>
+    private static double? ToHrc(Hardness hardness) => HardnessConversion.Convert(hardness, HardnessScale.HRC)?.Points
+        ?? (hardness.Points > SoftestPointsOnTable ? HardestHrcOnTable : null);
 
     private static string HbRange(Material material) => material.HbFrom is { } from ? $"{from:0} to {material.HbTo:0} HB" : $"up to {material.HbTo:0} HB";
 

@@ -54,6 +54,10 @@ public readonly record struct CutTime(double Minutes, double Speed, double Feed,
 
     private const double WorkSpeed = 20;
     private const int SparkOut = 4;
+
+    /// <summary>Minutes a piece for the approach of the wheel and its share of dressing (common practice, no source).</summary>
+    private const double ApproachAndDressing = 0.3;
+
     private const double HoneRate = 0.05;
     private const double LapRate = 0.005;
     private const double WireRate = 60;
@@ -89,6 +93,8 @@ public readonly record struct CutTime(double Minutes, double Speed, double Feed,
             "hone" or "lap" or "superfinish" => $"stock {cut.Stock} / {Text(Feed)} mm/min{special} = {minutes} min",
             "broach" => $"one stroke with its return{special} = {minutes} min",
             "wire" => $"cut area / {Text(Feed)} mm²/min{special} = {minutes} min",
+            "grind-round" or "centreless" or "grind-hole" or "grind-flat" =>
+                $"({Passes} strokes of {Text(Travel)} mm / (feed {Text(Feed)} mm · π·D·n by {Text(Speed)} m/min) + {Text(ApproachAndDressing)} approach and dressing){special} = {minutes} min",
             _ => $"travel {Text(Travel)} mm · {Passes} / (feed {Text(Feed)} mm · π·D·n by {Text(Speed)} m/min){special} = {minutes} min",
         };
     }
@@ -145,10 +151,12 @@ public readonly record struct CutTime(double Minutes, double Speed, double Feed,
     {
         bool rough = cut.Process.RoutineGrade >= ToleranceGrade.It(8);
         double share = rough ? 0.6 : 0.33;
-        double infeed = rough ? 0.02 : 0.005;
+        double infeed = (rough ? 0.01 : 0.004) * (cut.Process.Ability == "grind-hole" ? 0.5 : 1);
         double perSide = (cut.Stock?.ToMillimetres() ?? 0) / 2;
-        int strokes = (int)Math.Ceiling(perSide / infeed - 1e-9) + (rough ? 0 : SparkOut);
-        return Revolving(cut.Diameter.ToMillimetres(), WorkSpeed, share * wheelWidth, Math.Max(1, strokes), cut.Extent.ToMillimetres() + wheelWidth / 3);
+        // One infeed a double stroke.
+        int strokes = 2 * ((int)Math.Ceiling(perSide / infeed - 1e-9) + (rough ? SparkOut / 2 : SparkOut));
+        CutTime strokesOnly = Revolving(cut.Diameter.ToMillimetres(), WorkSpeed, share * wheelWidth, Math.Max(1, strokes), cut.Extent.ToMillimetres() + wheelWidth / 3);
+        return strokesOnly with { Minutes = strokesOnly.Minutes + ApproachAndDressing };
     }
 
     private static CutTime ByRate(in Cut cut, double rate)

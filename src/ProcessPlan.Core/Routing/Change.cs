@@ -23,6 +23,7 @@ internal sealed record Change(string Process, string Detail, Deviation LeastGrow
 
     private static readonly Citation HardeningRule = new("steel makers' data and heat treaters' practice", "±0.1 % of the size", Standing.FromMemory);
     private static readonly Citation NitridingRule = new("heat treaters' practice", "growth 3 to 5 % of the nitriding depth per surface", Standing.FromMemory);
+    private static readonly Citation AnodisingRule = new("trade guides to MIL-PRF-8625", "a hard layer grows half out, an ordinary one a third: on diameter once, or two thirds of, the thickness", Standing.Published);
     private static readonly Citation CoatingRule = new("geometry", "twice the build-up per surface on diameter or width", Standing.Derived);
 
     /// <summary>The changes that the drawing specifies, in the order in which they are done.</summary>
@@ -36,10 +37,17 @@ internal sealed record Change(string Process, string Detail, Deviation LeastGrow
 
         if (job.Feature.Coating is { } coating)
         {
-            Deviation growth(Length buildUp) => new(coating.Limits == CoatingLimits.Before ? 0 : 2 * buildUp.Picometres);
+            // An anodised layer grows partly inwards: a hard one stands half out, an ordinary one a third.
+            bool anodised = coating.Name.Contains("anodi", StringComparison.OrdinalIgnoreCase);
+            bool hard = anodised && coating.Name.Contains("hard", StringComparison.OrdinalIgnoreCase);
+            long growthOf(Length thickness) => coating.Limits == CoatingLimits.Before ? 0
+                : hard ? thickness.Picometres
+                : anodised ? thickness.Picometres * 2 / 3
+                : 2 * thickness.Picometres;
+            Deviation growth(Length thickness) => new(growthOf(thickness));
             string side = coating.Limits == CoatingLimits.Before ? "before" : "after";
-            changes.Add(new Change("plating", $"{coating.Name} {coating.Least.Picometres / Length.PicometresPerMicrometre} to {coating.Most.Picometres / Length.PicometresPerMicrometre} µm a surface, the drawing's limits hold {side} it",
-                growth(coating.Least), growth(coating.Most), false, true, null, SupplierOf(shop, "coating"), CoatingRule));
+            changes.Add(new Change(anodised ? "anodising" : "plating", $"{coating.Name} {coating.Least.Picometres / Length.PicometresPerMicrometre} to {coating.Most.Picometres / Length.PicometresPerMicrometre} µm a surface, the drawing's limits hold {side} it",
+                growth(coating.Least), growth(coating.Most), false, true, null, SupplierOf(shop, "coating"), anodised ? AnodisingRule : CoatingRule));
         }
 
         return changes;

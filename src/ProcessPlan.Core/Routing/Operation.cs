@@ -88,4 +88,8 @@ public sealed record Route(
     Minutes SetUp,
     double Yield,
     int Blanks,
-    string From);
+    string From)
+{
+    /// <summary>The cost as it is printed: the sum of the operations' costs to the cent, so that the card adds up.</summary>
+    public Money ShownCost => new(Operations.Sum(static operation => operation.Cost.Rounded), CostPerPiece.Currency);
+}

@@ -68,6 +68,9 @@ internal sealed class RouteSearch
     /// <summary>The joint that closed by the least, where any did.</summary>
     public Closure? NearestMiss { get; private set; }
 
+    /// <summary>The blank that was typed, where no first cut can start from it.</summary>
+    public Closure? BlankMiss { get; private set; }
+
     /// <summary>The change whose window closed against the drawing itself.</summary>
     public Change? ClosedChange { get; private set; }
 
@@ -328,7 +331,8 @@ internal sealed class RouteSearch
         }
         else
         {
-            Miss(step, name, Math.Max(entering.Least - blank.Least, blank.Most - entering.Most));
+            Deviation shortBy = new(Math.Max(entering.Least - blank.Least, blank.Most - entering.Most));
+            BlankMiss = BlankMiss is { } known && known.ShortBy <= shortBy ? known : new Closure(step.Process.Name, name, shortBy);
         }
     }
 
@@ -441,6 +445,11 @@ internal sealed class RouteSearch
         Length resolution = tolerance >= Deviation.FromMicrometres(50) ? Hundredth : Micrometre;
         long least = new Length(entering.Least).RoundUp(resolution).Picometres;
         MetalWindow leaving = new(least, least + tolerance.Picometres);
+        if (leaving.Sizes(_job.IsInternal).Min < before.Process.Smallest)
+        {
+            return;
+        }
+
         if (entering.Holds(leaving))
         {
             Push(Before(step, before, machine, null, leaving, between, changesLeft));

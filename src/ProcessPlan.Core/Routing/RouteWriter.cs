@@ -35,7 +35,7 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
 
         Money cost = Sum(operations);
         return new Route(rank, operations, cost, new Minutes(operations.Sum(static operation => operation.Minutes.Value)),
-            new Minutes(operations.Sum(static operation => operation.SetUp.Value)), yield, (int)Math.Ceiling(job.Quantity / yield - 1e-9), blank.BlankName!);
+            new Minutes(operations.Sum(static operation => operation.SetUp.Value)), yield, StartQuantity.For(job.Quantity, Math.Round(yield, 6)), blank.BlankName!);
     }
 
     private Money Sum(List<Operation> operations)

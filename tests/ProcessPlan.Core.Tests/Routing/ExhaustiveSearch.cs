@@ -132,7 +132,7 @@ internal sealed class ExhaustiveSearch(Job job, ShopFloor shop)
         MetalWindow entering = Entering(node, need.Least, between);
         long least = new Length(entering.Least).RoundUp(resolution).Picometres;
         MetalWindow leaving = new(least, least + tolerance.Picometres);
-        return entering.Holds(leaving) ? [(null, leaving)] : [];
+        return entering.Holds(leaving) && leaving.Sizes(job.IsInternal).Min >= before.Process.Smallest ? [(null, leaving)] : [];
     }
 
     private double After(Node node, Candidate before, Machine machine, Tool? tool, MetalWindow leaving, List<Change> between, int left)
