@@ -27,7 +27,6 @@ internal readonly record struct StepCost(Cut Cut, CutTime Cutting, double Checki
     {
         Process process = step.Process;
         MetalWindow window = step.Window;
-        SizeWindow leaving = window.Sizes(job.IsInternal);
         Cut cut = new(
             process,
             data,
@@ -36,7 +35,7 @@ internal readonly record struct StepCost(Cut Cut, CutTime Cutting, double Checki
             entering is { } from ? new Stock(from.Most - step.Reach.Least) : null,
             step.IsLast ? process.Ra(step.Effort) : process.LeftRa,
             step.Effort);
-        (Instrument instrument, _) = Instrument.For(job.IsInternal, leaving.Max, leaving.Width);
+        (Instrument instrument, _) = Instrument.For(job.IsInternal, job.Nominal, new Deviation(window.Width));
         Machine machine = step.Machine!;
         return new StepCost(cut, CutTime.For(cut), instrument.MinutesPerCheck * Checks.PerPiece(process, step.Effort),
             arrives ? machine.HandlingMinutes : 0, machine, arrives ? machine.SetUpMinutes : 0);
