@@ -57,7 +57,7 @@ public class PlannerTests
     public void Plan_APositionedSmallHole_IsRefusedBecauseNothingPutsTheAxisRight() =>
         Refused("hole 4H7 x8 pos 0.02 C45 10off").Message.Should().EndWith("nothing before puts the axis right.");
 
-    // The contract of the trade: a coating whose spread on diameter reaches the tolerance leaves no window (needs of the trade, N10).
+    // A coating whose spread on diameter reaches the tolerance leaves no window (common practice, no source).
     [Fact]
     public void Plan_ACoatingWiderThanTheTolerance_IsRefusedWithTheSum()
     {

@@ -61,7 +61,7 @@ internal sealed class Drills(Job job, ShopFloor shop, CuttingData data)
     private double CostOf(Tool tool, Machine machine)
     {
         SizeWindow hole = SizedCut.Predict(tool, job.Group, careful: false).Sizes;
-        double checking = Instrument.For(inside: true, hole.Max, hole.Width).Instrument.MinutesPerCheck * Checks.PerPiece(_drilling!, Effort.Routine);
+        double checking = Instrument.For(inside: true, job.Nominal, hole.Width).Instrument.MinutesPerCheck * Checks.PerPiece(_drilling!, Effort.Routine);
         Cut cut = new(_drilling!, data, tool.Stamped, job.Extent, null, _drilling!.LeftRa, Effort.Routine);
         double minutes = CutTime.For(cut).Minutes;
         return machine.RatePerMinute * (minutes + checking) + ToolWear.Of(cut, tool, minutes);

@@ -61,7 +61,7 @@ internal sealed class RouteWriter(Job job, ShopFloor shop, RouteSearch search)
             ? (new Stock(from.Least - step.Window.Most), new Stock(from.Most - step.Window.Least))
             : ((Stock?)null, (Stock?)null);
         Length aim = held.Middle;
-        (Instrument instrument, bool good) = Instrument.For(job.IsInternal, held.Max, held.Width);
+        (Instrument instrument, bool good) = Instrument.For(job.IsInternal, job.Nominal, held.Width);
         Roughness ra = step.IsLast ? job.Ra ?? process.Ra(step.Effort) : process.LeftRa;
         return new Operation
         {

@@ -65,12 +65,12 @@ internal sealed record Step
     public string? BlankName { get; init; }
 
     /// <summary>Minutes for measuring one piece; it depends on the step's own window only, and is asked for often.</summary>
-    public double Checking(bool isInternal)
+    public double Checking(Job job)
     {
         if (_checking.Window != Leaving)
         {
-            SizeWindow sizes = Window.Sizes(isInternal);
-            _checking = (Leaving, Instrument.For(isInternal, sizes.Max, sizes.Width).Instrument.MinutesPerCheck * Checks.PerPiece(Process, Effort));
+            Instrument instrument = Instrument.For(job.IsInternal, job.Nominal, new Deviation(Window.Width)).Instrument;
+            _checking = (Leaving, instrument.MinutesPerCheck * Checks.PerPiece(Process, Effort));
         }
 
         return _checking.Minutes;

@@ -37,7 +37,7 @@ internal readonly record struct StepCost(Cut Cut, CutTime Cutting, double Checki
             step.Effort);
         Machine machine = step.Machine!;
         CutTime time = CutTime.For(cut);
-        return new StepCost(cut, time, step.Checking(job.IsInternal),
+        return new StepCost(cut, time, step.Checking(job),
             arrives ? machine.HandlingMinutes : 0, machine, arrives ? machine.SetUpMinutes : 0, ToolWear.Of(cut, step.Tool, time.Minutes));
     }
 

@@ -10,7 +10,7 @@ public class ReamerChoiceTests
     private static readonly ShopFloor Floor = HandbookShop.Load();
     private static readonly Tool[] Near = [.. Floor.Tools(ToolUse.Ream).Where(tool => tool.Stamped.Millimetres is > 9.9m and < 10.2m)];
 
-    // A stock H7 reamer must not be handed to an M7, N7, P7, F8 or G6 hole (needs of the trade); H7, H8 and H9 are what it is for or can serve.
+    // A stock H7 reamer must not be handed to an M7, N7, P7, F8 or G6 hole (common practice, no source); H7, H8 and H9 are what it is for or can serve.
     [Theory]
     [InlineData("H7", true)]
     [InlineData("H8", true)]
