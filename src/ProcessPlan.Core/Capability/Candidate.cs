@@ -177,7 +177,7 @@ public sealed class Candidate
 
         if (process.SizedBy == ToolUse.Drill && job.End == HoleEnd.Blind && job.BottomRoom is { } room && room.Picometres < DrillPointShare * job.Nominal.Picometres)
         {
-            return (null, $"its point needs {DrillPointShare:0.0} times the diameter below full size, the blind hole has {room}");
+            return (null, string.Create(CultureInfo.InvariantCulture, $"its point needs {DrillPointShare:0.0} times the diameter below full size, the blind hole has {room}"));
         }
 
         bool smoothEnough(Effort effort) => job.Ra is not { } asked || process.Ra(effort).Nanometres <= asked.Nanometres;

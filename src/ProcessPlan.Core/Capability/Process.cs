@@ -67,6 +67,9 @@ public sealed record Process
 
     public required double MostStockShare { get; init; }
 
+    /// <summary>Least stock that it still cuts instead of rubbing.</summary>
+    public required Stock LeastStock { get; init; }
+
     /// <summary>The tool guides itself on the work: no setting error.</summary>
     public required bool SelfGuided { get; init; }
 

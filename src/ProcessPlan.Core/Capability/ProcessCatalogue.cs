@@ -52,6 +52,7 @@ public static class ProcessCatalogue
                 BottomRoom = Length.FromMillimetres(row.Decimal("room")),
                 MostStock = new Stock(Length.FromMillimetres(row.Decimal("most")).Picometres),
                 MostStockShare = row.Double("mostRel"),
+                LeastStock = new Stock(Length.FromMillimetres(row.Decimal("least")).Picometres),
                 SelfGuided = row["guide"] == "yes",
                 Groups = row["groups"] == "*" ? [] : row["groups"].Split(','),
                 Origin = table.Cite(name),

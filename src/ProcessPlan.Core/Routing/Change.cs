@@ -18,6 +18,9 @@ namespace ProcessPlan.Core.Routing;
 /// <param name="Origin">Where the growth comes from.</param>
 internal sealed record Change(string Process, string Detail, Deviation LeastGrowth, Deviation MostGrowth, bool Hardens, bool Covers, Length? Layer, Supplier? Supplier, Citation Origin)
 {
+    /// <summary>Through and case hardening bend the part; nitriding and coatings hardly do.</summary>
+    public bool Distorts => Hardens && Layer is null;
+
     /// <summary>Through hardening and case hardening move a size by up to a thousandth either way.</summary>
     private const long ThousandthOfSize = 1000;
 

@@ -391,6 +391,12 @@ internal sealed class RouteSearch
                 }
 
                 Change[] between = left == step.ChangesLeft ? [] : [.. _changes[left..step.ChangesLeft]];
+                if (step.Process.SelfGuided && Array.Exists(between, static change => change.Distorts))
+                {
+                    // A hone or lap follows the hole: it cannot true what hardening has bent.
+                    continue;
+                }
+
                 foreach (Machine machine in before.Machines)
                 {
                     Precede(step, before, machine, between, left);

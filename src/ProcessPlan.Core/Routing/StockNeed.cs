@@ -67,7 +67,17 @@ internal readonly record struct StockNeed
     private bool ByHandbook { get; init; }
 
     /// <summary>The least stock that is planned with.</summary>
-    public Stock Least => ByHandbook && TableLeast is { } table && table > Analytical ? table : Analytical;
+    public Stock Least
+    {
+        get
+        {
+            Stock computed = ByHandbook && TableLeast is { } table && table > Analytical ? table : Analytical;
+            return computed > Rubbing ? computed : Rubbing;
+        }
+    }
+
+    /// <summary>Below this the tool rubs instead of cutting.</summary>
+    private Stock Rubbing { get; init; }
 
     /// <summary>What <paramref name="process"/> must at least remove after <paramref name="before"/>.</summary>
     /// <param name="process">The operation.</param>
@@ -109,6 +119,7 @@ internal readonly record struct StockNeed
             TableOrigin = origin,
             TableLeast = table is { } basic && basic.Picometres > toleranceBefore.Picometres ? new Stock(basic.Picometres - toleranceBefore.Picometres) : null,
             ByHandbook = byHandbook || afterHeat,
+            Rubbing = process.LeastStock,
         };
     }
 
@@ -125,8 +136,13 @@ internal readonly record struct StockNeed
         yield return $"least stock, analytical: 2·(Rz {Text(Rz)} + h {Text(Layer)}{spatial}) = {Analytical.Picometres / Length.PicometresPerMicrometre} µm [{Surface.Origin}]";
         if (Table is { } table)
         {
-            string used = Least == Analytical ? "not used" : $"used for lots up to {SmallLot}, after heat treatment, and where it is cheaper";
+            string used = TableLeast is not { } least || Least != least ? "not used" : $"{least} once the tolerance before it is taken off, used for lots up to {SmallLot}, after heat treatment, and where it is cheaper";
             yield return $"handbook stock {table}, {used} [{TableOrigin}]";
+        }
+
+        if (Least == Rubbing)
+        {
+            yield return $"never less than {Rubbing}: below that the tool rubs";
         }
     }
 

@@ -103,6 +103,11 @@ internal sealed class ExhaustiveSearch(Job job, ShopFloor shop)
                 }
 
                 List<Change> between = [.. _changes[left..node.ChangesLeft]];
+                if (node.Process.SelfGuided && between.Exists(change => change.Hardens && change.Layer is null))
+                {
+                    continue;
+                }
+
                 foreach (Machine machine in before.Machines)
                 {
                     foreach ((Tool? tool, MetalWindow leaving) in Leavings(node, before, machine, between))

