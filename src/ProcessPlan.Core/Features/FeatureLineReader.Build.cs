@@ -16,6 +16,8 @@ internal ref partial struct FeatureLineReader
     {
         DecideEither();
         DecideSize();
+        DecideUnit();
+        RefuseForgottenInches();
         RefuseMoreTolerances();
         FeatureRequest? request = _classes.Count > 1 ? BuildFit() : BuildOne();
         if (request is not null && ProblemCount == 0)

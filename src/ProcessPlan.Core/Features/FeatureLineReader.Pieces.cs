@@ -62,14 +62,9 @@ internal ref partial struct FeatureLineReader
         }
 
         Place place = new(start, length);
-        if (isClass && number.IsUnitApart && SpaceAt(place.End))
-        {
-            // "1 N7 in": the unit is that of the line.
-            _at = place.End;
-            number = number with { Unit = WrittenUnit.None, IsUnitApart = false, Place = new Place(start + 1, length - 1) };
-        }
 
-        if (isClass && number.Place.End == place.End)
+        // In "1 N7 in" the unit stands behind the class.
+        if (isClass && (number.Place.End == place.End || (number.IsUnitApart && SpaceAt(place.End))))
         {
             AddEither(new EitherNote(asClass, kind.Value, number, "", place));
         }
@@ -98,19 +93,20 @@ internal ref partial struct FeatureLineReader
     /// <summary>Takes the part as what it is when it is no tolerance class.</summary>
     private void TakeOther(EitherNote note)
     {
+        Place place = note.Kind == EitherKind.Material ? note.Place : note.Place.To(note.Number.Place);
         switch (note.Kind)
         {
             case EitherKind.Extent:
-                Note(ref _extent, note.Number, note.Place, "length or depth");
+                Note(ref _extent, note.Number, place, "length or depth");
                 break;
             case EitherKind.Diameter:
                 AddNamedSize(note.Number);
                 break;
             case EitherKind.RoughnessNumber:
-                Note(ref _finish, new FinishNote(FeatureWord.Finish, note.Number), note.Place, "roughness");
+                Note(ref _finish, new FinishNote(FeatureWord.Finish, note.Number), place, "roughness");
                 break;
             default:
-                Note(ref _material, note.Material, note.Place, "material");
+                Note(ref _material, note.Material, place, "material");
                 break;
         }
     }

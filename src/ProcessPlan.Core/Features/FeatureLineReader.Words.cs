@@ -120,7 +120,7 @@ internal ref partial struct FeatureLineReader
             case FeatureWord.Millimetre or FeatureWord.Inch:
                 if (!SaysNo(place))
                 {
-                    NoteUnit(word == FeatureWord.Inch ? LengthUnit.Inch : LengthUnit.Millimetre, place);
+                    _units.Add(new UnitNote(word == FeatureWord.Inch ? LengthUnit.Inch : LengthUnit.Millimetre, place, place));
                 }
 
                 break;
@@ -239,7 +239,7 @@ internal ref partial struct FeatureLineReader
         FeatureWord.Kind => IsFrom(_kind, from),
         FeatureWord.End => IsFrom(_end, from),
         FeatureWord.Start => IsFrom(_start, from),
-        FeatureWord.Unit => _unit.Is,
+        FeatureWord.Unit => _units.Count > 0 && _units[_units.Count - 1].Place.At >= from,
         FeatureWord.Finish => IsFrom(_finish, from) || TakeEitherFrom(from, asClass: false),
         FeatureWord.Limits => IsFrom(_limits, from) || IsFrom(_coatingLimits, from),
         _ => (_classes.Count > 0 && _classes[_classes.Count - 1].Place.At >= from) || TakeEitherFrom(from, asClass: true)

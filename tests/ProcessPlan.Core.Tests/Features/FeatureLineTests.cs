@@ -578,7 +578,7 @@ public sealed partial class FeatureLineTests
     [InlineData("25H7 cored 20mm", StartKind.Cored, 20)]
     [InlineData("25h6 bar 30", StartKind.Bar, 30)]
     [InlineData("25h6 bar=30", StartKind.Bar, 30)]
-    [InlineData("25H7 bar 60", StartKind.Bar, 60)]
+    [InlineData("slot 25H7 bar 60", StartKind.Bar, 60)]
     public void Parse_Start_IsRead(string line, StartKind kind, int? size) =>
         One(line).Start.Should().Be(new StartForm(kind, size is { } blank ? Mm(blank) : null));
 
@@ -627,16 +627,59 @@ public sealed partial class FeatureLineTests
     [InlineData("hole 1-1/2 H7 in x 3/4 off 5", 1.5, 0.75)]
     [InlineData("hole 1 N7 in x6", 1, 6)]
     [InlineData("hole 1H7 off 5 in x .5", 1, 0.5)]
-    [InlineData("hole 1H7 x15.618 in", 1, 15.618)]
     [InlineData("hole 1H7 HRC 28 in x .5", 1, 0.5)]
-    [InlineData("hole 1H7 x .5 in", 1, 0.5)]
-    [InlineData("hole 1H7 Ra 0.8 in C45 x .5", 1, 0.5)]
+    [InlineData("hole 1H7 in x15.618 in", 1, 15.618)]
+    [InlineData("hole 1in H7 x .5", 1, 0.5)]
+    [InlineData("hole 1H7 in Ra 0.8 in C45 x .5", 1, 0.5)]
+    [InlineData("hole 1 H7 x .5 unit=in", 1, 0.5)]
+    [InlineData("hole 1 H7 C45 in x .5", 1, 0.5)]
+    [InlineData("hole .25H7 x .5 in", 0.25, 0.5)]
+    [InlineData("hole 1/4 H7 x 3/4in", 0.25, 0.75)]
+    [InlineData("hole 1/2 H7 cyl 0.01mm x 3/4in", 0.5, 0.75)]
+    [InlineData("hole .25H7 Ra 0.8 in x .5", 0.25, 0.5)]
+    [InlineData("hole .25-.2505 x .5 in", 0.25, 0.5)]
+    [InlineData("hole 1 ±.0005 in x .5", 1, 0.5)]
     [InlineData("hole 1H7 Ra 32uin in x .5", 1, 0.5)]
     public void Parse_UnitAnywhere_IsThatOfTheLine(string line, double nominal, double extent)
     {
         Feature feature = One(line);
         (feature.Unit, feature.Nominal, feature.Extent).Should().Be((LengthUnit.Inch, Inch((decimal)nominal), Inch((decimal)extent)));
     }
+
+    [Theory]
+    [InlineData("60 mm h7 x 1.5\"")]
+    [InlineData("60 h7 mm x 1.5\"")]
+    [InlineData("60 h7 x 1.5in mm")]
+    [InlineData("mm 60 h7 x 1.5 in")]
+    public void Parse_InchesBehindAnotherLength_CountForThatLengthOnly(string line)
+    {
+        Feature feature = One(line);
+        (feature.Unit, feature.Nominal, feature.Extent).Should().Be((LengthUnit.Millimetre, Mm(60), Mm(38.1m)));
+    }
+
+    [Fact]
+    public void Parse_MillimetresOnAnInchLine_CountForThatLengthOnly()
+    {
+        Feature feature = One("1 H7 in x 30mm wall .25");
+        (feature.Unit, feature.Nominal, feature.Extent, feature.Wall).Should().Be((LengthUnit.Inch, Inch(1), Mm(30), Inch(0.25m)));
+    }
+
+    [Theory]
+    [InlineData("hole 0.5 +.0005 -.0000")]
+    [InlineData("hole .5mm +.0005 -.0000")]
+    [InlineData("hole .5 +.0005 -.0000 x .75 mm")]
+    [InlineData("hole .5 +.5um/0")]
+    [InlineData("hole .5 +0.0125/0")]
+    public void Parse_FineDeviations_AreMillimetresWhereTheLineSaysSo(string line)
+    {
+        Feature feature = One(line);
+        (feature.Unit, feature.Nominal).Should().Be((LengthUnit.Millimetre, Mm(0.5m)));
+    }
+
+    [Theory]
+    [InlineData("25H7 blind bottom 0")]
+    [InlineData("25H7 blind bottom 0.0 mm")]
+    public void Parse_BottomZero_IsAFlatBottom(string line) => One(line).ShouldBe(Hole25H7 with { End = HoleEnd.Blind, BottomRoom = Length.Zero });
 
     // 32 µin are 812.8 nm: a limit is converted to the stricter side.
     [Fact]
