@@ -22,7 +22,8 @@ internal ref partial struct FeatureLineReader
         Interrupted = _interrupted.Is,
         Finish = FinishAsked(),
         Material = _material.Is ? _material.Value : null,
-        Hardness = _hardness.Is ? _hardness.Value : null,
+        Hardness = _hardness.Is ? _hardness.Value.Least : null,
+        HardnessTo = _hardness.Is ? _hardness.Value.Most : null,
         Treatment = TreatmentAsked(),
         Coating = CoatingAsked(),
         Geometry = GeometryAsked(),
@@ -107,7 +108,10 @@ internal ref partial struct FeatureLineReader
         }
 
         TreatmentNote note = _treatment.Value;
-        return new Treatment(note.Kind, note.Hardness, note.Depth is { } deep && TryConvert(deep, out Length depth) ? depth : null);
+        return new Treatment(note.Kind, note.Hardness?.Least, note.Depth is { } deep && TryConvert(deep, out Length depth) ? depth : null)
+        {
+            HardnessTo = note.Hardness?.Most,
+        };
     }
 
     private Coating? CoatingAsked()

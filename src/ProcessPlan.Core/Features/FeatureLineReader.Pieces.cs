@@ -194,7 +194,11 @@ internal ref partial struct FeatureLineReader
 
         if (TryScale(out HardnessScale scale))
         {
-            NoteHardness(new HardnessNote(number, null, scale, PlaceFrom(number.Place.At)));
+            NoteHardness(new HardnessNote(number, null, RangeForm.To, scale, PlaceFrom(number.Place.At)));
+        }
+        else if (TrySpread(number, out HardnessNote spread))
+        {
+            NoteHardness(spread);
         }
         else if (TryPieces())
         {
@@ -213,7 +217,7 @@ internal ref partial struct FeatureLineReader
             Place place = number.Place.To(second.Place);
             if (TryScale(out scale))
             {
-                NoteHardness(new HardnessNote(number, second, scale, PlaceFrom(number.Place.At)));
+                NoteHardness(new HardnessNote(number, second, RangeForm.To, scale, PlaceFrom(number.Place.At)));
             }
             else
             {

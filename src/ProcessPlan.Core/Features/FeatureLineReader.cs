@@ -34,7 +34,7 @@ internal ref partial struct FeatureLineReader
     private Noted<bool> _interrupted;
     private Noted<FinishNote> _finish;
     private Noted<string> _material;
-    private Noted<Hardness> _hardness;
+    private Noted<HardnessRange> _hardness;
     private Noted<TreatmentNote> _treatment;
     private Noted<CoatingNote> _coating;
     private Noted<CoatingLimits> _coatingLimits;
@@ -79,7 +79,9 @@ internal ref partial struct FeatureLineReader
     /// <summary>Ra or Rz with its number, or N with its class.</summary>
     private readonly record struct FinishNote(FeatureWord Word, Measured Number);
 
-    private readonly record struct TreatmentNote(TreatmentKind Kind, Hardness? Hardness, Measured? Depth);
+    private readonly record struct TreatmentNote(TreatmentKind Kind, HardnessRange? Hardness, Measured? Depth);
+
+    private readonly record struct HardnessRange(Hardness Least, Hardness? Most);
 
     private readonly record struct CoatingNote(string Name, Measured Least, Measured Most);
 

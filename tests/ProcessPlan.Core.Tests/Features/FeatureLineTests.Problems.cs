@@ -104,10 +104,14 @@ public sealed partial class FeatureLineTests
     [InlineData("25H7 Rz 0", "Rz 0", "'Rz 0' is no roughness that can be made.", "Rz 0.25 to 400 µm")]
     [InlineData("25H7 Ra>0.8", "Ra>", "'Ra' asks for a least roughness.", "the greatest one, such as Ra 0.8")]
     [InlineData("1H7 in Ra 32", "Ra 32", "'Ra 32' on an inch line: micrometres or microinches?", "32uin or 32um")]
-    [InlineData("25H7 58-62HRC", "58-62HRC", "'58-62HRC' is a range; one hardness is taken.", "one value, such as 58HRC")]
-    [InlineData("25H7 hardened 58 to 62 HRC", "58 to 62 HRC", "'58 to 62 HRC' is a range; one hardness is taken.", "one value, such as 58HRC")]
-    [InlineData("25H7 hardened HRC 58..62", "HRC 58..62", "'HRC 58..62' is a range; one hardness is taken.", "one value, such as 58HRC")]
-    [InlineData("25H7 case 0.8 58-62HRC", "58-62HRC", "'58-62HRC' is a range; one hardness is taken.", "one value, such as 58HRC")]
+    [InlineData("25H7 62-58HRC", "62-58HRC", "'62-58HRC' has the greatest hardness first.", "the least hardness first, such as 58-62 HRC")]
+    [InlineData("25H7 70HRC", "70HRC", "'70HRC' is outside the scale.", "20 to 68 HRC")]
+    [InlineData("25H7 58+12HRC", "58+12HRC", "'58+12HRC' is outside the scale.", "20 to 68 HRC")]
+    [InlineData("25H7 hardened 20±1HRC", "20±1HRC", "'20±1HRC' is outside the scale.", "20 to 68 HRC")]
+    [InlineData("25H7 700HB", "700HB", "'700HB' is outside the scale.", "30 to 650 HB; harder steel is given in HRC or HV")]
+    [InlineData("25H7 29HB", "29HB", "'29HB' is outside the scale.", "30 to 650 HB; harder steel is given in HRC or HV")]
+    [InlineData("25H7 941HV", "941HV", "'941HV' is outside the scale.", "30 to 940 HV")]
+    [InlineData("25H7 hardened 58+2", "58+2", "'hardened 58+2' does not say its scale.", "58HRC, 58HB or 58HV")]
 
     // tolerances
     [InlineData("25Js7", "Js7", "'Js7' is no tolerance class.", "JS7 for a hole or js7 for a shaft")]

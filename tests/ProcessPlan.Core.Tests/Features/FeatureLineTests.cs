@@ -500,6 +500,45 @@ public sealed partial class FeatureLineTests
     public void Parse_Hardened_InEverySpelling(string words) =>
         One($"25H7 {words} 28HRC").ShouldBe(Hole25H7 with { Hardness = Hrc(28), Treatment = new Treatment(TreatmentKind.Hardened, Hrc(58), null) });
 
+    [Theory]
+    [InlineData("58+2HRC", 58, 60)]
+    [InlineData("58+4 HRC", 58, 62)]
+    [InlineData("58 +4 HRC", 58, 62)]
+    [InlineData("58+4/0 HRC", 58, 62)]
+    [InlineData("58+4-0 HRC", 58, 62)]
+    [InlineData("60±2HRC", 58, 62)]
+    [InlineData("60+/-2 HRC", 58, 62)]
+    [InlineData("58-62HRC", 58, 62)]
+    [InlineData("58 to 62 HRC", 58, 62)]
+    [InlineData("HRC 58-62", 58, 62)]
+    [InlineData("HRC 58+4", 58, 62)]
+    [InlineData("HRC60±2", 58, 62)]
+    public void Parse_RangeOfHardness_InEverySpelling(string words, int least, int most)
+    {
+        Treatment hardened = new(TreatmentKind.Hardened, Hrc(least), null) { HardnessTo = Hrc(most) };
+        One($"25H7 {words} 200 off").ShouldBe(Hole25H7 with { Hardness = Hrc(least), HardnessTo = Hrc(most), Quantity = 200 });
+        One($"25H7 hardened {words} 200 off").ShouldBe(Hole25H7 with { Treatment = hardened, Quantity = 200 });
+        One($"25H7 case 0.8 {words} 200 off").ShouldBe(Hole25H7 with { Treatment = hardened with { Kind = TreatmentKind.CaseHardened, Depth = Mm(0.8m) }, Quantity = 200 });
+    }
+
+    [Theory]
+    [InlineData("hole 25 ±0.1 HRC 28")]
+    [InlineData("hole 25 +0.1/-0.1 HRC 28")]
+    [InlineData("hole HRC 28 ±0.1 25")]
+    [InlineData("hole 28HRC ±0.1 25")]
+    [InlineData("hole 25 ±0.1 28HRC")]
+    public void Parse_DeviationsBesideAHardness_BelongToTheSize(string line) =>
+        One(line).ShouldBe(Hole25 with { Limits = Limits(24.9m, 25.1m), Hardness = Hrc(28) });
+
+    [Fact]
+    public void Parse_EqualEndsOfHardness_AreOneHardness() => One("25H7 58-58HRC").ShouldBe(Hole25H7 with { Hardness = Hrc(58) });
+
+    [Theory]
+    [InlineData("68HRC")]
+    [InlineData("650HB")]
+    [InlineData("940HV")]
+    public void Parse_HardestOfTheScale_IsRead(string words) => One($"25H7 {words}").Hardness.Should().NotBeNull();
+
     [Fact]
     public void Parse_CaseAndNitriding_ReadDepthAndHardness()
     {
