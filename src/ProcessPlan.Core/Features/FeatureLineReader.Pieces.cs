@@ -1,4 +1,5 @@
 using ProcessPlan.Core.Standards;
+using ProcessPlan.Core.Text;
 using ProcessPlan.Core.Values;
 
 namespace ProcessPlan.Core.Features;
@@ -20,7 +21,7 @@ internal ref partial struct FeatureLineReader
     private bool TryPiece()
     {
         char c = Current;
-        if (c is 'Ø' or 'ø' or '⌀' or '∅')
+        if (c is 'Ø' or 'ø' or '⌀' or '∅' or 'φ' or 'Φ' or 'ϕ')
         {
             TakeSize(FeatureWord.Diameter, new Place(_at++, 1));
             return true;
@@ -33,7 +34,7 @@ internal ref partial struct FeatureLineReader
         }
 
         return c == '±' || Sign(c) != 0 ? TryDeviations()
-            : LetterOrTimes(c) && (TryEither() || TryClass() || TryWordWithNumber());
+            : LetterOrTimes(c) && (TryBareR() || TryEither() || TryClass() || TryClassApart() || TryWordWithNumber());
     }
 
     private static bool LetterOrTimes(char c) => char.IsLetter(c) || c is '×' or '*';
@@ -144,6 +145,54 @@ internal ref partial struct FeatureLineReader
         _classes.Add(new ClassNote(read, new Place(_at, length)));
         _at += length;
         SkipFitStroke();
+        return true;
+    }
+
+    /// <summary>"25 H 7": the letter right behind the size or a stroke, and its grade apart.</summary>
+    private bool TryClassApart()
+    {
+        const int MostLetters = 2;
+        const int MostDigits = 2;
+        int letters = _at;
+        while (char.IsAsciiLetter(CharAt(letters)))
+        {
+            letters++;
+        }
+
+        int digits = AfterSpaces(letters);
+        int end = digits;
+        while (DigitAt(end))
+        {
+            end++;
+        }
+
+        bool apart = letters - _at <= MostLetters && digits > letters && end - digits is > 0 and <= MostDigits
+            && !LetterAt(end) && !(CharAt(end) is '.' or ',' && DigitAt(end + 1)) && (_at == _behindStroke || IsRightAfterSize(_at));
+        if (!apart || !ToleranceClass.TryRead([.. _text[_at..letters], .. _text[digits..end]], out ToleranceClass read, out int length)
+            || length != letters - _at + end - digits)
+        {
+            return false;
+        }
+
+        _classes.Add(new ClassNote(read, new Place(_at, end - _at)));
+        _at = end;
+        SkipFitStroke();
+        return true;
+    }
+
+    /// <summary>"R0.8" is a roughness that lost a letter, or a radius; no grade has a point.</summary>
+    private bool TryBareR()
+    {
+        int number = AfterSpaces(_at + 1);
+        if (Current is not 'R' and not 'r' || !NumberAt(number) || !DecimalText.TryRead(_text[number..], out ExactDecimal value, out int length)
+            || value.Places == 0)
+        {
+            return false;
+        }
+
+        Place place = new(_at, number + length - _at);
+        _at = place.End;
+        Report($"'{Show(place)}' is not understood.", place, $"perhaps 'Ra{Show(new Place(number, length))}'");
         return true;
     }
 

@@ -131,9 +131,14 @@ internal ref partial struct FeatureLineReader
 
     private void SkipSpaces() => _at = AfterSpaces(_at);
 
-    /// <summary>Passes over "=" and spaces between a word and what belongs to it.</summary>
+    /// <summary>Passes over "=", the point of "dia. 25" and spaces between a word and what belongs to it.</summary>
     private void SkipToValue()
     {
+        if (CharAt(_at) is '.' or ':' && SpaceAt(_at + 1))
+        {
+            _at++;
+        }
+
         SkipSpaces();
         if (CharAt(_at) == '=')
         {

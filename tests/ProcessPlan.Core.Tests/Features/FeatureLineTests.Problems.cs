@@ -11,6 +11,7 @@ public sealed partial class FeatureLineTests
     private const string NoSize = "There is no size.";
     private const string SizeExpected = "a size with its tolerance, such as 25H7 or 60 +0.030/0";
     private const string WordExpected = "a word of the feature line or a material of the shop book";
+    private const string ListsThem = "shop show materials lists them";
     private const string OneTolerance = "one tolerance: a class, deviations, limits or a general tolerance";
     private const string OneSize = "one size; a length is written x 40, a wall wall 2, a quantity 200off";
     private const string FitExpected = "the fit without this, or one class; the other part in a line of its own";
@@ -200,11 +201,25 @@ public sealed partial class FeatureLineTests
 
     // words that are none
     [InlineData("25H7 dpeth", "dpeth", "'dpeth' is not understood.", "perhaps 'depth'")]
-    [InlineData("25H7 trhu", "trhu", "'trhu' is not understood.", WordExpected)]
+    [InlineData("25H7 trhu", "trhu", "'trhu' is not understood.", "perhaps 'thru'")]
+    [InlineData("hoel 25H7", "hoel", "'hoel' is not understood.", "perhaps 'hole'")]
+    [InlineData("25H7 R0.8", "R0.8", "'R0.8' is not understood.", "perhaps 'Ra0.8'")]
+    [InlineData("25H7 R 0,8", "R 0,8", "'R 0,8' is not understood.", "perhaps 'Ra0,8'")]
+    [InlineData("25H7 42CrM", "42CrM", "'42CrM' is not understood.", "perhaps '42CrMo4'")]
+    [InlineData("25H7 GJL-250", "GJL-250", "'GJL-250' is not understood.", "perhaps 'EN-GJL-250'")]
+    [InlineData("25H7 GJL250x", "GJL250x", "'GJL250x' is no material of the shop book.", ListsThem)]
+    [InlineData("25H7 31CrMoV9", "31CrMoV9", "'31CrMoV9' is no material of the shop book.", ListsThem)]
+    [InlineData("25H7 mat=CrNiMo17", "CrNiMo17", "'CrNiMo17' is no material of the shop book.", "perhaps 'X2CrNiMo17-12-2'")]
+    [InlineData("25H7 1.4462", "1.4462", "'1.4462' is no material of the shop book.", ListsThem)]
+    [InlineData("1.4462 hole 25H7", "1.4462", "'1.4462' is no material of the shop book.", ListsThem)]
+    [InlineData("hole 60-60.03 1.4462", "1.4462", "'1.4462' is no material of the shop book.", ListsThem)]
+    [InlineData("25H7 in 1.4462", "1.4462", "'1.4462' is a second size beside '25'.", OneSize)]
+    [InlineData("25H7 2024", "2024", "'2024' is no material of the shop book, and a second size beside '25'.", "a material that shop show materials lists; a length is written x 2024")]
+    [InlineData("25H7 C45-T6", "C45-T6", "'C45-T6' is no material of the shop book.", ListsThem)]
     [InlineData("25H7 42CrMo", "42CrMo", "'42CrMo' is not understood.", "perhaps '42CrMo4'")]
     [InlineData("42CrMo 25H7", "42CrMo", "'42CrMo' is not understood.", "perhaps '42CrMo4'")]
     [InlineData("25H7 mat=C46", "C46", "'C46' is no material of the shop book.", "perhaps 'C45'")]
-    [InlineData("25H7 mat=302", "302", "'302' is no material of the shop book.", "a material of the shop book")]
+    [InlineData("25H7 mat=302", "302", "'302' is no material of the shop book.", ListsThem)]
     [InlineData("25H7 kind=25", "kind", "'kind=25' is not understood.", "hole, shaft, slot or tongue")]
     [InlineData("25H7 end=hole", "end", "'end=hole' is not understood.", "thru or blind")]
     [InlineData("25H7 start=C45", "start", "'start=C45' is not understood.", "solid, cast 20, cored 20 or bar 30")]
