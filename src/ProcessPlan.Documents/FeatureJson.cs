@@ -35,6 +35,7 @@ public static class FeatureJson
     private static readonly JsonEncodedText Material = JsonEncodedText.Encode("material");
     private static readonly JsonEncodedText Hardness = JsonEncodedText.Encode("hardness");
     private static readonly JsonEncodedText Value = JsonEncodedText.Encode("value");
+    private static readonly JsonEncodedText To = JsonEncodedText.Encode("to");
     private static readonly JsonEncodedText Scale = JsonEncodedText.Encode("scale");
     private static readonly JsonEncodedText Treatment = JsonEncodedText.Encode("treatment");
     private static readonly JsonEncodedText Depth = JsonEncodedText.Encode("depth");
@@ -144,12 +145,12 @@ public static class FeatureJson
             json.WriteString(Material, material);
         }
 
-        WriteHardness(json, feature.Hardness);
+        WriteHardness(json, feature.Hardness, feature.HardnessTo);
         if (feature.Treatment is { } treatment)
         {
             json.WriteStartObject(Treatment);
             json.WriteString(Kind, Word(treatment.Kind));
-            WriteHardness(json, treatment.Hardness);
+            WriteHardness(json, treatment.Hardness, treatment.HardnessTo);
             json.WriteMillimetresIfGiven(Depth, treatment.Depth);
             json.WriteEndObject();
         }
@@ -178,12 +179,17 @@ public static class FeatureJson
         }
     }
 
-    private static void WriteHardness(Utf8JsonWriter json, Hardness? asked)
+    private static void WriteHardness(Utf8JsonWriter json, Hardness? asked, Hardness? to)
     {
         if (asked is { } hardness)
         {
             json.WriteStartObject(Hardness);
             json.WriteDecimal(Value, hardness.Tenths, TenthPlaces);
+            if (to is { } most)
+            {
+                json.WriteDecimal(To, most.Tenths, TenthPlaces);
+            }
+
             json.WriteString(Scale, hardness.Scale switch { HardnessScale.HRC => "HRC", HardnessScale.HB => "HB", _ => "HV" });
             json.WriteEndObject();
         }

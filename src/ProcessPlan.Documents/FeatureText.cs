@@ -23,11 +23,15 @@ public static class FeatureText
         AddIf(parts, feature.Interrupted, "interrupted");
         AddIf(parts, feature.Finish is not null, $"{feature.Finish}");
         AddIf(parts, feature.Material is not null, feature.Material ?? "");
-        AddIf(parts, feature.Hardness is not null, $"{feature.Hardness}");
+        if (feature.Hardness is { } delivered)
+        {
+            parts.Add(Hardness.Text(delivered, feature.HardnessTo));
+        }
+
         if (feature.Treatment is { } treatment)
         {
             string word = treatment.Kind switch { TreatmentKind.Hardened => "hardened", TreatmentKind.CaseHardened => "case", _ => "nitrided" };
-            parts.Add($"{word} {(treatment.Depth is { } depth ? length(depth) + " " : "")}{treatment.Hardness}".TrimEnd());
+            parts.Add($"{word} {(treatment.Depth is { } depth ? length(depth) + " " : "")}{(treatment.Hardness is { } hard ? Hardness.Text(hard, treatment.HardnessTo) : "")}".TrimEnd());
         }
 
         if (feature.Coating is { } coating)

@@ -43,8 +43,11 @@ public sealed record Feature
     /// <summary>Designation of a material of the shop book.</summary>
     public string? Material { get; init; }
 
-    /// <summary>Hardness as delivered.</summary>
+    /// <summary>Hardness as delivered; of a range, the least.</summary>
     public Hardness? Hardness { get; init; }
+
+    /// <summary>The greatest hardness as delivered, where the line gives a range.</summary>
+    public Hardness? HardnessTo { get; init; }
 
     public Treatment? Treatment { get; init; }
 

@@ -17,12 +17,13 @@ internal ref partial struct FeatureLineReader
         Unit = _unit.Value,
         Extent = Optional(_extent),
         End = _end.Is ? _end.Value : null,
-        BottomRoom = Optional(_bottom),
+        BottomRoom = _bottom.Is && TryExact(_bottom.Value, out Length room) ? room : null,
         Wall = Optional(_wall) ?? WallInside(nominal),
         Interrupted = _interrupted.Is,
         Finish = FinishAsked(),
         Material = _material.Is ? _material.Value : null,
-        Hardness = _hardness.Is ? _hardness.Value : null,
+        Hardness = _hardness.Is ? _hardness.Value.Least : null,
+        HardnessTo = _hardness.Is ? _hardness.Value.Most : null,
         Treatment = TreatmentAsked(),
         Coating = CoatingAsked(),
         Geometry = GeometryAsked(),
@@ -107,7 +108,10 @@ internal ref partial struct FeatureLineReader
         }
 
         TreatmentNote note = _treatment.Value;
-        return new Treatment(note.Kind, note.Hardness, note.Depth is { } deep && TryConvert(deep, out Length depth) ? depth : null);
+        return new Treatment(note.Kind, note.Hardness?.Least, note.Depth is { } deep && TryConvert(deep, out Length depth) ? depth : null)
+        {
+            HardnessTo = note.Hardness?.Most,
+        };
     }
 
     private Coating? CoatingAsked()
@@ -191,10 +195,36 @@ internal ref partial struct FeatureLineReader
             Report($"'{Show(_coatingLimits.Place)}' without a coating.", _coatingLimits.Place, "a coating, such as coat zinc-nickel 8-12um before");
         }
 
-        bool typed = feature.Limits.Max > Length.Zero;
-        if (typed && feature.Start is { Kind: not StartKind.Bar, Size: { } blank } && (feature.IsInternal ? blank >= feature.Limits.Min : blank <= feature.Limits.Max))
+        RefuseBlank(feature);
+    }
+
+    /// <summary>A blank that is used up before the feature begins, and a bar that is said of a hole.</summary>
+    private void RefuseBlank(Feature feature)
+    {
+        if (_classes.Count <= 1 && feature is { Kind: FeatureKind.Hole, Start.Kind: StartKind.Bar })
         {
-            Report($"'{Show(_start.Place)}' leaves no metal to cut.", _start.Place, feature.IsInternal ? $"a blank below {feature.Limits.Min}" : $"a blank above {feature.Limits.Max}");
+            Report($"'{Show(_start.Place)}' is the outside of the part, not of the hole.", _start.Place, $"od {Show(_start.Value.Size!.Value.Place)}");
+            return;
+        }
+
+        bool typed = feature.Limits.Max > Length.Zero;
+        if (!typed || feature.Start is not { Size: { } blank } start)
+        {
+            return;
+        }
+
+        string word = start.Kind == StartKind.Bar ? "bar" : "blank";
+        if (feature.IsInternal && start.Kind != StartKind.Bar && blank >= feature.Limits.Min)
+        {
+            Report($"'{Show(_start.Place)}' leaves no metal to cut.", _start.Place, $"a {word} below {feature.Limits.Min}");
+        }
+        else if (!feature.IsInternal && blank < feature.Limits.Max)
+        {
+            Report($"'{Show(_start.Place)}' is smaller than the {feature.Kind.Word()}.", _start.Place, $"a {word} above {feature.Limits.Max}");
+        }
+        else if (!feature.IsInternal && blank == feature.Limits.Max)
+        {
+            Report($"'{Show(_start.Place)}' leaves no metal to cut.", _start.Place, $"a {word} above {feature.Limits.Max}");
         }
     }
 

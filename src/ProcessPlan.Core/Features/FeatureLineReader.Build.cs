@@ -16,6 +16,8 @@ internal ref partial struct FeatureLineReader
     {
         DecideEither();
         DecideSize();
+        DecideUnit();
+        RefuseForgottenInches();
         RefuseMoreTolerances();
         FeatureRequest? request = _classes.Count > 1 ? BuildFit() : BuildOne();
         if (request is not null && ProblemCount == 0)
@@ -82,9 +84,18 @@ internal ref partial struct FeatureLineReader
             {
                 Note(ref _material, material, place, "material");
             }
+            else if (IsLikeMaterialNumber(number) && place.At != _namedSizeAt)
+            {
+                ReportNoMaterial(place, MaterialsListed);
+            }
             else if (_limits.Is)
             {
                 Report($"'{Show(place)}' is a size beside the limits '{Show(_limits.Place)}'.", place, "either a size or two limits");
+            }
+            else if (IsLikeAlloyNumber(number) && !ProblemAt(place.End) && !ProblemAt(_size!.Value.Place.At))
+            {
+                Report($"'{Show(place)}' is no material of the shop book, and a second size beside '{Show(_size.Value.Place)}'.", place,
+                    $"a material that shop show materials lists; a length is written x {Show(place)}");
             }
             else if (!ProblemAt(place.End) && !ProblemAt(_size!.Value.Place.At))
             {
@@ -92,6 +103,32 @@ internal ref partial struct FeatureLineReader
                     "one size; a length is written x 40, a wall wall 2, a quantity 200off");
             }
         }
+    }
+
+    /// <summary>"1.4404": a digit, a point and four digits, on a line that says nothing of inches.</summary>
+    private readonly bool IsLikeMaterialNumber(Measured number)
+    {
+        const int PlacesOfMaterial = 4;
+        const int Behind = 10_000;
+        return number is { Unit: WrittenUnit.None, IsFraction: false } && number.Number.Places == PlacesOfMaterial
+            && number.Number.Units is >= Behind and < 4 * Behind && !SaysInches();
+    }
+
+    /// <summary>"2024", "4130": four digits as alloys have them.</summary>
+    private static bool IsLikeAlloyNumber(Measured number) => number is { Unit: WrittenUnit.None, IsFraction: false } && number.IsBareWhole
+        && number.Number.Units is >= 1000 and <= 9999;
+
+    private readonly bool SaysInches()
+    {
+        for (int i = 0; i < _units.Count; i++)
+        {
+            if (_units[i].Unit == LengthUnit.Inch)
+            {
+                return true;
+            }
+        }
+
+        return false;
     }
 
     /// <summary>
@@ -121,7 +158,7 @@ internal ref partial struct FeatureLineReader
         {
             Measured number = _sizes[i];
             withTolerance ??= ToleranceFollows(number.Place.End) ? number : null;
-            noMaterial ??= _materials.TryFind(At(number.Place), out _) ? null : number;
+            noMaterial ??= _materials.TryFind(At(number.Place), out _) || IsLikeMaterialNumber(number) ? null : number;
         }
 
         Measured size = withTolerance ?? noMaterial ?? _sizes[0];

@@ -44,7 +44,7 @@ internal ref partial struct FeatureLineReader
         WrittenUnit unit = ReadUnit();
         if (unit is WrittenUnit.Millimetre or WrittenUnit.Inch or WrittenUnit.Thou)
         {
-            NoteUnit(unit == WrittenUnit.Millimetre ? LengthUnit.Millimetre : LengthUnit.Inch, PlaceFrom(unitStart));
+            _units.Add(new UnitNote(unit == WrittenUnit.Millimetre ? LengthUnit.Millimetre : LengthUnit.Inch, PlaceFrom(unitStart), PlaceFrom(start)));
         }
 
         number = new Measured(value, in128ths, unit, apart && (unit is WrittenUnit.Millimetre or WrittenUnit.Inch), PlaceFrom(start));

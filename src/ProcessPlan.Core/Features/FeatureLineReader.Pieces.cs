@@ -1,4 +1,5 @@
 using ProcessPlan.Core.Standards;
+using ProcessPlan.Core.Text;
 using ProcessPlan.Core.Values;
 
 namespace ProcessPlan.Core.Features;
@@ -20,7 +21,7 @@ internal ref partial struct FeatureLineReader
     private bool TryPiece()
     {
         char c = Current;
-        if (c is 'Ø' or 'ø' or '⌀' or '∅')
+        if (c is 'Ø' or 'ø' or '⌀' or '∅' or 'φ' or 'Φ' or 'ϕ')
         {
             TakeSize(FeatureWord.Diameter, new Place(_at++, 1));
             return true;
@@ -33,7 +34,7 @@ internal ref partial struct FeatureLineReader
         }
 
         return c == '±' || Sign(c) != 0 ? TryDeviations()
-            : LetterOrTimes(c) && (TryEither() || TryClass() || TryWordWithNumber());
+            : LetterOrTimes(c) && (TryBareR() || TryEither() || TryClass() || TryClassApart() || TryWordWithNumber());
     }
 
     private static bool LetterOrTimes(char c) => char.IsLetter(c) || c is '×' or '*';
@@ -62,14 +63,9 @@ internal ref partial struct FeatureLineReader
         }
 
         Place place = new(start, length);
-        if (isClass && number.IsUnitApart && SpaceAt(place.End))
-        {
-            // "1 N7 in": the unit is that of the line.
-            _at = place.End;
-            number = number with { Unit = WrittenUnit.None, IsUnitApart = false, Place = new Place(start + 1, length - 1) };
-        }
 
-        if (isClass && number.Place.End == place.End)
+        // In "1 N7 in" the unit stands behind the class.
+        if (isClass && (number.Place.End == place.End || (number.IsUnitApart && SpaceAt(place.End))))
         {
             AddEither(new EitherNote(asClass, kind.Value, number, "", place));
         }
@@ -98,19 +94,20 @@ internal ref partial struct FeatureLineReader
     /// <summary>Takes the part as what it is when it is no tolerance class.</summary>
     private void TakeOther(EitherNote note)
     {
+        Place place = note.Kind == EitherKind.Material ? note.Place : note.Place.To(note.Number.Place);
         switch (note.Kind)
         {
             case EitherKind.Extent:
-                Note(ref _extent, note.Number, note.Place, "length or depth");
+                Note(ref _extent, note.Number, place, "length or depth");
                 break;
             case EitherKind.Diameter:
                 AddNamedSize(note.Number);
                 break;
             case EitherKind.RoughnessNumber:
-                Note(ref _finish, new FinishNote(FeatureWord.Finish, note.Number), note.Place, "roughness");
+                Note(ref _finish, new FinishNote(FeatureWord.Finish, note.Number), place, "roughness");
                 break;
             default:
-                Note(ref _material, note.Material, note.Place, "material");
+                Note(ref _material, note.Material, place, "material");
                 break;
         }
     }
@@ -148,6 +145,54 @@ internal ref partial struct FeatureLineReader
         _classes.Add(new ClassNote(read, new Place(_at, length)));
         _at += length;
         SkipFitStroke();
+        return true;
+    }
+
+    /// <summary>"25 H 7": the letter right behind the size or a stroke, and its grade apart.</summary>
+    private bool TryClassApart()
+    {
+        const int MostLetters = 2;
+        const int MostDigits = 2;
+        int letters = _at;
+        while (char.IsAsciiLetter(CharAt(letters)))
+        {
+            letters++;
+        }
+
+        int digits = AfterSpaces(letters);
+        int end = digits;
+        while (DigitAt(end))
+        {
+            end++;
+        }
+
+        bool apart = letters - _at <= MostLetters && digits > letters && end - digits is > 0 and <= MostDigits
+            && !LetterAt(end) && !(CharAt(end) is '.' or ',' && DigitAt(end + 1)) && (_at == _behindStroke || IsRightAfterSize(_at));
+        if (!apart || !ToleranceClass.TryRead([.. _text[_at..letters], .. _text[digits..end]], out ToleranceClass read, out int length)
+            || length != letters - _at + end - digits)
+        {
+            return false;
+        }
+
+        _classes.Add(new ClassNote(read, new Place(_at, end - _at)));
+        _at = end;
+        SkipFitStroke();
+        return true;
+    }
+
+    /// <summary>"R0.8" is a roughness that lost a letter, or a radius; no grade has a point.</summary>
+    private bool TryBareR()
+    {
+        int number = AfterSpaces(_at + 1);
+        if (Current is not 'R' and not 'r' || !NumberAt(number) || !DecimalText.TryRead(_text[number..], out ExactDecimal value, out int length)
+            || value.Places == 0)
+        {
+            return false;
+        }
+
+        Place place = new(_at, number + length - _at);
+        _at = place.End;
+        Report($"'{Show(place)}' is not understood.", place, $"perhaps 'Ra{Show(new Place(number, length))}'");
         return true;
     }
 
@@ -198,7 +243,11 @@ internal ref partial struct FeatureLineReader
 
         if (TryScale(out HardnessScale scale))
         {
-            NoteHardness(new HardnessNote(number, null, scale, PlaceFrom(number.Place.At)));
+            NoteHardness(new HardnessNote(number, null, RangeForm.To, scale, PlaceFrom(number.Place.At)));
+        }
+        else if (TrySpread(number, out HardnessNote spread))
+        {
+            NoteHardness(spread);
         }
         else if (TryPieces())
         {
@@ -217,7 +266,7 @@ internal ref partial struct FeatureLineReader
             Place place = number.Place.To(second.Place);
             if (TryScale(out scale))
             {
-                NoteHardness(new HardnessNote(number, second, scale, PlaceFrom(number.Place.At)));
+                NoteHardness(new HardnessNote(number, second, RangeForm.To, scale, PlaceFrom(number.Place.At)));
             }
             else
             {

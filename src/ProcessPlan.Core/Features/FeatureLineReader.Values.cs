@@ -1,3 +1,4 @@
+using ProcessPlan.Core.Text;
 using ProcessPlan.Core.Values;
 
 namespace ProcessPlan.Core.Features;
@@ -9,8 +10,16 @@ internal ref partial struct FeatureLineReader
 
     private const string CoatingExpected = "such as coat zinc-nickel 8-12um";
 
-    /// <summary>A hardness as written; a range has its end in <paramref name="To"/>.</summary>
-    private readonly record struct HardnessNote(Measured Number, Measured? To, HardnessScale Scale, Place Place);
+    /// <summary>How a range of hardness is written: 58-62, 58+4, 60±2.</summary>
+    private enum RangeForm
+    {
+        To,
+        Plus,
+        PlusMinus,
+    }
+
+    /// <summary>A hardness as written; a range has its end, or how far it reaches, in <paramref name="Other"/>.</summary>
+    private readonly record struct HardnessNote(Measured Number, Measured? Other, RangeForm Form, HardnessScale Scale, Place Place);
 
     private void TakeGeometry(FeatureWord word, Place place)
     {
@@ -92,10 +101,13 @@ internal ref partial struct FeatureLineReader
 
         if (NumberAt(_at) && TryNumber(out Measured number))
         {
-            Measured? to = EndOfRange();
+            // "HRC 58 +0.03/0": what stands apart behind the number of a scale is no part of it.
+            RangeForm form = RangeForm.To;
+            Measured? other = EndOfRange();
+            _ = other is null && !(scaleFirst && SpaceAt(_at)) && TryReach(out form, out other);
             if (scaleFirst || TryScale(out scale))
             {
-                note = new HardnessNote(number, to, scale, PlaceFrom(start.At));
+                note = new HardnessNote(number, other, form, scale, PlaceFrom(start.At));
                 return true;
             }
         }
@@ -112,22 +124,95 @@ internal ref partial struct FeatureLineReader
         return second >= 0 && TryNumber(out Measured end) ? end : null;
     }
 
-    /// <summary>The hardness, or null after telling why it is none that can be taken.</summary>
-    private Hardness? Accept(HardnessNote note)
+    /// <summary>"+2", "+2/0" or "±2" behind a hardness.</summary>
+    private bool TryReach(out RangeForm form, out Measured? reach)
     {
-        if (note.To is not null)
+        Mark start = Here;
+        (form, reach) = (RangeForm.To, null);
+        SkipSpaces();
+        if (AtEnd || (Current != '±' && Sign(Current) <= 0))
         {
-            Report($"'{Show(note.Place)}' is a range; one hardness is taken.", note.Place,
-                $"one value, such as {Show(note.Number.Place)}{note.Scale}");
+            GoBack(start);
+            return false;
+        }
+
+        int behindBoth = AfterPlusMinus();
+        form = behindBoth > 0 ? RangeForm.PlusMinus : RangeForm.Plus;
+        _at = AfterSpaces(behindBoth > 0 ? behindBoth : _at + 1);
+        if (!NumberAt(_at) || !TryNumber(out Measured number))
+        {
+            GoBack(start);
+            return false;
+        }
+
+        reach = number;
+        int zero = CharAt(_at) == '/' ? _at + 1 : _at;
+        zero = Sign(CharAt(zero)) != 0 ? zero + 1 : zero;
+        if (form == RangeForm.Plus && zero > _at && CharAt(zero) == '0' && !NumberAt(zero + 1))
+        {
+            _at = zero + 1;
+        }
+
+        return true;
+    }
+
+    /// <summary>"58+4 HRC" and "60±2HRC", but not the size in "25 ±0.1 HRC 28".</summary>
+    private bool TrySpread(Measured number, out HardnessNote note)
+    {
+        Mark start = Here;
+        if (TryReach(out RangeForm form, out Measured? reach) && TryScale(out HardnessScale scale)
+            && (form == RangeForm.Plus || _sizes.Count > 0 || _limits.Is || !NumberAt(AfterSpaces(_at))))
+        {
+            note = new HardnessNote(number, reach, form, scale, PlaceFrom(number.Place.At));
+            return true;
+        }
+
+        GoBack(start);
+        note = default;
+        return false;
+    }
+
+    /// <summary>The hardness, or null after telling why it is none that can be taken.</summary>
+    private HardnessRange? Accept(HardnessNote note)
+    {
+        const int Tenth = 10;
+        if (!note.Number.IsBare || !note.Number.Number.TryScale(Tenth, out long number) || note.Other is { IsBare: false })
+        {
+            return ReportOffScale(note);
+        }
+
+        long other = 0;
+        if (note.Other is { } end && !end.Number.TryScale(Tenth, out other))
+        {
+            return ReportOffScale(note);
+        }
+
+        Int128 least = note.Form == RangeForm.PlusMinus ? (Int128)number - other : number;
+        Int128 most = note.Other is null ? least : note.Form == RangeForm.To ? other : (Int128)number + other;
+        if (!TryHardnessOf(least, note.Scale, out Hardness low) || !TryHardnessOf(most, note.Scale, out Hardness high))
+        {
+            return ReportOffScale(note);
+        }
+
+        if (least > most)
+        {
+            Report($"'{Show(note.Place)}' has the greatest hardness first.", note.Place, $"the least hardness first, such as {Hardness.Text(high, low)}");
             return null;
         }
 
-        if (note.Number.IsBare && Hardness.TryCreate(note.Number.Number, note.Scale, out Hardness hardness))
-        {
-            return hardness;
-        }
+        return new HardnessRange(low, least == most ? null : high);
+    }
 
-        Report($"'{Show(note.Place)}' is outside the scale.", note.Place, Hardness.RangeOf(note.Scale));
+    private static bool TryHardnessOf(Int128 tenths, HardnessScale scale, out Hardness hardness)
+    {
+        hardness = default;
+        return tenths >= 0 && tenths <= int.MaxValue && Hardness.TryCreate(new ExactDecimal((long)tenths, 1), scale, out hardness);
+    }
+
+    private HardnessRange? ReportOffScale(HardnessNote note)
+    {
+        Report($"'{Show(note.Place)}' is outside the scale.", note.Place,
+            Hardness.RangeOf(note.Scale) + (note.Scale == HardnessScale.HB ? "; harder steel is given in HRC or HV" : ""));
         return null;
     }
 
@@ -169,7 +254,7 @@ internal ref partial struct FeatureLineReader
         }
         else if (TryNumber(out Measured number))
         {
-            _ = EndOfRange();
+            _ = EndOfRange() is not null || TryReach(out _, out _);
             Report($"'{Show(PlaceFrom(word.At))}' does not say its scale.", PlaceFrom(number.Place.At),
                 $"{Show(number.Place)}HRC, {Show(number.Place)}HB or {Show(number.Place)}HV");
         }
@@ -180,8 +265,18 @@ internal ref partial struct FeatureLineReader
     {
         SkipToValue();
         Measured? depth = null;
-        Hardness? hardness = null;
-        if (TryHardness(out HardnessNote asked))
+        HardnessRange? hardness = null;
+        const int DeepestCase = 10;
+        Mark behindWord = Here;
+        bool hard = TryHardness(out HardnessNote asked);
+        if (hard && word != FeatureWord.Hardened && asked.Number.Number.ToDouble() < DeepestCase)
+        {
+            // "case 0.8 HRC 58": the scale is that of the next number.
+            GoBack(behindWord);
+            hard = false;
+        }
+
+        if (hard)
         {
             hardness = Accept(asked);
         }
@@ -202,7 +297,7 @@ internal ref partial struct FeatureLineReader
     }
 
     /// <summary>A hardness right behind the depth is that of the case if it is too hard to be the hardness as delivered.</summary>
-    private Hardness? HardnessOfCase()
+    private HardnessRange? HardnessOfCase()
     {
         const double LeastHrc = 45;
         const double LeastOther = 450;

@@ -40,7 +40,7 @@ internal ref partial struct FeatureLineReader
     /// <summary>A material. One whose name is a number is read as a number first.</summary>
     private bool TryMaterial()
     {
-        if (!HasLetter(_text[_at..WordEnd(_at)]) || !TryFindMaterial(out string material, out Place place))
+        if (!TryFindMaterial(out string material, out Place place) || !HasLetter(At(place)))
         {
             return false;
         }
@@ -58,10 +58,10 @@ internal ref partial struct FeatureLineReader
         return true;
     }
 
-    /// <summary>The longest name of a material that stands here, of up to three words, as "EN AW 6061".</summary>
+    /// <summary>The longest name of a material that stands here, of up to four words, as "EN AW 6061 T6".</summary>
     private readonly bool TryFindMaterial(out string material, out Place place)
     {
-        const int MostWords = 3;
+        const int MostWords = 4;
         Span<int> ends = stackalloc int[MostWords];
         int words = 0;
         for (int at = _at; words < MostWords && at < _text.Length; at = AfterSpaces(ends[words++]))
@@ -120,7 +120,7 @@ internal ref partial struct FeatureLineReader
             case FeatureWord.Millimetre or FeatureWord.Inch:
                 if (!SaysNo(place))
                 {
-                    NoteUnit(word == FeatureWord.Inch ? LengthUnit.Inch : LengthUnit.Millimetre, place);
+                    _units.Add(new UnitNote(word == FeatureWord.Inch ? LengthUnit.Inch : LengthUnit.Millimetre, place, place));
                 }
 
                 break;
@@ -239,7 +239,7 @@ internal ref partial struct FeatureLineReader
         FeatureWord.Kind => IsFrom(_kind, from),
         FeatureWord.End => IsFrom(_end, from),
         FeatureWord.Start => IsFrom(_start, from),
-        FeatureWord.Unit => _unit.Is,
+        FeatureWord.Unit => _units.Count > 0 && _units[_units.Count - 1].Place.At >= from,
         FeatureWord.Finish => IsFrom(_finish, from) || TakeEitherFrom(from, asClass: false),
         FeatureWord.Limits => IsFrom(_limits, from) || IsFrom(_coatingLimits, from),
         _ => (_classes.Count > 0 && _classes[_classes.Count - 1].Place.At >= from) || TakeEitherFrom(from, asClass: true)
@@ -260,16 +260,14 @@ internal ref partial struct FeatureLineReader
 
         Place value = new(_at, WordEnd(_at) - _at);
         _at = value.End;
-        string? nearest = Spelling.Nearest(At(value), _materials.Designations);
-        string expected = nearest is not null ? $"perhaps '{nearest}'" : "a material of the shop book";
         if (value.Length == 0)
         {
-            Report($"'{Show(word)}' needs a material behind it.", word, expected);
+            Report($"'{Show(word)}' needs a material behind it.", word, "a material of the shop book");
+            return;
         }
-        else
-        {
-            Report($"'{Show(value)}' is no material of the shop book.", value, expected);
-        }
+
+        string? nearest = _materials.Containing(At(value)) ?? Spelling.Nearest(At(value), _materials.Designations);
+        ReportNoMaterial(value, nearest is not null ? $"perhaps '{nearest}'" : MaterialsListed);
     }
 
     private void TakeUnknown()
@@ -299,12 +297,26 @@ internal ref partial struct FeatureLineReader
         }
     }
 
+    private const string MaterialsListed = "shop show materials lists them";
+
+    private void ReportNoMaterial(Place place, string expected) => Report($"'{Show(place)}' is no material of the shop book.", place, expected);
+
     private void ReportUnknown(Place place)
     {
-        string? nearest = Spelling.Nearest(At(place), FeatureWords.All, _materials.Designations);
+        ReadOnlySpan<char> word = At(place);
+        bool likeMaterial = HasLetter(word) && word.ContainsAnyInRange('0', '9');
+        string? nearest = (likeMaterial ? _materials.Containing(word) : null) ?? Spelling.Nearest(word, FeatureWords.All, _materials.Designations);
+        if (nearest is null && likeMaterial && word.Length >= LeastOfMaterial)
+        {
+            ReportNoMaterial(place, MaterialsListed);
+            return;
+        }
+
         Report($"'{Show(place)}' is not understood.", place,
             nearest is not null ? $"perhaps '{nearest}'" : "a word of the feature line or a material of the shop book");
     }
+
+    private const int LeastOfMaterial = 4;
 
     /// <summary>"304L" is one word, not the size 304 and an L.</summary>
     private Place WithNumberBefore(Place place)

@@ -19,7 +19,7 @@ internal ref partial struct FeatureLineReader
     private List<Problem>? _problems;
 
     private Noted<FeatureKind> _kind;
-    private Noted<LengthUnit> _unit;
+    private Several<UnitNote> _units;
     private Several<Measured> _sizes;
     private Several<ClassNote> _classes;
     private Several<EitherNote> _either;
@@ -34,7 +34,7 @@ internal ref partial struct FeatureLineReader
     private Noted<bool> _interrupted;
     private Noted<FinishNote> _finish;
     private Noted<string> _material;
-    private Noted<Hardness> _hardness;
+    private Noted<HardnessRange> _hardness;
     private Noted<TreatmentNote> _treatment;
     private Noted<CoatingNote> _coating;
     private Noted<CoatingLimits> _coatingLimits;
@@ -44,6 +44,9 @@ internal ref partial struct FeatureLineReader
 
     /// <summary>The number that is the size, among others that name materials; decided when all is read.</summary>
     private Measured? _size;
+
+    /// <summary>The unit of the line, decided when all is read.</summary>
+    private Noted<LengthUnit> _unit;
 
     /// <summary>Place of the number behind "dia" or "size", the first of them; -1 where there is none.</summary>
     private int _namedSizeAt;
@@ -64,13 +67,21 @@ internal ref partial struct FeatureLineReader
 
     private readonly record struct ClassNote(ToleranceClass Class, Place Place);
 
+    /// <summary>A unit: behind a number, or standing alone, where <paramref name="Number"/> is the unit itself.</summary>
+    private readonly record struct UnitNote(LengthUnit Unit, Place Place, Place Number)
+    {
+        public bool IsAlone => Place == Number;
+    }
+
     /// <summary>Two signed numbers: deviations from the size, or two limits.</summary>
     private readonly record struct PairNote(Measured First, int FirstSign, Measured Second, int SecondSign);
 
     /// <summary>Ra or Rz with its number, or N with its class.</summary>
     private readonly record struct FinishNote(FeatureWord Word, Measured Number);
 
-    private readonly record struct TreatmentNote(TreatmentKind Kind, Hardness? Hardness, Measured? Depth);
+    private readonly record struct TreatmentNote(TreatmentKind Kind, HardnessRange? Hardness, Measured? Depth);
+
+    private readonly record struct HardnessRange(Hardness Least, Hardness? Most);
 
     private readonly record struct CoatingNote(string Name, Measured Least, Measured Most);
 
@@ -120,9 +131,14 @@ internal ref partial struct FeatureLineReader
 
     private void SkipSpaces() => _at = AfterSpaces(_at);
 
-    /// <summary>Passes over "=" and spaces between a word and what belongs to it.</summary>
+    /// <summary>Passes over "=", the point of "dia. 25" and spaces between a word and what belongs to it.</summary>
     private void SkipToValue()
     {
+        if (CharAt(_at) is '.' or ':' && SpaceAt(_at + 1))
+        {
+            _at++;
+        }
+
         SkipSpaces();
         if (CharAt(_at) == '=')
         {
@@ -184,13 +200,14 @@ internal ref partial struct FeatureLineReader
         (_problems ??= []).Add(new Problem(message, place.At, place.Length, expected));
 
     /// <summary>A place to go back to, with what a number read behind it may have noted.</summary>
-    private readonly record struct Mark(int At, int Problems, Noted<LengthUnit> Unit);
+    private readonly record struct Mark(int At, int Problems, int Units);
 
-    private readonly Mark Here => new(_at, ProblemCount, _unit);
+    private readonly Mark Here => new(_at, ProblemCount, _units.Count);
 
     private void GoBack(Mark mark)
     {
-        (_at, _unit) = (mark.At, mark.Unit);
+        _at = mark.At;
+        DropUnits(mark.Units);
         _problems?.RemoveRange(mark.Problems, _problems.Count - mark.Problems);
     }
 
@@ -205,15 +222,11 @@ internal ref partial struct FeatureLineReader
         slot = new Noted<T>(value, place);
     }
 
-    private void NoteUnit(LengthUnit unit, Place place)
+    private void DropUnits(int kept)
     {
-        if (!_unit.Is)
+        while (_units.Count > kept)
         {
-            _unit = new Noted<LengthUnit>(unit, place);
-        }
-        else if (_unit.Value != unit)
-        {
-            Report($"'{Show(place)}' after '{Show(_unit.Place)}': the line has two units.", place, "mm or in, the same in the whole line");
+            _units.RemoveAt(_units.Count - 1);
         }
     }
 }

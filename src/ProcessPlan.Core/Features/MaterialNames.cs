@@ -41,9 +41,46 @@ public sealed class MaterialNames
 
         Span<char> folded = stackalloc char[LongestName];
         int length = Fold(name, folded);
-        bool found = _bySpan.TryGetValue(folded[..length], out string? known);
+        bool found = _bySpan.TryGetValue(folded[..length], out string? known) || TryWithoutTemper(folded[..length], out known);
         designation = known ?? "";
         return found;
+    }
+
+    /// <summary>The first designation one of whose names has these characters in it; null for fewer than three.</summary>
+    public string? Containing(ReadOnlySpan<char> part)
+    {
+        const int Least = 3;
+        if (part.Length > LongestName)
+        {
+            return null;
+        }
+
+        Span<char> folded = stackalloc char[LongestName];
+        int length = Fold(part, folded);
+        foreach ((string name, string designation) in _designations)
+        {
+            if (length >= Least && name.AsSpan().Contains(folded[..length], StringComparison.OrdinalIgnoreCase))
+            {
+                return designation;
+            }
+        }
+
+        return null;
+    }
+
+    /// <summary>"6061-T6", "EN AW-7075 T651": an aluminium with its temper, which the shop book does not tell apart.</summary>
+    private bool TryWithoutTemper(ReadOnlySpan<char> folded, out string? designation)
+    {
+        const int AlloyDigits = 4;
+        const int MostTemperDigits = 4;
+        designation = null;
+        int mark = folded.LastIndexOfAny('T', 't');
+        ReadOnlySpan<char> temper = folded[(mark + 1)..];
+        return mark >= AlloyDigits
+            && temper.Length is > 0 and <= MostTemperDigits && temper.IndexOfAnyExceptInRange('0', '9') < 0
+            && folded[(mark - AlloyDigits)..mark].IndexOfAnyExceptInRange('0', '9') < 0
+            && _bySpan.TryGetValue(folded[..mark], out designation)
+            && designation.StartsWith("EN-A", StringComparison.OrdinalIgnoreCase);
     }
 
     private void Add(string name, string designation)

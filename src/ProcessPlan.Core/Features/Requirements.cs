@@ -11,9 +11,13 @@ public enum TreatmentKind
 }
 
 /// <param name="Kind">Which treatment.</param>
-/// <param name="Hardness">Hardness asked for after it; null where the drawing gives only a depth.</param>
+/// <param name="Hardness">Hardness asked for after it, of a range the least; null where the drawing gives only a depth.</param>
 /// <param name="Depth">Case or nitriding depth of the finished part, per side; null for through hardening.</param>
-public sealed record Treatment(TreatmentKind Kind, Hardness? Hardness, Length? Depth);
+public sealed record Treatment(TreatmentKind Kind, Hardness? Hardness, Length? Depth)
+{
+    /// <summary>The greatest hardness after it, where the drawing gives a range.</summary>
+    public Hardness? HardnessTo { get; init; }
+}
 
 /// <summary>Whether the drawing's limits are meant before or after the coating.</summary>
 public enum CoatingLimits

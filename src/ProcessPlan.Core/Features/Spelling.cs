@@ -5,7 +5,8 @@ internal static class Spelling
 {
     private const int Longest = 40;
 
-    /// <summary>The known word with the fewest changed letters, if there are at most two and fewer than half of the word; of equals the first.</summary>
+    /// <summary>The known word with the fewest changed letters, if there are at most two and fewer than half of the word, two exchanged
+    /// neighbours counting once; of equals the first.</summary>
     public static string? Nearest(ReadOnlySpan<char> text, params ReadOnlySpan<IReadOnlyCollection<string>> lists)
     {
         string? best = null;
@@ -14,7 +15,7 @@ internal static class Spelling
         {
             foreach (string known in list)
             {
-                int changes = Changes(text, known, limit);
+                int changes = IsExchange(text, known) ? Math.Min(1, limit) : Changes(text, known, limit);
                 if (changes < limit)
                 {
                     (best, limit) = (known, changes);
@@ -63,6 +64,19 @@ internal static class Spelling
         }
 
         return Math.Min(row[b.Length], limit);
+    }
+
+    /// <summary>Whether the words differ in two neighbouring letters that have changed places: "hoel".</summary>
+    private static bool IsExchange(ReadOnlySpan<char> a, ReadOnlySpan<char> b)
+    {
+        int at = 0;
+        while (at < a.Length && at < b.Length && IsSame(a[at], b[at]))
+        {
+            at++;
+        }
+
+        return a.Length == b.Length && at + 1 < a.Length && IsSame(a[at], b[at + 1]) && IsSame(a[at + 1], b[at])
+            && a[(at + 2)..].Equals(b[(at + 2)..], StringComparison.OrdinalIgnoreCase);
     }
 
     private static bool IsSame(char a, char b) => a == b || ((a ^ b) == ('a' ^ 'A') && char.IsAsciiLetter(a));

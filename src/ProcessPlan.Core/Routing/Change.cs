@@ -58,7 +58,7 @@ internal sealed record Change(string Process, string Detail, Deviation LeastGrow
 
     private static Change Of(Treatment treatment, Job job, ShopFloor shop)
     {
-        string hardness = treatment.Hardness is { } asked ? $" to {asked}" : "";
+        string hardness = treatment.Hardness is { } asked ? $" to {Hardness.Text(asked, treatment.HardnessTo)}" : "";
         string depth = treatment.Depth is { } deep ? $", {deep} deep on the finished part" : "";
         if (treatment.Kind == TreatmentKind.Nitrided)
         {

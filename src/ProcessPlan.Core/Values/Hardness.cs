@@ -37,10 +37,15 @@ public readonly record struct Hardness(long Tenths, HardnessScale Scale)
         return exact && tenths >= 10 * least && tenths <= 10 * most;
     }
 
-    /// <summary>The points that a scale is used for, in words: "20 to 70 HRC".</summary>
+    /// <summary>The points that a scale is used for, and for HRC and HV those that convert to other scales, in words: "20 to 70 HRC".</summary>
     public static string RangeOf(HardnessScale scale) => $"{Range(scale).Least} to {Range(scale).Most} {scale}";
 
-    private static (int Least, int Most) Range(HardnessScale scale) => scale == HardnessScale.HRC ? (20, 70) : (30, 1000);
+    private static (int Least, int Most) Range(HardnessScale scale) => scale switch
+    {
+        HardnessScale.HRC => (20, 68),
+        HardnessScale.HB => (30, 650),
+        _ => (30, 940),
+    };
 
     /// <summary>
     /// Reads <c>58HRC</c>, <c>28,5 HRC</c>, <c>240 HB</c>, <c>240 HBW</c> or <c>700 HV</c>, in any case of letters, from the start of
@@ -76,6 +81,10 @@ public readonly record struct Hardness(long Tenths, HardnessScale Scale)
 
         return false;
     }
+
+    /// <summary>A range as it is spoken: "58-62 HRC"; one hardness where there is no greatest one.</summary>
+    public static string Text(Hardness least, Hardness? most) =>
+        most is { } end ? $"{DecimalText.Format(least.Tenths, Places)}-{end}" : least.ToString();
 
     /// <summary>As it is spoken: "58 HRC".</summary>
     public override string ToString() => $"{DecimalText.Format(Tenths, Places)} {Scale}";

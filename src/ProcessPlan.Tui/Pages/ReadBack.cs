@@ -55,7 +55,7 @@ internal static class ReadBack
 
         if (feature.Hardness is { } hardness)
         {
-            Add(hardness.ToString());
+            Add(Hardness.Text(hardness, feature.HardnessTo));
         }
 
         if (feature.Treatment is { } treatment)
@@ -94,7 +94,7 @@ internal static class ReadBack
             TreatmentKind.CaseHardened => "case-hardened",
             _ => "nitrided",
         };
-        string hardness = treatment.Hardness is { } asked ? $" {asked}" : "";
+        string hardness = treatment.Hardness is { } asked ? $" {Hardness.Text(asked, treatment.HardnessTo)}" : "";
         string depth = treatment.Depth is { } deep ? $" {ruler.Plain(deep)} {ruler.Name} deep" : "";
         return word + hardness + depth;
     }

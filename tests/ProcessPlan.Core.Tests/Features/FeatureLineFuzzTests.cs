@@ -244,8 +244,9 @@ public sealed class FeatureLineFuzzTests
             : feature.Class is { } c && c.IsInternal != feature.IsInternal ? $"{c} for a {feature.Kind}"
             : feature.Class is not null && feature.General is not null ? "two tolerances"
             : feature.Quantity is < 1 ? $"{feature.Quantity} pieces"
-            : new[] { feature.Extent, feature.Wall, feature.BottomRoom, feature.Start?.Size, feature.Coating?.Least, feature.Treatment?.Depth }
+            : new[] { feature.Extent, feature.Wall, feature.Start?.Size, feature.Coating?.Least, feature.Treatment?.Depth }
                 .Any(static length => length <= Length.Zero) ? "a length of zero or less"
+            : feature.BottomRoom < Length.Zero ? "a bottom below zero"
             : feature.Coating is { } coating && coating.Least > coating.Most ? $"{coating}"
             : feature.Geometry.DistinctBy(static requirement => requirement.Kind).Count() != feature.Geometry.Count ? "one form twice"
             : null;

@@ -81,7 +81,8 @@ public sealed partial class FeatureLineTests
     ];
 
     private static readonly Gen<Part[]> InchSize = Gen.OneOf(
-        SizeAndClass(Gen.Int[4100, 60_000].Select(static n => $"{n / 10_000}.{n % 10_000:0000}"), "H7", "N7", "D9", "h6", "x6", "k6"),
+        Gen.Select(Gen.Int[4100, 60_000].Select(static n => $"{n / 10_000}.{n % 10_000:0000}"), Gen.OneOf("H7", "N7", "D9", "h6", "x6", "k6"), Gen.Bool,
+            static (n, c, behind) => new[] { new Part(behind ? $"{n}~{c} in" : $"{n}~in {c}", $"size={n}in tol={c}", KeepsCase: true) }),
         Gen.Select(Gen.Int[1, 63], Gen.Int[1, 9], static (n, tenths) => new[]
         {
             new Part($"{n}/64", $"size={n}/64"), new Part($"+.000{tenths}/-0", $"tol=+.000{tenths}/-0"), new Part("hole", "kind=hole"),

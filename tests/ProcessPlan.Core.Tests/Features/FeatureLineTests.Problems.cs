@@ -11,6 +11,7 @@ public sealed partial class FeatureLineTests
     private const string NoSize = "There is no size.";
     private const string SizeExpected = "a size with its tolerance, such as 25H7 or 60 +0.030/0";
     private const string WordExpected = "a word of the feature line or a material of the shop book";
+    private const string ListsThem = "shop show materials lists them";
     private const string OneTolerance = "one tolerance: a class, deviations, limits or a general tolerance";
     private const string OneSize = "one size; a length is written x 40, a wall wall 2, a quantity 200off";
     private const string FitExpected = "the fit without this, or one class; the other part in a line of its own";
@@ -104,10 +105,14 @@ public sealed partial class FeatureLineTests
     [InlineData("25H7 Rz 0", "Rz 0", "'Rz 0' is no roughness that can be made.", "Rz 0.25 to 400 µm")]
     [InlineData("25H7 Ra>0.8", "Ra>", "'Ra' asks for a least roughness.", "the greatest one, such as Ra 0.8")]
     [InlineData("1H7 in Ra 32", "Ra 32", "'Ra 32' on an inch line: micrometres or microinches?", "32uin or 32um")]
-    [InlineData("25H7 58-62HRC", "58-62HRC", "'58-62HRC' is a range; one hardness is taken.", "one value, such as 58HRC")]
-    [InlineData("25H7 hardened 58 to 62 HRC", "58 to 62 HRC", "'58 to 62 HRC' is a range; one hardness is taken.", "one value, such as 58HRC")]
-    [InlineData("25H7 hardened HRC 58..62", "HRC 58..62", "'HRC 58..62' is a range; one hardness is taken.", "one value, such as 58HRC")]
-    [InlineData("25H7 case 0.8 58-62HRC", "58-62HRC", "'58-62HRC' is a range; one hardness is taken.", "one value, such as 58HRC")]
+    [InlineData("25H7 62-58HRC", "62-58HRC", "'62-58HRC' has the greatest hardness first.", "the least hardness first, such as 58-62 HRC")]
+    [InlineData("25H7 70HRC", "70HRC", "'70HRC' is outside the scale.", "20 to 68 HRC")]
+    [InlineData("25H7 58+12HRC", "58+12HRC", "'58+12HRC' is outside the scale.", "20 to 68 HRC")]
+    [InlineData("25H7 hardened 20±1HRC", "20±1HRC", "'20±1HRC' is outside the scale.", "20 to 68 HRC")]
+    [InlineData("25H7 700HB", "700HB", "'700HB' is outside the scale.", "30 to 650 HB; harder steel is given in HRC or HV")]
+    [InlineData("25H7 29HB", "29HB", "'29HB' is outside the scale.", "30 to 650 HB; harder steel is given in HRC or HV")]
+    [InlineData("25H7 941HV", "941HV", "'941HV' is outside the scale.", "30 to 940 HV")]
+    [InlineData("25H7 hardened 58+2", "58+2", "'hardened 58+2' does not say its scale.", "58HRC, 58HB or 58HV")]
 
     // tolerances
     [InlineData("25Js7", "Js7", "'Js7' is no tolerance class.", "JS7 for a hole or js7 for a shaft")]
@@ -156,7 +161,22 @@ public sealed partial class FeatureLineTests
     [InlineData("25H7 Ra0.8 N6", "N6", "A second roughness: 'N6' after 'Ra0.8'.", "one roughness")]
     [InlineData("25H7 2off 3off", "3off", "A second number of pieces: '3off' after '2off'.", "one number of pieces")]
     [InlineData("25H7 solid cast 20", "cast 20", "A second start: 'cast 20' after 'solid'.", "one start")]
-    [InlineData("25mm H7 x 2in", "in", "'in' after 'mm': the line has two units.", "mm or in, the same in the whole line")]
+    [InlineData("25mm H7 in", "in", "'in' after 'mm': the line has two units.", "mm or in, the same in the whole line")]
+    [InlineData("in hole 25mm H7", "mm", "'mm' after 'in': the line has two units.", "mm or in, the same in the whole line")]
+    [InlineData("hole 25mm +.0005/0 in", "in", "'in' after 'mm': the line has two units.", "mm or in, the same in the whole line")]
+    [InlineData("25mm H7 Ra 0.8 in", "in", "'in' after 'mm': the line has two units.", "mm or in, the same in the whole line")]
+    [InlineData("shaft 60 h7 x 1.5\"", "1.5\"", "'1.5\"' is in inches, but the size '60' has no unit.", "60 mm or 60 in")]
+    [InlineData("25 H7 x 40 in", "40 in", "'40 in' is in inches, but the size '25' has no unit.", "25 mm or 25 in")]
+    [InlineData("25H7 x6 in", "6 in", "'6 in' is in inches, but the size '25' has no unit.", "25 mm or 25 in")]
+    [InlineData("60 h7 Ra 0.8 in", "0.8 in", "'0.8 in' is in inches, but the size '60' has no unit.", "60 mm or 60 in")]
+    [InlineData("60 h7 cyl .5thou x 1.5in", ".5thou", "'.5thou' is in inches, but the size '60' has no unit.", "60 mm or 60 in")]
+    [InlineData("hole 60-60.03 wall 1in", "1in", "'1in' is in inches, but the size '60-60.03' has no unit.", "60-60.03 mm or 60-60.03 in")]
+
+    // inches, forgotten
+    [InlineData("hole .5 +.0005 -.0000 x .75", ".5 +.0005 -.0000", "'.5 +.0005 -.0000' has no unit; inches meant?", "in behind the deviations, or 0.5 for millimetres")]
+    [InlineData("+.0005/-.0002 hole .5", "+.0005/-.0002 hole .5", "'+.0005/-.0002 hole .5' has no unit; inches meant?", "in behind the deviations, or 0.5 for millimetres")]
+    [InlineData("hole .5 ±.1", ".5 ±.1", "'.5 ±.1' has no unit; inches meant?", "in behind the deviations, or 0.5 for millimetres")]
+    [InlineData("hole 1.5 +.0005/0", "1.5 +.0005/0", "'1.5 +.0005/0' has no unit; inches meant?", "in behind the deviations, or 1.5 mm for millimetres")]
     [InlineData("25H7 interrupted interrupted", "interrupted", "A second interruption: 'interrupted' after 'interrupted'.", "one interruption")]
 
     // words that do not go together
@@ -169,6 +189,11 @@ public sealed partial class FeatureLineTests
     [InlineData("25H7 wall 5 od 50", "od 50", "'od 50' beside 'wall 5'.", "the wall or the outer diameter, not both")]
     [InlineData("25H7 od 25", "od 25", "'od 25' is not larger than the hole.", "an outer diameter above 25 mm")]
     [InlineData("25H7 cast 25", "cast 25", "'cast 25' leaves no metal to cut.", "a blank below 25 mm")]
+    [InlineData("hole 25H7 bar 30", "bar 30", "'bar 30' is the outside of the part, not of the hole.", "od 30")]
+    [InlineData("25H7 start=bar 30mm", "bar 30mm", "'bar 30mm' is the outside of the part, not of the hole.", "od 30mm")]
+    [InlineData("shaft 40 h6 bar 38", "bar 38", "'bar 38' is smaller than the shaft.", "a bar above 40 mm")]
+    [InlineData("shaft 40 h6 bar 40", "bar 40", "'bar 40' leaves no metal to cut.", "a bar above 40 mm")]
+    [InlineData("shaft 40 k6 cast 38", "cast 38", "'cast 38' is smaller than the shaft.", "a blank above 40.018 mm")]
     [InlineData("25h6 cast 25", "cast 25", "'cast 25' leaves no metal to cut.", "a blank above 25 mm")]
     [InlineData("25H7 coat zinc 12-8um", "coat zinc 12-8um", "'coat zinc 12-8um' has the greatest build-up first.", "the least build-up first, such as 8-12um")]
     [InlineData("25H7 x 1/2", "1/2", "'1/2' is a fraction without a unit.", "1/2in")]
@@ -176,11 +201,25 @@ public sealed partial class FeatureLineTests
 
     // words that are none
     [InlineData("25H7 dpeth", "dpeth", "'dpeth' is not understood.", "perhaps 'depth'")]
-    [InlineData("25H7 trhu", "trhu", "'trhu' is not understood.", WordExpected)]
+    [InlineData("25H7 trhu", "trhu", "'trhu' is not understood.", "perhaps 'thru'")]
+    [InlineData("hoel 25H7", "hoel", "'hoel' is not understood.", "perhaps 'hole'")]
+    [InlineData("25H7 R0.8", "R0.8", "'R0.8' is not understood.", "perhaps 'Ra0.8'")]
+    [InlineData("25H7 R 0,8", "R 0,8", "'R 0,8' is not understood.", "perhaps 'Ra0,8'")]
+    [InlineData("25H7 42CrM", "42CrM", "'42CrM' is not understood.", "perhaps '42CrMo4'")]
+    [InlineData("25H7 GJL-250", "GJL-250", "'GJL-250' is not understood.", "perhaps 'EN-GJL-250'")]
+    [InlineData("25H7 GJL250x", "GJL250x", "'GJL250x' is no material of the shop book.", ListsThem)]
+    [InlineData("25H7 31CrMoV9", "31CrMoV9", "'31CrMoV9' is no material of the shop book.", ListsThem)]
+    [InlineData("25H7 mat=CrNiMo17", "CrNiMo17", "'CrNiMo17' is no material of the shop book.", "perhaps 'X2CrNiMo17-12-2'")]
+    [InlineData("25H7 1.4462", "1.4462", "'1.4462' is no material of the shop book.", ListsThem)]
+    [InlineData("1.4462 hole 25H7", "1.4462", "'1.4462' is no material of the shop book.", ListsThem)]
+    [InlineData("hole 60-60.03 1.4462", "1.4462", "'1.4462' is no material of the shop book.", ListsThem)]
+    [InlineData("25H7 in 1.4462", "1.4462", "'1.4462' is a second size beside '25'.", OneSize)]
+    [InlineData("25H7 2024", "2024", "'2024' is no material of the shop book, and a second size beside '25'.", "a material that shop show materials lists; a length is written x 2024")]
+    [InlineData("25H7 C45-T6", "C45-T6", "'C45-T6' is no material of the shop book.", ListsThem)]
     [InlineData("25H7 42CrMo", "42CrMo", "'42CrMo' is not understood.", "perhaps '42CrMo4'")]
     [InlineData("42CrMo 25H7", "42CrMo", "'42CrMo' is not understood.", "perhaps '42CrMo4'")]
     [InlineData("25H7 mat=C46", "C46", "'C46' is no material of the shop book.", "perhaps 'C45'")]
-    [InlineData("25H7 mat=302", "302", "'302' is no material of the shop book.", "a material of the shop book")]
+    [InlineData("25H7 mat=302", "302", "'302' is no material of the shop book.", ListsThem)]
     [InlineData("25H7 kind=25", "kind", "'kind=25' is not understood.", "hole, shaft, slot or tongue")]
     [InlineData("25H7 end=hole", "end", "'end=hole' is not understood.", "thru or blind")]
     [InlineData("25H7 start=C45", "start", "'start=C45' is not understood.", "solid, cast 20, cored 20 or bar 30")]

@@ -95,6 +95,7 @@ public sealed partial class FeatureLineTests
     [InlineData("40H7/k6 C45")]
     [InlineData("40 H7 / k6 C45")]
     [InlineData("40 H7 k6 C45")]
+    [InlineData("40 H 7 / k 6 C45")]
     [InlineData("C45 H7/k6 40")]
     [InlineData("40 k6/H7 C45")]
     [InlineData("fit=H7/k6 size=40 mat=C45")]
@@ -171,6 +172,13 @@ public sealed partial class FeatureLineTests
     [InlineData("ø 25 H7")]
     [InlineData("⌀25H7")]
     [InlineData("∅25H7")]
+    [InlineData("φ25H7")]
+    [InlineData("Φ25H7")]
+    [InlineData("ϕ 25 H7")]
+    [InlineData("25 H 7")]
+    [InlineData("25H 7")]
+    [InlineData("DIA. 25 H7")]
+    [InlineData("dia: 25 H7")]
     [InlineData("dia 25 H7")]
     [InlineData("dia25H7")]
     [InlineData("diameter 25 H7")]
@@ -429,6 +437,11 @@ public sealed partial class FeatureLineTests
     [InlineData("25H7 AW6061", "EN-AW-6061")]
     [InlineData("25H7 EN AW 6061 x40", "EN-AW-6061")]
     [InlineData("25H7 EN AW-6061", "EN-AW-6061")]
+    [InlineData("25H7 6061-T6", "EN-AW-6061")]
+    [InlineData("25H7 6061 T6", "EN-AW-6061")]
+    [InlineData("25H7 EN AW 6061 T651 x40", "EN-AW-6061")]
+    [InlineData("25H7 mat=6061-T6", "EN-AW-6061")]
+    [InlineData("6061-t6 25H7", "EN-AW-6061")]
     [InlineData("25H7 GG 25", "EN-GJL-250")]
     [InlineData("GG25 25H7", "EN-GJL-250")]
     [InlineData("25H7 PA6,6", "PA6.6")]
@@ -499,6 +512,45 @@ public sealed partial class FeatureLineTests
     [InlineData("HARDENED 58HRC")]
     public void Parse_Hardened_InEverySpelling(string words) =>
         One($"25H7 {words} 28HRC").ShouldBe(Hole25H7 with { Hardness = Hrc(28), Treatment = new Treatment(TreatmentKind.Hardened, Hrc(58), null) });
+
+    [Theory]
+    [InlineData("58+2HRC", 58, 60)]
+    [InlineData("58+4 HRC", 58, 62)]
+    [InlineData("58 +4 HRC", 58, 62)]
+    [InlineData("58+4/0 HRC", 58, 62)]
+    [InlineData("58+4-0 HRC", 58, 62)]
+    [InlineData("60±2HRC", 58, 62)]
+    [InlineData("60+/-2 HRC", 58, 62)]
+    [InlineData("58-62HRC", 58, 62)]
+    [InlineData("58 to 62 HRC", 58, 62)]
+    [InlineData("HRC 58-62", 58, 62)]
+    [InlineData("HRC 58+4", 58, 62)]
+    [InlineData("HRC60±2", 58, 62)]
+    public void Parse_RangeOfHardness_InEverySpelling(string words, int least, int most)
+    {
+        Treatment hardened = new(TreatmentKind.Hardened, Hrc(least), null) { HardnessTo = Hrc(most) };
+        One($"25H7 {words} 200 off").ShouldBe(Hole25H7 with { Hardness = Hrc(least), HardnessTo = Hrc(most), Quantity = 200 });
+        One($"25H7 hardened {words} 200 off").ShouldBe(Hole25H7 with { Treatment = hardened, Quantity = 200 });
+        One($"25H7 case 0.8 {words} 200 off").ShouldBe(Hole25H7 with { Treatment = hardened with { Kind = TreatmentKind.CaseHardened, Depth = Mm(0.8m) }, Quantity = 200 });
+    }
+
+    [Theory]
+    [InlineData("hole 25 ±0.1 HRC 28")]
+    [InlineData("hole 25 +0.1/-0.1 HRC 28")]
+    [InlineData("hole HRC 28 ±0.1 25")]
+    [InlineData("hole 28HRC ±0.1 25")]
+    [InlineData("hole 25 ±0.1 28HRC")]
+    public void Parse_DeviationsBesideAHardness_BelongToTheSize(string line) =>
+        One(line).ShouldBe(Hole25 with { Limits = Limits(24.9m, 25.1m), Hardness = Hrc(28) });
+
+    [Fact]
+    public void Parse_EqualEndsOfHardness_AreOneHardness() => One("25H7 58-58HRC").ShouldBe(Hole25H7 with { Hardness = Hrc(58) });
+
+    [Theory]
+    [InlineData("68HRC")]
+    [InlineData("650HB")]
+    [InlineData("940HV")]
+    public void Parse_HardestOfTheScale_IsRead(string words) => One($"25H7 {words}").Hardness.Should().NotBeNull();
 
     [Fact]
     public void Parse_CaseAndNitriding_ReadDepthAndHardness()
@@ -578,7 +630,7 @@ public sealed partial class FeatureLineTests
     [InlineData("25H7 cored 20mm", StartKind.Cored, 20)]
     [InlineData("25h6 bar 30", StartKind.Bar, 30)]
     [InlineData("25h6 bar=30", StartKind.Bar, 30)]
-    [InlineData("25H7 bar 60", StartKind.Bar, 60)]
+    [InlineData("slot 25H7 bar 60", StartKind.Bar, 60)]
     public void Parse_Start_IsRead(string line, StartKind kind, int? size) =>
         One(line).Start.Should().Be(new StartForm(kind, size is { } blank ? Mm(blank) : null));
 
@@ -627,16 +679,59 @@ public sealed partial class FeatureLineTests
     [InlineData("hole 1-1/2 H7 in x 3/4 off 5", 1.5, 0.75)]
     [InlineData("hole 1 N7 in x6", 1, 6)]
     [InlineData("hole 1H7 off 5 in x .5", 1, 0.5)]
-    [InlineData("hole 1H7 x15.618 in", 1, 15.618)]
     [InlineData("hole 1H7 HRC 28 in x .5", 1, 0.5)]
-    [InlineData("hole 1H7 x .5 in", 1, 0.5)]
-    [InlineData("hole 1H7 Ra 0.8 in C45 x .5", 1, 0.5)]
+    [InlineData("hole 1H7 in x15.618 in", 1, 15.618)]
+    [InlineData("hole 1in H7 x .5", 1, 0.5)]
+    [InlineData("hole 1H7 in Ra 0.8 in C45 x .5", 1, 0.5)]
+    [InlineData("hole 1 H7 x .5 unit=in", 1, 0.5)]
+    [InlineData("hole 1 H7 C45 in x .5", 1, 0.5)]
+    [InlineData("hole .25H7 x .5 in", 0.25, 0.5)]
+    [InlineData("hole 1/4 H7 x 3/4in", 0.25, 0.75)]
+    [InlineData("hole 1/2 H7 cyl 0.01mm x 3/4in", 0.5, 0.75)]
+    [InlineData("hole .25H7 Ra 0.8 in x .5", 0.25, 0.5)]
+    [InlineData("hole .25-.2505 x .5 in", 0.25, 0.5)]
+    [InlineData("hole 1 ±.0005 in x .5", 1, 0.5)]
     [InlineData("hole 1H7 Ra 32uin in x .5", 1, 0.5)]
     public void Parse_UnitAnywhere_IsThatOfTheLine(string line, double nominal, double extent)
     {
         Feature feature = One(line);
         (feature.Unit, feature.Nominal, feature.Extent).Should().Be((LengthUnit.Inch, Inch((decimal)nominal), Inch((decimal)extent)));
     }
+
+    [Theory]
+    [InlineData("60 mm h7 x 1.5\"")]
+    [InlineData("60 h7 mm x 1.5\"")]
+    [InlineData("60 h7 x 1.5in mm")]
+    [InlineData("mm 60 h7 x 1.5 in")]
+    public void Parse_InchesBehindAnotherLength_CountForThatLengthOnly(string line)
+    {
+        Feature feature = One(line);
+        (feature.Unit, feature.Nominal, feature.Extent).Should().Be((LengthUnit.Millimetre, Mm(60), Mm(38.1m)));
+    }
+
+    [Fact]
+    public void Parse_MillimetresOnAnInchLine_CountForThatLengthOnly()
+    {
+        Feature feature = One("1 H7 in x 30mm wall .25");
+        (feature.Unit, feature.Nominal, feature.Extent, feature.Wall).Should().Be((LengthUnit.Inch, Inch(1), Mm(30), Inch(0.25m)));
+    }
+
+    [Theory]
+    [InlineData("hole 0.5 +.0005 -.0000")]
+    [InlineData("hole .5mm +.0005 -.0000")]
+    [InlineData("hole .5 +.0005 -.0000 x .75 mm")]
+    [InlineData("hole .5 +.5um/0")]
+    [InlineData("hole .5 +0.0125/0")]
+    public void Parse_FineDeviations_AreMillimetresWhereTheLineSaysSo(string line)
+    {
+        Feature feature = One(line);
+        (feature.Unit, feature.Nominal).Should().Be((LengthUnit.Millimetre, Mm(0.5m)));
+    }
+
+    [Theory]
+    [InlineData("25H7 blind bottom 0")]
+    [InlineData("25H7 blind bottom 0.0 mm")]
+    public void Parse_BottomZero_IsAFlatBottom(string line) => One(line).ShouldBe(Hole25H7 with { End = HoleEnd.Blind, BottomRoom = Length.Zero });
 
     // 32 µin are 812.8 nm: a limit is converted to the stricter side.
     [Fact]

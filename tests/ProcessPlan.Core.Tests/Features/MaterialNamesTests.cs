@@ -28,6 +28,34 @@ public sealed class MaterialNamesTests
     [InlineData("EN-AW-6061-EN-AW-6061-EN-AW-6061-EN-AW-6061")]
     public void TryFind_NoSuchName_IsFalse(string name) => Names.TryFind(name, out _).Should().BeFalse();
 
+    [Theory]
+    [InlineData("6061-T6")]
+    [InlineData("EN AW 6061 T651")]
+    [InlineData("aw6061t6")]
+    public void TryFind_AluminiumWithItsTemper_IsTheAluminium(string name)
+    {
+        Names.TryFind(name, out string found).Should().BeTrue();
+        found.Should().Be("EN-AW-6061");
+    }
+
+    [Theory]
+    [InlineData("6061-T")]
+    [InlineData("6061-T65111")]
+    [InlineData("6061-T6x")]
+    [InlineData("7075-T6")]
+    [InlineData("1.0503-T6")]
+    public void TryFind_TemperOfNothingKnown_IsFalse(string name) => Names.TryFind(name, out _).Should().BeFalse();
+
+    [Theory]
+    [InlineData("AW-606", "EN-AW-6061")]
+    [InlineData("crni18", "X5CrNi18-10")]
+    [InlineData("1.43", "X5CrNi18-10")]
+    [InlineData("C4", null)]
+    [InlineData("---", null)]
+    [InlineData("C46", null)]
+    [InlineData("EN-AW-6061-EN-AW-6061-EN-AW-6061-EN-AW-6061", null)]
+    public void Containing_Part_IsTheFirstDesignation(string part, string? designation) => Names.Containing(part).Should().Be(designation);
+
     [Fact]
     public void TryFind_AliasOfTwo_IsTheFirst()
     {
