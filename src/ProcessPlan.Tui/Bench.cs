@@ -234,6 +234,19 @@ internal sealed class Bench
         GoTo(Hand.Route);
     }
 
+    /// <summary>Goes to the line and empties it; a line that was read is kept, so that it can be brought back.</summary>
+    public void StartNew()
+    {
+        if (Problems.Count == 0 && !string.IsNullOrWhiteSpace(Text))
+        {
+            Keep(Text);
+        }
+
+        (_recall, _draft) = (_recent.Count, "");
+        (Page, Hand, Scroll) = (Page.Bench, Hand.Line, 0);
+        Type("");
+    }
+
     /// <summary>Brings back the line kept before the one shown; the text being typed is not lost by it.</summary>
     public void Earlier() => Recall(_recall - 1);
 

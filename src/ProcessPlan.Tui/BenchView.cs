@@ -31,7 +31,7 @@ internal sealed class BenchView : Runnable
         _reckoner = new Reckoner(plan, aside, work => App?.Invoke(_ => work()), Deliver);
         Arrangement = ViewArrangement.Fixed;
         SetScheme(_palette.Scheme);
-        _field = new FeatureField(Take, options.Ascii) { X = BenchPage.FieldColumn, Y = 0, Width = Dim.Fill(BenchPage.FieldEnd), Text = options.Line };
+        _field = new FeatureField(Take, options.Ascii) { X = BenchPage.FieldColumn, Y = 0, Width = Dim.Fill(BenchPage.FieldEnd), Text = options.Line, IsExample = options.Line == ScreenOptions.FirstLine };
         _field.SetScheme(_palette.Scheme);
         _field.ValueChanged += (_, change) => Read(change.NewValue ?? "");
         Add(_field);

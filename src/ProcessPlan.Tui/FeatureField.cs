@@ -41,30 +41,49 @@ internal sealed class FeatureField : TextField
         return column + character - Text.Length;
     }
 
+    /// <summary>
+    /// Whether the text is an example that nobody has touched yet. It stands there marked, so that the first character typed replaces it, while a key
+    /// that moves the caret keeps it.
+    /// </summary>
+    public bool IsExample { get; set; }
+
     /// <summary>Puts another text in, with the caret behind it.</summary>
     public void Replace(string text)
     {
+        IsExample = false;
         Text = text;
         MoveEnd();
     }
 
-    protected override bool OnKeyDown(Key key) => _take(key) || base.OnKeyDown(key);
+    protected override bool OnKeyDown(Key key)
+    {
+        bool taken = _take(key);
+        IsExample &= taken && key != Key.Enter;
+        return taken || base.OnKeyDown(key);
+    }
 
     protected override bool OnMouseEvent(Mouse mouse)
     {
+        IsExample &= !mouse.Flags.HasFlag(MouseFlags.LeftButtonPressed);
         SuperView?.SetNeedsDraw();
         return base.OnMouseEvent(mouse);
     }
 
     /// <summary>
     /// In place of what the library does here: it marks the whole text, so that the next letter would wipe it out, and builds a menu that knows nothing
-    /// of our keys.
+    /// of our keys. Only an example stays marked.
     /// </summary>
     protected override void OnHasFocusChanged(bool newHasFocus, View? previousFocusedView, View? focusedView)
     {
         if (App?.Mouse.IsGrabbed(this) == true)
         {
             App.Mouse.UngrabMouse();
+        }
+
+        if (IsExample)
+        {
+            SelectAll();
+            return;
         }
 
         ClearAllSelection();

@@ -22,6 +22,7 @@ internal static class KeyChart
         new("F2", "u", "millimetres or inches, for the whole screen", static bench => bench.FlipUnit()),
         new("F3", "b", "big digits, to be read from the machine", static bench => bench.Enlarge()),
         new("F4", "r", "next route, the next dearer one", static bench => bench.NextRoute()),
+        new("F5", "c", "a new, empty line; Up brings the one before back", static bench => bench.StartNew()),
         new("F6", "n", "notes: questions, cautions, assumptions, what was not used", static bench => bench.FlipBelow()),
         new("F7", null, "the operation before", static bench => bench.PreviousOperation()),
         new("F8", null, "the operation after", static bench => bench.NextOperation()),
@@ -72,6 +73,7 @@ internal static class KeyChart
     /// <summary>What the library's text field does by itself, for the help.</summary>
     public static IReadOnlyList<(string Key, string Does)> InText { get; } =
     [
+        ("a letter", "the first one replaces the example that stands there at the start"),
         ("Ctrl+Z", "take back what was typed last"),
         ("Ctrl+Y", "do it again"),
         ("Ctrl+A", "mark the whole line, to type a new one over it"),

@@ -19,6 +19,84 @@ public class BenchViewTests
     }
 
     [Fact]
+    public void The_first_character_typed_replaces_the_example()
+    {
+        using Terminal terminal = new();
+        terminal.Type("hole 12H7");
+        terminal.Bench.Text.Should().Be("hole 12H7");
+        terminal.Bench.IsCurrent.Should().BeTrue();
+        terminal.Press([.. Enumerable.Repeat("Ctrl+Z", "hole 12H7".Length)]);
+        terminal.Bench.Text.Should().Be(ScreenOptions.FirstLine, "it can be taken back");
+    }
+
+    [Theory]
+    [InlineData("F2")]
+    [InlineData("F1", "Esc")]
+    [InlineData("Tab", "Down", "Esc")]
+    public void Looking_around_first_leaves_the_example_to_be_replaced(params string[] keys)
+    {
+        using Terminal terminal = new();
+        terminal.Press(keys).Type("hole 12H7");
+        terminal.Bench.Text.Should().Be("hole 12H7");
+    }
+
+    [Theory]
+    [InlineData("End", ScreenOptions.FirstLine + "x")]
+    [InlineData("Home", "x" + ScreenOptions.FirstLine)]
+    [InlineData("Right", ScreenOptions.FirstLine + "x")]
+    public void A_key_that_moves_the_caret_keeps_the_example(string key, string text)
+    {
+        using Terminal terminal = new();
+        terminal.Press(key).Type("x");
+        terminal.Bench.Text.Should().Be(text);
+    }
+
+    [Fact]
+    public void Left_keeps_the_example()
+    {
+        using Terminal terminal = new();
+        terminal.Press("Left").Type("x");
+        terminal.Bench.Text.Replace("x", "", StringComparison.Ordinal).Should().Be(ScreenOptions.FirstLine.Replace("x", "", StringComparison.Ordinal));
+    }
+
+    [Fact]
+    public void Enter_keeps_the_example()
+    {
+        using Terminal terminal = new();
+        terminal.Press("Enter", "Esc").Type("x");
+        terminal.Bench.Text.Should().EndWith("x").And.StartWith(ScreenOptions.FirstLine);
+    }
+
+    [Fact]
+    public void A_click_into_the_line_keeps_the_example()
+    {
+        using Terminal terminal = new();
+        terminal.Click(70, 0).Type("x");
+        terminal.Bench.Text.Should().Be(ScreenOptions.FirstLine + "x");
+    }
+
+    [Fact]
+    public void A_line_of_ones_own_is_gone_on_with()
+    {
+        using Terminal terminal = new(new ScreenOptions { Line = "hole 12H7" });
+        terminal.Type(" C45");
+        terminal.Bench.Text.Should().Be("hole 12H7 C45");
+    }
+
+    [Fact]
+    public void A_new_line_is_empty_and_the_one_before_comes_back()
+    {
+        using Terminal terminal = new();
+        terminal.Press("F5").Row(0).Should().Be("Feature ▸" + new string(' ', 68) + "mm");
+        terminal.Type("hole 12H7").Press("Up");
+        terminal.Bench.Text.Should().Be(ScreenOptions.FirstLine);
+        terminal.Press("Down");
+        terminal.Bench.Text.Should().Be("hole 12H7");
+        terminal.Press("Tab", "c").Type("4");
+        terminal.Bench.Text.Should().Be("4");
+    }
+
+    [Fact]
     public void Every_key_press_is_answered_at_once()
     {
         using Terminal terminal = new();
@@ -95,7 +173,7 @@ public class BenchViewTests
     {
         using Terminal terminal = new();
         terminal.Press("u");
-        terminal.Bench.Text.Should().EndWith("u");
+        terminal.Bench.Text.Should().Be("u");
         terminal.Press("Ctrl+Z", "Tab", "U");
         terminal.Bench.Unit.Should().Be(LengthUnit.Inch);
         terminal.Press("u");
@@ -172,6 +250,7 @@ public class BenchViewTests
     public void Resizing_at_any_moment_keeps_every_page_whole()
     {
         using Terminal terminal = new();
+        terminal.Press("End");
         Random sizes = new(7);
         string[] keys = ["F1", "Esc", "F3", "Esc", "F6", "Tab", "?", "Esc", "F4", "F2"];
         for (int i = 0; i < 300; i++)

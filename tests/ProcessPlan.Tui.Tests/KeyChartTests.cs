@@ -12,6 +12,7 @@ public class KeyChartTests
         ["F2"] = static terminal => terminal.Bench.Unit == LengthUnit.Inch && terminal.Row(0).EndsWith("in", StringComparison.Ordinal),
         ["F3"] = static terminal => terminal.Text.Contains("████", StringComparison.Ordinal) && terminal.Text.Contains("aim", StringComparison.Ordinal),
         ["F4"] = static terminal => terminal.Text.Contains("route 2 of 2, 0.26 dearer", StringComparison.Ordinal),
+        ["F5"] = static terminal => terminal.Bench is { Text: "", Page: Page.Bench, Hand: Hand.Line } && terminal.Row(1).StartsWith("Type a feature", StringComparison.Ordinal),
         ["F6"] = static terminal => terminal.Text.Contains("── notes", StringComparison.Ordinal),
         ["F7"] = static terminal => terminal.Bench.OperationAt == 0,
         ["F8"] = static terminal => terminal.Bench.OperationAt == 2,

@@ -306,9 +306,15 @@ internal static class BenchPage
         string below = bench.Below == Below.Notes ? "why" : "notes";
         string mate = bench.IsFit ? "F9 mate" : "";
         string hand = bench.Hand == Hand.Line ? "Tab route" : "Tab line";
-        string[] keys = ["F1 help", "F2 " + unit, "F3 big", "F4 route", "F6 " + below, mate, hand, bench.Hand == Hand.Route ? "? keys" : "", "Ctrl+Q leave"];
-        string wide = string.Join("  ", keys.Where(static key => key.Length > 0));
-        string narrow = string.Join(" ", ["F1 help", "F2 " + unit, "F3 big", "F4 route", "F6 " + below, mate.Length > 0 ? "F9" : "Tab", "Ctrl+Q"]);
-        sheet.Write(0, sheet.Height - 1, sheet.Shorten(wide.Length <= sheet.Width ? wide : narrow, sheet.Width), Ink.Faint);
+        string[] keys = ["F1 help", "F2 " + unit, "F3 big", "F4 route", "F5 new", "F6 " + below, mate, hand, bench.Hand == Hand.Route ? "? keys" : "", "Ctrl+Q leave"];
+        List<string> named = [.. keys.Where(static key => key.Length > 0)];
+        string[] ways =
+        [
+            string.Join("  ", named),
+            string.Join(' ', named),
+            string.Join(' ', [.. named.SkipLast(1), "Ctrl+Q"]),
+            string.Join(' ', ["F1 help", "F2 " + unit, "F3 big", "F4 route", "F5 new", "F6 " + below, mate.Length > 0 ? "F9" : "Tab", "Ctrl+Q"]),
+        ];
+        sheet.Write(0, sheet.Height - 1, sheet.Shorten(ways.FirstOrDefault(way => way.Length <= sheet.Width) ?? ways[^1], sheet.Width), Ink.Faint);
     }
 }
