@@ -54,8 +54,8 @@ public sealed class ShopTests : IDisposable
 
         shop.RootElement.EnumerateObject().Select(static field => field.Name)
             .Should().Equal("name", "currency", "revision", "machines", "tools", "materials", "bars", "suppliers");
-        JsonElement tool = shop.RootElement.GetProperty("tools")[1];
-        tool.GetRawText().Should().Be("""{"id":2,"name":"twist drill","use":"drill","stamped":1.05,"ownMin":1.036,"ownMax":1.05,"made":"h8","material":"HSS","price":2.945,"lifeMetres":20}""");
+        JsonElement tool = shop.RootElement.GetProperty("tools")[11];
+        tool.GetRawText().Should().Be("""{"id":12,"name":"twist drill","use":"drill","stamped":1.05,"ownMin":1.036,"ownMax":1.05,"made":"h8","material":"HSS","price":2.945,"lifeMetres":20}""");
         JsonElement plastic = shop.RootElement.GetProperty("materials").EnumerateArray().First(static material => material.GetProperty("group").GetString() == "O");
         plastic.GetProperty("hbTo").ValueKind.Should().Be(JsonValueKind.Null);
         plastic.GetProperty("keepsSkin").ValueKind.Should().Be(JsonValueKind.False);

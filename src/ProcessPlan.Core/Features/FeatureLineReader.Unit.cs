@@ -118,8 +118,8 @@ internal ref partial struct FeatureLineReader
             return;
         }
 
-        bool points = BeginsWithPoint(size) && (pair.First.IsZero || BeginsWithPoint(pair.First)) && (pair.Second.IsZero || BeginsWithPoint(pair.Second));
-        if (points || (!At(size.Place).StartsWith("0") && IsFinerThanAnyGrade(size, pair)))
+        bool points = (pair.First.IsZero || BeginsWithPoint(pair.First)) && (pair.Second.IsZero || BeginsWithPoint(pair.Second));
+        if (points && (BeginsWithPoint(size) || (!At(size.Place).StartsWith("0") && IsFinerThanAnyGrade(size, pair))))
         {
             Place place = size.Place.At < _deviations.Place.At ? size.Place.To(_deviations.Place) : _deviations.Place.To(size.Place);
             string millimetres = BeginsWithPoint(size) ? $"0{Show(size.Place)}" : $"{Show(size.Place)} mm";
