@@ -10,11 +10,12 @@ internal ref partial struct FeatureLineReader
 
     private const string CoatingExpected = "such as coat zinc-nickel 8-12um";
 
-    /// <summary>How a range of hardness is written: 58-62, 58+4, 60±2.</summary>
+    /// <summary>How a range of hardness is written: 58-62, 58+4, 58+4/0, 60±2.</summary>
     private enum RangeForm
     {
         To,
         Plus,
+        PlusZero,
         PlusMinus,
     }
 
@@ -151,6 +152,7 @@ internal ref partial struct FeatureLineReader
         if (form == RangeForm.Plus && zero > _at && CharAt(zero) == '0' && !NumberAt(zero + 1))
         {
             _at = zero + 1;
+            form = RangeForm.PlusZero;
         }
 
         return true;

@@ -14,7 +14,7 @@ internal ref partial struct FeatureLineReader
         FeatureWord word = FeatureWords.Find(_text[start..end]);
         if (word == FeatureWord.None)
         {
-            return TryMaterial();
+            return TryMaterial() || TryPartOfMaterial();
         }
 
         Place place = new(_at, end - _at);
@@ -55,6 +55,22 @@ internal ref partial struct FeatureLineReader
             Note(ref _material, material, place, "material");
         }
 
+        return true;
+    }
+
+    /// <summary>"X5CrNi" is a piece of a material's name, not the length 5 and a word. Tells it.</summary>
+    private bool TryPartOfMaterial()
+    {
+        const int Least = 5;
+        Place place = new(_at, WordEnd(_at) - _at);
+        ReadOnlySpan<char> word = At(place);
+        if (word.Length < Least || !char.IsLetter(word[0]) || !word.ContainsAnyInRange('0', '9') || _materials.Containing(word) is null)
+        {
+            return false;
+        }
+
+        _at = place.End;
+        ReportUnknown(place);
         return true;
     }
 

@@ -46,10 +46,14 @@ public sealed class MaterialNames
         return found;
     }
 
-    /// <summary>The first designation one of whose names has these characters in it; null for fewer than three.</summary>
+    /// <summary>
+    /// The first designation one of whose names has these characters in it, or begins them: "S235" and "St37-2". Null for fewer than three
+    /// characters, and for names of fewer than four.
+    /// </summary>
     public string? Containing(ReadOnlySpan<char> part)
     {
         const int Least = 3;
+        const int LeastOfName = 4;
         if (part.Length > LongestName)
         {
             return null;
@@ -60,6 +64,14 @@ public sealed class MaterialNames
         foreach ((string name, string designation) in _designations)
         {
             if (length >= Least && name.AsSpan().Contains(folded[..length], StringComparison.OrdinalIgnoreCase))
+            {
+                return designation;
+            }
+        }
+
+        foreach ((string name, string designation) in _designations)
+        {
+            if (name.Length >= LeastOfName && folded[..length].StartsWith(name, StringComparison.OrdinalIgnoreCase))
             {
                 return designation;
             }

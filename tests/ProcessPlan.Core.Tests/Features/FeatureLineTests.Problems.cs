@@ -207,6 +207,8 @@ public sealed partial class FeatureLineTests
     [InlineData("25H7 R 0,8", "R 0,8", "'R 0,8' is not understood.", "perhaps 'Ra0,8'")]
     [InlineData("25H7 42CrM", "42CrM", "'42CrM' is not understood.", "perhaps '42CrMo4'")]
     [InlineData("25H7 GJL-250", "GJL-250", "'GJL-250' is not understood.", "perhaps 'EN-GJL-250'")]
+    [InlineData("25H7 X5CrNi", "X5CrNi", "'X5CrNi' is not understood.", "perhaps 'X5CrNi18-10'")]
+    [InlineData("25H7 34CrNiMo6+QT", "34CrNiMo6+QT", "'34CrNiMo6+QT' is not understood.", "perhaps '34CrNiMo6'")]
     [InlineData("25H7 GJL250x", "GJL250x", "'GJL250x' is no material of the shop book.", ListsThem)]
     [InlineData("25H7 31CrMoV9", "31CrMoV9", "'31CrMoV9' is no material of the shop book.", ListsThem)]
     [InlineData("25H7 mat=CrNiMo17", "CrNiMo17", "'CrNiMo17' is no material of the shop book.", "perhaps 'X2CrNiMo17-12-2'")]

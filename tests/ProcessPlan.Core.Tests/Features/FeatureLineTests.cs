@@ -537,11 +537,18 @@ public sealed partial class FeatureLineTests
     [Theory]
     [InlineData("hole 25 ±0.1 HRC 28")]
     [InlineData("hole 25 +0.1/-0.1 HRC 28")]
+    [InlineData("hole 25 +/-0.1 HRC 28")]
     [InlineData("hole HRC 28 ±0.1 25")]
     [InlineData("hole 28HRC ±0.1 25")]
     [InlineData("hole 25 ±0.1 28HRC")]
     public void Parse_DeviationsBesideAHardness_BelongToTheSize(string line) =>
         One(line).ShouldBe(Hole25 with { Limits = Limits(24.9m, 25.1m), Hardness = Hrc(28) });
+
+    [Theory]
+    [InlineData("25 +2.0/0 HRC 58 hole")]
+    [InlineData("25 +2.0 -0 HRC 58 hole")]
+    public void Parse_UpperDeviationBeforeAHardness_BelongsToTheSize(string line) =>
+        One(line).ShouldBe(Hole25 with { Limits = Limits(25m, 27m), Hardness = Hrc(58) });
 
     [Fact]
     public void Parse_EqualEndsOfHardness_AreOneHardness() => One("25H7 58-58HRC").ShouldBe(Hole25H7 with { Hardness = Hrc(58) });

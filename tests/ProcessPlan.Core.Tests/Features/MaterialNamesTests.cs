@@ -50,6 +50,8 @@ public sealed class MaterialNamesTests
     [InlineData("AW-606", "EN-AW-6061")]
     [InlineData("crni18", "X5CrNi18-10")]
     [InlineData("1.43", "X5CrNi18-10")]
+    [InlineData("1.4301+2B", "X5CrNi18-10")]
+    [InlineData("304L", null)]
     [InlineData("C4", null)]
     [InlineData("---", null)]
     [InlineData("C46", null)]
