@@ -12,6 +12,7 @@ internal enum Page
     Bench,
     BigDigits,
     Help,
+    Words,
     Keys,
 }
 
@@ -173,6 +174,9 @@ internal sealed class Bench
     public void FlipBelow() => (Below, Scroll) = (Below == Below.Notes ? Below.Reasons : Below.Notes, 0);
 
     public void Turn(Page page) => (Page, Scroll) = (Page == page ? Page.Bench : page, 0);
+
+    /// <summary>From the keys to the words of the line, and back.</summary>
+    public void TurnHelp() => Turn(Page == Page.Words ? Page.Help : Page.Words);
 
     /// <summary>Opens the big digits on what is looked at: the operation from the route, the drawing from the line.</summary>
     public void Enlarge()

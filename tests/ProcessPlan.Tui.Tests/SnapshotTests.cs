@@ -107,6 +107,14 @@ public class SnapshotTests
 
     [Theory]
     [MemberData(nameof(Sizes))]
+    public void The_words_of_the_line_are_one_key_away(int width, int height)
+    {
+        using Terminal terminal = Open(width, height);
+        Looks(terminal.Press("F1", "Tab"), "words");
+    }
+
+    [Theory]
+    [MemberData(nameof(Sizes))]
     public void Plain_characters_draw_the_same_bench(int width, int height)
     {
         using Terminal terminal = Open(width, height, Fit, ascii: true);
