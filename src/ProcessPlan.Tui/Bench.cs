@@ -12,6 +12,7 @@ internal enum Page
     Bench,
     BigDigits,
     Help,
+    Words,
     Keys,
 }
 
@@ -54,7 +55,7 @@ internal sealed class Bench
     /// <summary>Whether the text has been read at all; only the first one stands unread for a moment.</summary>
     public bool IsRead { get; private set; }
 
-    /// <summary>What is wrong with the text; nothing for a text that was read, and for an empty one.</summary>
+    /// <summary>What is wrong with the text, from left to right; nothing for a text that was read, and for an empty one.</summary>
     public IReadOnlyList<Problem> Problems { get; private set; } = [];
 
     /// <summary>The request of the present text while it waits for its answer.</summary>
@@ -115,7 +116,8 @@ internal sealed class Bench
         }
 
         Parsed<FeatureRequest> read = FeatureLine.Parse(text, _materials);
-        Problems = read.Problems;
+        Problems = [.. read.Problems.OrderBy(static problem => problem.At)];
+        Scroll = Problems.Count > 0 ? 0 : Scroll;
         Waiting = IsCurrent ? null : read.Value;
     }
 
@@ -133,9 +135,9 @@ internal sealed class Bench
         ChooseRoute(0);
     }
 
-    /// <summary>The problem that the caret stands at, or the nearest one; the first of two that are equally near.</summary>
-    public Problem? ProblemNear(int caret) => Problems.MinBy(problem =>
-        caret < problem.At ? problem.At - caret : Math.Max(0, caret - (problem.At + problem.Length)));
+    /// <summary>The problem whose text the caret stands in, else the first one: behind a word the caret is still typing it.</summary>
+    public Problem? ProblemTold(int caret) =>
+        Problems.FirstOrDefault(problem => caret >= problem.At && caret < problem.At + problem.Length) ?? (Problems.Count > 0 ? Problems[0] : null);
 
     public void FlipUnit() => Unit = Unit == LengthUnit.Inch ? LengthUnit.Millimetre : LengthUnit.Inch;
 
@@ -172,6 +174,9 @@ internal sealed class Bench
     public void FlipBelow() => (Below, Scroll) = (Below == Below.Notes ? Below.Reasons : Below.Notes, 0);
 
     public void Turn(Page page) => (Page, Scroll) = (Page == page ? Page.Bench : page, 0);
+
+    /// <summary>From the keys to the words of the line, and back.</summary>
+    public void TurnHelp() => Turn(Page == Page.Words ? Page.Help : Page.Words);
 
     /// <summary>Opens the big digits on what is looked at: the operation from the route, the drawing from the line.</summary>
     public void Enlarge()

@@ -133,6 +133,9 @@ internal sealed class BenchView : Runnable
             case Page.Help:
                 HelpPage.DrawHelp(sheet, _bench);
                 break;
+            case Page.Words:
+                HelpPage.DrawWords(sheet, _bench);
+                break;
             case Page.Keys:
                 HelpPage.DrawKeys(sheet, _bench);
                 break;

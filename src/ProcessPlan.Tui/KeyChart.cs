@@ -18,7 +18,7 @@ internal static class KeyChart
     /// <summary>Keys that do the same wherever the hand is.</summary>
     public static IReadOnlyList<Stroke> Everywhere { get; } =
     [
-        new("F1", "h", "help: the words of the line, and the keys", static bench => bench.Turn(Page.Help)),
+        new("F1", "h", "help: the keys, and the words of the line", static bench => bench.Turn(Page.Help)),
         new("F2", "u", "millimetres or inches, for the whole screen", static bench => bench.FlipUnit()),
         new("F3", "b", "big digits, to be read from the machine", static bench => bench.Enlarge()),
         new("F4", "r", "next route, the next dearer one", static bench => bench.NextRoute()),
@@ -64,6 +64,7 @@ internal static class KeyChart
     /// <summary>Keys on a page of text.</summary>
     public static IReadOnlyList<Stroke> OnText { get; } =
     [
+        new("Tab", null, "from the keys to the words of the line, and back", static bench => bench.TurnHelp()),
         new("Up", null, "up", static bench => bench.ScrollBy(-1)),
         new("Down", null, "down", static bench => bench.ScrollBy(1)),
         new("Enter", null, "back", static bench => bench.Back()),
@@ -99,7 +100,7 @@ internal static class KeyChart
     private static IReadOnlyList<Stroke> Here(Bench bench) => bench switch
     {
         { Page: Page.BigDigits } => OnBigDigits,
-        { Page: Page.Help or Page.Keys } => OnText,
+        { Page: Page.Help or Page.Words or Page.Keys } => OnText,
         { Hand: Hand.Route } => OnRoute,
         _ => OnLine,
     };

@@ -77,18 +77,30 @@ public class BenchTests
 
     [Theory]
     [InlineData(0, "fooo")]
+    [InlineData(5, "fooo")]
     [InlineData(11, "fooo")]
-    [InlineData(20, "baar")]
-    public void The_problem_nearest_to_the_caret_is_told(int caret, string word)
+    [InlineData(14, "baar")]
+    [InlineData(17, "baar")]
+    [InlineData(18, "fooo")]
+    public void The_problem_in_which_the_caret_stands_is_told_else_the_first(int caret, string word)
     {
         Bench bench = new(Terminal.Shop.Names);
         bench.Type("25H7 fooo x40 baar");
         bench.Problems.Should().HaveCount(2);
-        bench.ProblemNear(caret)!.Message.Should().Contain(word);
+        bench.ProblemTold(caret)!.Message.Should().Contain(word);
     }
 
     [Fact]
-    public void Without_a_problem_there_is_none_to_tell() => Answered().ProblemNear(3).Should().BeNull();
+    public void Problems_stand_in_the_order_of_the_line()
+    {
+        Bench bench = new(Terminal.Shop.Names);
+        bench.Type("Ra0 25H7 fooo x0 baar cyl 99");
+        bench.Problems.Count.Should().BeGreaterThan(2);
+        bench.Problems.Should().BeInAscendingOrder(static problem => problem.At);
+    }
+
+    [Fact]
+    public void Without_a_problem_there_is_none_to_tell() => Answered().ProblemTold(3).Should().BeNull();
 
     [Fact]
     public void Kept_lines_come_back_and_the_one_being_typed_is_not_lost()

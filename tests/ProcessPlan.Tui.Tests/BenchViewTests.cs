@@ -113,11 +113,77 @@ public class BenchViewTests
         terminal.Retype("hole 25H7 fooo x40 baar");
         string line = terminal.Row(0);
         string marks = terminal.Row(1);
-        marks.IndexOf('^').Should().Be(line.IndexOf("fooo", StringComparison.Ordinal));
-        marks.LastIndexOf('^').Should().Be(line.IndexOf("baar", StringComparison.Ordinal) + 3);
-        terminal.Row(2).Should().Contain("'baar'").And.Contain("and 1 more");
-        terminal.Press("Home");
-        terminal.Row(2).Should().Contain("'fooo'");
+        marks.IndexOf("^^^^", StringComparison.Ordinal).Should().Be(line.IndexOf("fooo", StringComparison.Ordinal));
+        marks.IndexOf("~~~~", StringComparison.Ordinal).Should().Be(line.IndexOf("baar", StringComparison.Ordinal));
+        terminal.Text.Should().Contain("'fooo' is not").And.Contain("and 1 more");
+        terminal.Row(2).Should().StartWith("'fooo'");
+        terminal.Press("Left");
+        terminal.Row(2).Should().StartWith("'baar'");
+        terminal.Row(1).IndexOf("^^^^", StringComparison.Ordinal).Should().Be(line.IndexOf("baar", StringComparison.Ordinal));
+    }
+
+    [Theory]
+    [InlineData(80, 24)]
+    [InlineData(60, 17)]
+    [InlineData(120, 40)]
+    public void With_problems_the_size_stays_and_every_problem_can_be_read(int width, int height)
+    {
+        using Terminal terminal = new(null, width, height, SamplePlan.For);
+        terminal.Press("F6").Retype("hole 25H7 x40 thrugh Ra0.8 C45 2O0off");
+        terminal.Text.Should().Contain("── hole 25 mm H7; answer to: hole 25H7 x40 thru ").And.Contain(" max  25.021 mm").And.Contain(" aim  25.0105 mm").And.Contain(" min  25.000 mm");
+        string shown = terminal.Text;
+        for (int i = 0; i < 3; i++)
+        {
+            shown += terminal.Press("PageDown").Text;
+        }
+
+        shown.Should().Contain("── 2 problems in the line ──").And.Contain(" thrugh     'thrugh' is not").And.Contain(" 2O0off     '2O0off' is not");
+        terminal.Retype("hole 25H7").Text.Should().Contain("── notes ──").And.NotContain("problems");
+    }
+
+    [Fact]
+    public void Problems_are_listed_before_there_is_any_answer()
+    {
+        using Terminal terminal = new(new ScreenOptions { Line = "" });
+        terminal.Type("fooo baar").Text.Should().Contain(" fooo       'fooo'").And.Contain(" baar       'baar'");
+    }
+
+    [Fact]
+    public void A_click_on_a_listed_problem_chooses_no_operation()
+    {
+        using Terminal terminal = new(null, 60, 16, SamplePlan.For);
+        terminal.Retype("hole 25H7 x40 thrugh Ra0.8 C45 2O0off");
+        for (int y = Enumerable.Range(0, 16).First(row => terminal.Row(row).Contains("problems in the line", StringComparison.Ordinal)); y < 15; y++)
+        {
+            terminal.Click(5, y).Bench.Hand.Should().Be(Hand.Line);
+        }
+    }
+
+    [Fact]
+    public void A_refusal_is_told_above_the_notes()
+    {
+        using Terminal terminal = new(new ScreenOptions { Line = "hole 25H3 Ra0.1 C45" }, plan: SamplePlan.For);
+        terminal.Press("F6").Text.Should().Contain("── no route: No process of this shop finishes 25 H3. ──").And.Contain("── notes ──").And.Contain("cut in solid metal");
+    }
+
+    [Fact]
+    public void A_line_read_back_is_shown_whole_on_eighty_columns()
+    {
+        using Terminal terminal = new(new ScreenOptions { Line = "shaft 35 k6 x28 Ra 0.8 42CrMo4 28HRC interrupted runout 0.01 coax 0.02 bar 40 40 off" }, plan: SamplePlan.For);
+        terminal.Bench.Problems.Should().BeEmpty();
+        terminal.Row(1).Should().StartWith("shaft 35 mm k6, 42CrMo4, 28 HRC, 28 mm long, interrupted, Ra 0.8 µm, run-out", "it goes on below");
+        terminal.Row(2).Should().EndWith("from bar 40 mm, 40 off");
+        terminal.Row(3).Should().StartWith("! Typical values");
+        terminal.Row(4).Should().StartWith("── shaft 35 mm k6");
+        terminal.Row(5).Should().StartWith(" max  35.018 mm");
+    }
+
+    [Fact]
+    public void What_both_features_of_a_fit_have_is_said_once()
+    {
+        using Terminal terminal = new(new ScreenOptions { Line = "40 H7/k6 x30 Ra0.8 C45 200 off" }, plan: SamplePlan.For);
+        terminal.Row(1).Should().Be("hole 40 mm H7, 30 mm deep with shaft 40 mm k6, 30 mm long, both C45, Ra 0.8 µm,");
+        terminal.Row(2).Should().Be("200 off");
     }
 
     [Fact]
@@ -135,7 +201,7 @@ public class BenchViewTests
     {
         using Terminal terminal = new(new ScreenOptions { Line = "" });
         terminal.Type("日本 25H7 fooo");
-        terminal.Row(1).Should().Be(new string(' ', BenchPage.FieldColumn) + "^^^^" + new string(' ', 6) + "^^^^", "two letters take four cells");
+        terminal.Row(1).Should().Be(new string(' ', BenchPage.FieldColumn) + "^^^^" + new string(' ', 6) + "~~~~", "two letters take four cells");
     }
 
     [Fact]

@@ -134,11 +134,32 @@ public class KeyChartTests
     public void The_help_scrolls_to_its_end_and_back()
     {
         using Terminal terminal = Begin();
-        terminal.Press("F1", "Down").Row(1).Should().NotContain("The line takes");
-        terminal.Press("Up").Row(1).Should().Contain("The line takes");
-        terminal.Press([.. Enumerable.Repeat("PageDown", 30)]).Text.Should().NotContain("more lines");
-        terminal.Press("PageUp").Text.Should().Contain("more lines");
+        terminal.Press("F1").Row(1).Should().Contain("Keys everywhere");
+        terminal.Press("Down").Row(1).Should().NotContain("Keys everywhere");
+        terminal.Press("Up").Row(1).Should().Contain("Keys everywhere");
+        terminal.Press([.. Enumerable.Repeat("PageDown", 30)]).Text.Should().NotContain("more: Down");
+        terminal.Press("PageUp").Text.Should().Contain("more: Down");
         terminal.Press("Enter").Bench.Page.Should().Be(Page.Bench);
+    }
+
+    [Fact]
+    public void Tab_leads_from_the_keys_to_the_words_of_the_line_and_back()
+    {
+        using Terminal terminal = Begin();
+        terminal.Press("F1").Text.Should().Contain("Esc back  Tab words of the line");
+        terminal.Press("Tab").Row(0).Should().StartWith("── help: words of the line");
+        terminal.Row(1).Should().Contain("The line takes");
+        terminal.Text.Should().Contain("Esc back  Tab keys");
+        terminal.Press("Tab").Row(0).Should().StartWith("── help: keys");
+        terminal.Press("Tab", "Esc").Bench.Page.Should().Be(Page.Bench);
+    }
+
+    [Fact]
+    public void On_eighty_columns_the_help_begins_with_the_keys_of_the_screen_and_the_line()
+    {
+        using Terminal terminal = Begin();
+        terminal.Resize(80, 24).Press("F1");
+        KeyChart.Everywhere.Concat(KeyChart.OnLine).Should().AllSatisfy(stroke => terminal.Text.Should().Contain(stroke.Does));
     }
 
     [Fact]

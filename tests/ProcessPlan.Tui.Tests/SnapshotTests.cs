@@ -6,6 +6,7 @@ namespace ProcessPlan.Tui.Tests;
 public class SnapshotTests
 {
     private const string Fit = "40 H7/k6 C45";
+    private const string LongFit = "40 H7/k6 x30 Ra0.8 42CrMo4 28HRC interrupted cyl 0.01 200 off";
     private const string Refused = "hole 25H3 Ra0.1 C45";
     private const string Wrong = "hole 25H7 x40 thrugh Ra0.8 C45 2O0off";
 
@@ -50,6 +51,22 @@ public class SnapshotTests
 
     [Theory]
     [MemberData(nameof(Sizes))]
+    public void A_refusal_is_seen_above_the_notes_too(int width, int height)
+    {
+        using Terminal terminal = Open(width, height, Refused);
+        Looks(terminal.Press("F6"), "refusal notes");
+    }
+
+    [Theory]
+    [MemberData(nameof(Sizes))]
+    public void A_long_fit_is_read_back_whole(int width, int height)
+    {
+        using Terminal terminal = Open(width, height, LongFit);
+        Looks(terminal, "long fit");
+    }
+
+    [Theory]
+    [MemberData(nameof(Sizes))]
     public void Inches_are_shown_for_the_whole_screen(int width, int height)
     {
         using Terminal terminal = Open(width, height);
@@ -86,6 +103,14 @@ public class SnapshotTests
     {
         using Terminal terminal = Open(width, height);
         Looks(terminal.Press("F1"), "help");
+    }
+
+    [Theory]
+    [MemberData(nameof(Sizes))]
+    public void The_words_of_the_line_are_one_key_away(int width, int height)
+    {
+        using Terminal terminal = Open(width, height);
+        Looks(terminal.Press("F1", "Tab"), "words");
     }
 
     [Theory]

@@ -36,35 +36,62 @@ internal static class BenchPage
         }
 
         sheet.WriteBefore(sheet.Width - 1, 0, ruler.Name, Ink.Heading);
-        DrawAnswer(sheet, bench, ruler);
+        Reading reading = Reading.Of(sheet, bench, line, ruler);
+        int below = DrawAnswer(sheet, bench, reading.Rows, ruler);
         if (!bench.IsCurrent)
         {
-            sheet.Fade(SizeRow, sheet.Height - SizeRow - 1);
+            sheet.Fade(reading.Rows, sheet.Height - reading.Rows - 1);
         }
 
-        DrawReading(sheet, bench, line, ruler);
+        DrawReading(sheet, bench, line, reading);
+        DrawProblems(sheet, bench, reading, below);
         DrawKeys(sheet, bench);
     }
 
-    /// <summary>The two rows below the line: what is wrong with it, or how it was read and the first question or caution.</summary>
-    private static void DrawReading(Sheet sheet, Bench bench, LineSight line, Ruler ruler)
+    /// <summary>The text below the line, and how many rows the line and its text take: as many with a problem as without, where that is possible.</summary>
+    /// <param name="Told">The problem that is told.</param>
+    /// <param name="Lines">The problem, or how the line was read.</param>
+    /// <param name="Rows">First row of the size.</param>
+    private sealed record Reading(Problem? Told, IReadOnlyList<string> Lines, int Rows)
     {
-        if (bench.ProblemNear(line.Caret) is { } problem)
+        private const int RoomyHeight = 20;
+        private const int MostLines = 2;
+
+        public static Reading Of(Sheet sheet, Bench bench, LineSight line, Ruler ruler)
         {
-            foreach (Problem marked in bench.Problems)
+            List<string> said = bench.Answer is { } answer ? [.. sheet.Wrap(ReadBack.Say(answer.Request, ruler), sheet.Width)] : [];
+            int rows = SizeRow + (said.Count > 1 && sheet.Height >= RoomyHeight ? 1 : 0);
+            if (bench.ProblemTold(line.Caret) is { } told)
             {
-                DrawMarks(sheet, marked, line);
+                string others = bench.Problems.Count > 1 ? $" (and {bench.Problems.Count - 1} more)" : "";
+                List<string> lines = [.. sheet.Wrap($"{told.Message} Expected: {told.Expected}{others}", sheet.Width)];
+                return new Reading(told, lines, Math.Max(rows, SizeRow + (lines.Count > 1 ? 1 : 0)));
             }
 
-            string others = bench.Problems.Count > 1 ? $" (and {bench.Problems.Count - 1} more)" : "";
-            string text = $"{problem.Message} Expected: {problem.Expected}{others}";
-            List<string> lines = [.. sheet.Wrap(text, sheet.Width)];
-            for (int i = 0; i < lines.Count && i < 2; i++)
+            // Where the size cannot give a row, the row of a caution is taken: it stands in the notes too. A question keeps its own.
+            int most = rows > SizeRow || bench.Plan is { Queries.Count: 0 } ? MostLines : 1;
+            return new Reading(null, said, rows) { Most = most };
+        }
+
+        /// <summary>Lines that are shown.</summary>
+        public int Most { get; private init; } = MostLines;
+
+        /// <summary>Whether something of a problem is not said below the line.</summary>
+        public bool HidesProblems(Bench bench) => Told is not null && (bench.Problems.Count > 1 || Lines.Count > Most);
+    }
+
+    /// <summary>The rows below the line: what is wrong with it, or how it was read and the first question or caution.</summary>
+    private static void DrawReading(Sheet sheet, Bench bench, LineSight line, Reading reading)
+    {
+        if (reading.Told is { } told)
+        {
+            foreach (Problem other in bench.Problems)
             {
-                sheet.Write(0, 2 + i, i == 1 && lines.Count > 2 ? sheet.Shorten($"{lines[1]} {lines[2]}", sheet.Width) : lines[i].PadRight(sheet.Width), Ink.Problem);
+                DrawMarks(sheet, other, line, '~');
             }
 
-            DrawStale(sheet, bench, lines.Count > 1 ? SizeRow + 1 : SizeRow);
+            DrawMarks(sheet, told, line, '^');
+            WriteLines(sheet, SizeRow - 1, reading, Ink.Problem);
             return;
         }
 
@@ -75,15 +102,50 @@ internal static class BenchPage
             return;
         }
 
-        sheet.Write(0, 1, sheet.Shorten(string.Join("  with  ", bench.Answer.Request.Features.Select(feature => ReadBack.Say(feature, ruler))), sheet.Width));
+        int row = 1 + WriteLines(sheet, 1, reading, Ink.Plain);
+        if (row >= reading.Rows)
+        {
+            return;
+        }
+
         if (bench.Plan!.Queries is [string query, ..])
         {
-            sheet.Write(0, 2, sheet.Shorten("? " + query, sheet.Width), Ink.Caution);
+            sheet.Write(0, row, sheet.Shorten("? " + query, sheet.Width), Ink.Caution);
         }
         else if (bench.Plan.Cautions is [string caution, ..])
         {
-            sheet.Write(0, 2, sheet.Shorten("! " + caution, sheet.Width), Ink.Caution);
+            sheet.Write(0, row, sheet.Shorten("! " + caution, sheet.Width), Ink.Caution);
         }
+    }
+
+    /// <returns>How many.</returns>
+    private static int WriteLines(Sheet sheet, int row, Reading reading, Ink ink)
+    {
+        int count = Math.Min(reading.Lines.Count, reading.Most);
+        for (int at = 0; at < count; at++)
+        {
+            string rest = at == count - 1 ? string.Join(' ', reading.Lines.Skip(at)) : reading.Lines[at];
+            sheet.Write(0, row + at, sheet.Shorten(rest, sheet.Width), ink);
+        }
+
+        return count;
+    }
+
+    /// <summary>Every problem, in place of the lower text; where that has no room, over the old route: a line to be mended has none of its own.</summary>
+    private static void DrawProblems(Sheet sheet, Bench bench, Reading reading, int below)
+    {
+        if (!reading.HidesProblems(bench))
+        {
+            return;
+        }
+
+        List<Said> said = [.. LowerText.Problems(bench.Text, bench.Problems)];
+        int bottom = sheet.Height - 1;
+        int wanted = 1 + LowerText.Lines(sheet, said).Count();
+        int highest = bench.Answer is null ? reading.Rows : reading.Rows + Room.Numbers;
+        int row = Math.Clamp(bottom - wanted, highest, Math.Max(highest, Math.Min(below, bottom - 1)));
+        sheet.Clear(row, bottom - row);
+        DrawText(sheet, row, bottom - row, bench, bench.Problems.Count == 1 ? "1 problem in the line" : $"{bench.Problems.Count} problems in the line", Ink.Problem, said);
     }
 
     private static void DrawStale(Sheet sheet, Bench bench, int row)
@@ -94,26 +156,27 @@ internal static class BenchPage
         }
     }
 
-    private static void DrawMarks(Sheet sheet, Problem problem, LineSight line)
+    private static void DrawMarks(Sheet sheet, Problem problem, LineSight line, char mark)
     {
         int from = line.ColumnOf(problem.At);
         int to = Math.Max(from + 1, line.ColumnOf(problem.At + problem.Length));
         for (int column = Math.Max(from, line.From); column < Math.Min(to, line.To); column++)
         {
-            sheet.Put(column, 1, '^', Ink.Problem);
+            sheet.Put(column, 1, mark, Ink.Problem);
         }
     }
 
-    private static void DrawAnswer(Sheet sheet, Bench bench, Ruler ruler)
+    /// <returns>The first row of the lower text.</returns>
+    private static int DrawAnswer(Sheet sheet, Bench bench, int row, Ruler ruler)
     {
         if (bench is not { Answer: { } answer, Feature: { } feature, Plan: { } plan })
         {
-            return;
+            return row;
         }
 
-        Room room = Room.Of(sheet.Height, bench);
-        DrawSize(sheet, SizeRow, room.Size, bench, answer, feature, ruler);
-        int row = SizeRow + room.Size;
+        Room room = Room.Of(sheet.Height - row, bench);
+        DrawSize(sheet, row, room.Size, bench, answer, feature, ruler);
+        row += room.Size;
         if (bench.Route is { } route)
         {
             DrawRoute(sheet, row, room.Operations, bench, plan, route, ruler);
@@ -121,20 +184,23 @@ internal static class BenchPage
         }
 
         DrawBelow(sheet, row, sheet.Height - 1 - row, bench, plan);
+        return row;
     }
 
     /// <summary>How the rows are shared out: the size takes its picture, the route its operations, and the text below gets the rest.</summary>
     private readonly record struct Room(int Size, int Operations)
     {
-        private const int Numbers = 5;
+        public const int Numbers = 5;
+
+        private const int TallHeight = 27;
 
         public static Room Of(int height, Bench bench)
         {
-            int rows = height - SizeRow - 1;
+            int rows = height - 1;
             int operations = bench.Route?.Operations.Count ?? 0;
             int shown = Math.Max(2, Math.Min(operations, rows - Numbers - 3 - LeastBelow));
-            int picture = 1 + 1 + bench.Answer!.Plans.Count + 1 + operations + (height > 30 ? 1 : 0);
-            int left = rows - 3 - shown - LeastBelow - (height > 30 ? 4 : 0);
+            int picture = 1 + 1 + bench.Answer!.Plans.Count + 1 + operations + (height > TallHeight ? 1 : 0);
+            int left = rows - 3 - shown - LeastBelow - (height > TallHeight ? 4 : 0);
             return new Room(Math.Max(Numbers, Math.Min(picture, Math.Min(left, rows / 2))), operations == 0 ? 0 : shown);
         }
     }
@@ -144,7 +210,8 @@ internal static class BenchPage
         string grade = feature.Class is { } toleranceClass ? toleranceClass.Grade.ToString() : feature.NearestGrade is { } near ? $"as {near}" : "beyond IT18";
         string fit = answer.Request.Mate is { } mate ? FitText(new Fit(answer.Request.First.Limits, mate.Limits), ruler) : "";
         bool fitHasRow = rows > 5;
-        sheet.Rule(row, $"{ReadBack.Name(feature, ruler)}{(feature.IsRound ? "" : ", width")}{(fit.Length > 0 && !fitHasRow ? ", " + fit : "")}");
+        string old = bench.Problems.Count > 0 ? $"; answer to: {answer.Line}" : "";
+        int titleEnd = sheet.Rule(row, $"{ReadBack.Name(feature, ruler)}{(feature.IsRound ? "" : ", width")}{(fit.Length > 0 && !fitHasRow ? ", " + fit : "")}{old}");
         (string max, string min) = ruler.Limits(feature.Limits);
         string aim = ruler.Aim(Aim(bench, feature), feature.Limits);
         WriteSize(sheet, row + 1, "max", max, ruler, ruler.Upper(feature.Upper));
@@ -164,7 +231,7 @@ internal static class BenchPage
 
         int width = sheet.Width - NumbersWidth - 1;
         List<Feature> zones = [.. answer.Request.Features];
-        ZonePicture.Draw(sheet, NumbersWidth, row, width, zones, Aim(bench, feature), bench.FeatureAt, ruler);
+        ZonePicture.Draw(sheet, NumbersWidth, row, width, zones, Aim(bench, feature), bench.FeatureAt, ruler, titleEnd);
         if (bench.Route is { } route)
         {
             int chain = row + 1 + zones.Count;
@@ -257,6 +324,12 @@ internal static class BenchPage
 
         if (bench.Below == Below.Notes)
         {
+            if (plan.Refusal is { } refusal && bench.Route is null && rows > 2)
+            {
+                sheet.Rule(row++, $"no route: {refusal.Message}", Ink.Problem);
+                rows--;
+            }
+
             DrawText(sheet, row, rows, bench, "notes", Ink.Heading, LowerText.Notes(plan));
             return;
         }

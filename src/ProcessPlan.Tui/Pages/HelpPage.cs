@@ -2,7 +2,7 @@ using ProcessPlan.Tui.Paper;
 
 namespace ProcessPlan.Tui.Pages;
 
-/// <summary>The words of the feature line with examples, and every key.</summary>
+/// <summary>Every key, and the words of the feature line with examples.</summary>
 internal static class HelpPage
 {
     private const int HeadWidth = 12;
@@ -36,26 +36,36 @@ internal static class HelpPage
         ("lot", "200 off"),
     ];
 
-    public static void DrawHelp(Sheet sheet, Bench bench) => Draw(sheet, bench, "help",
+    /// <summary>The keys that are needed first, then the words of the line.</summary>
+    public static void DrawHelp(Sheet sheet, Bench bench) => Draw(sheet, bench, "help: keys", "words of the line", [.. FirstKeys(), Blank, .. Line(), Blank, .. OtherKeys()]);
+
+    /// <summary>The words of the line, then the keys.</summary>
+    public static void DrawWords(Sheet sheet, Bench bench) => Draw(sheet, bench, "help: words of the line", "keys", [.. Line(), Blank, .. FirstKeys(), .. OtherKeys()]);
+
+    public static void DrawKeys(Sheet sheet, Bench bench) => Draw(sheet, bench, "keys", "words of the line", [.. FirstKeys(), .. OtherKeys()]);
+
+    private static readonly Said Blank = new("", "");
+
+    private static IEnumerable<Said> Line() =>
     [
         new Said("", "The line takes a feature as it is spoken, in any order.", Ink.Strong),
         .. Words.Select(static word => new Said(word.Part, word.Written)),
-        new Said("", ""),
+        Blank,
         new Said("", "Examples", Ink.Strong),
         .. Examples.Select(static (example, at) => new Said(at == 0 ? "line" : "", example)),
-        new Said("", ""),
-        .. Keys(),
-    ]);
+    ];
 
-    public static void DrawKeys(Sheet sheet, Bench bench) => Draw(sheet, bench, "keys", [.. Keys()]);
-
-    private static IEnumerable<Said> Keys() =>
+    private static IEnumerable<Said> FirstKeys() =>
     [
         new Said("", "Keys everywhere (a letter does the same outside the line)", Ink.Strong),
         .. Of(KeyChart.Everywhere),
         new Said("", "Keys on the line", Ink.Strong),
         .. Of(KeyChart.OnLine),
         .. KeyChart.InText.Select(static key => new Said(key.Key, key.Does)),
+    ];
+
+    private static IEnumerable<Said> OtherKeys() =>
+    [
         new Said("", "Keys on the route", Ink.Strong),
         .. Of(KeyChart.OnRoute),
         new Said("", "Keys on the big digits", Ink.Strong),
@@ -67,7 +77,7 @@ internal static class HelpPage
     private static IEnumerable<Said> Of(IEnumerable<Stroke> strokes) =>
         strokes.Select(static stroke => new Said(stroke.Letter is { } letter ? $"{stroke.Key}, {letter}" : stroke.Key, stroke.Does));
 
-    private static void Draw(Sheet sheet, Bench bench, string title, IReadOnlyList<Said> said)
+    private static void Draw(Sheet sheet, Bench bench, string title, string other, IReadOnlyList<Said> said)
     {
         sheet.Rule(0, title);
         List<(string Head, string Line, Ink Ink)> lines = [];
@@ -91,7 +101,7 @@ internal static class HelpPage
         }
 
         int hidden = lines.Count - bench.Scroll - rows;
-        string more = hidden > 0 ? $"  {hidden} more lines: Down, PageDown" : "";
-        sheet.Write(0, sheet.Height - 1, sheet.Shorten($"Esc back{more}", sheet.Width), Ink.Faint);
+        string more = hidden > 0 ? $"  {hidden} more: Down, PageDown" : "";
+        sheet.Write(0, sheet.Height - 1, sheet.Shorten($"Esc back  Tab {other}{more}", sheet.Width), Ink.Faint);
     }
 }

@@ -1,5 +1,6 @@
 using ProcessPlan.Core;
 using ProcessPlan.Core.Routing;
+using ProcessPlan.Core.Text;
 using ProcessPlan.Core.Values;
 using ProcessPlan.Tui.Paper;
 
@@ -46,6 +47,13 @@ internal static class LowerText
         new Said("best", refusal.Best),
         .. refusal.WouldOpen.Select(static way => new Said("would open", way)),
     ];
+
+    /// <summary>Every problem of a line, each headed by the piece of it that is meant.</summary>
+    public static IEnumerable<Said> Problems(string line, IEnumerable<Problem> problems) => problems.Select(problem =>
+    {
+        string piece = line.Substring(Math.Min(problem.At, line.Length), Math.Clamp(line.Length - problem.At, 0, problem.Length)).Trim();
+        return new Said(piece.Length < HeadWidth - 1 ? piece : piece[..(HeadWidth - 3)] + "…", $"{problem.Message} Expected: {problem.Expected}", Ink.Problem);
+    });
 
     public static IEnumerable<Said> Notes(Plan plan) =>
     [

@@ -1,4 +1,3 @@
-using System.Text;
 using ProcessPlan.Core.Features;
 using ProcessPlan.Core.Values;
 using ProcessPlan.Tui.Paper;
@@ -12,11 +11,42 @@ internal static class ReadBack
         ? $"{feature.Kind.Word()} {ruler.Plain(feature.Nominal)} {ruler.Name} {toleranceClass}"
         : $"{feature.Kind.Word()} {ruler.Plain(feature.Nominal)} {ruler.Name}";
 
-    public static string Say(Feature feature, Ruler ruler)
+    /// <summary>The whole of what was read; of a fit, what both have is said once.</summary>
+    public static string Say(FeatureRequest request, Ruler ruler)
     {
-        StringBuilder said = new(Name(feature, ruler));
-        void Add(string text) => said.Append(", ").Append(text);
+        List<string> first = Parts(request.First, ruler);
+        if (request.Mate is not { } mate)
+        {
+            return string.Join(", ", first);
+        }
+
+        List<string> second = Parts(mate, ruler);
+        List<string> both = [.. first.Intersect(second)];
+        string names = $"{string.Join(", ", first.Except(both))} with {string.Join(", ", second.Except(both))}";
+        return both.Count == 0 ? names : $"{names}, both {string.Join(", ", both)}";
+    }
+
+    /// <summary>Its name first and what it is made of next, for these are never to be cut off.</summary>
+    private static List<string> Parts(Feature feature, Ruler ruler)
+    {
+        List<string> said = [Name(feature, ruler)];
+        void Add(string text) => said.Add(text);
         string Long(Length length) => $"{ruler.Plain(length)} {ruler.Name}";
+
+        if (feature.Material is { } material)
+        {
+            Add(material);
+        }
+
+        if (feature.Hardness is { } hardness)
+        {
+            Add(Hardness.Text(hardness, feature.HardnessTo));
+        }
+
+        if (feature.Treatment is { } treatment)
+        {
+            Add(Say(treatment, ruler));
+        }
 
         if (feature.Extent is { } extent)
         {
@@ -48,21 +78,6 @@ internal static class ReadBack
             Add(finish.Parameter == RoughnessParameter.Number ? finish.ToString() : $"{finish.Parameter} {ruler.Ra(finish)} {ruler.RaUnit}");
         }
 
-        if (feature.Material is { } material)
-        {
-            Add(material);
-        }
-
-        if (feature.Hardness is { } hardness)
-        {
-            Add(Hardness.Text(hardness, feature.HardnessTo));
-        }
-
-        if (feature.Treatment is { } treatment)
-        {
-            Add(Say(treatment, ruler));
-        }
-
         if (feature.Coating is { } coating)
         {
             Add($"{coating.Name} {ruler.Coat(coating.Least, coating.Most)} a side");
@@ -83,7 +98,7 @@ internal static class ReadBack
             Add($"{quantity} off");
         }
 
-        return said.ToString();
+        return said;
     }
 
     private static string Say(Treatment treatment, Ruler ruler)

@@ -17,7 +17,8 @@ internal static class ZonePicture
     /// <param name="aim">The size aimed at in the zone looked at.</param>
     /// <param name="lookedAt">Which of the zones has the aim.</param>
     /// <param name="ruler">The unit.</param>
-    public static void Draw(Sheet sheet, int x, int y, int width, IReadOnlyList<Feature> zones, Length aim, int lookedAt, Ruler ruler)
+    /// <param name="titleEnd">Column behind what stands already in the row of the zero mark.</param>
+    public static void Draw(Sheet sheet, int x, int y, int width, IReadOnlyList<Feature> zones, Length aim, int lookedAt, Ruler ruler, int titleEnd)
     {
         int left = zones.Max(zone => ruler.Lower(zone.Lower).Length) + 2;
         int right = zones.Max(zone => ruler.Upper(zone.Upper).Length) + 2;
@@ -33,7 +34,11 @@ internal static class ZonePicture
         int Column(Deviation deviation) => from + (int)((double)(deviation.Picometres - low) / Math.Max(1, high - low) * (columns - 1) + 0.5);
 
         int zero = Column(default);
-        sheet.Write(zero, y, "0", Ink.Faint);
+        if (zero > titleEnd)
+        {
+            sheet.Write(zero, y, "0", Ink.Faint);
+        }
+
         for (int row = 0; row < zones.Count; row++)
         {
             Feature zone = zones[row];

@@ -10,6 +10,26 @@ internal readonly record struct Ruler(LengthUnit Unit)
     private const int InchPlaces = 8;
     private const long PicometresPerInchPlace = Length.PicometresPerInch / 100_000_000; // 254 pm, exact
 
+    /// <summary>
+    /// The preferred values of Ra as drawings pair them, nanometres with microinches (ISO 1302 and ASME B46.1): a pair is one and the same requirement,
+    /// though its two figures differ by up to two in a hundred.
+    /// </summary>
+    private static readonly Dictionary<long, long> RaPairs = new()
+    {
+        [25] = 1,
+        [50] = 2,
+        [100] = 4,
+        [200] = 8,
+        [400] = 16,
+        [800] = 32,
+        [1_600] = 63,
+        [3_200] = 125,
+        [6_300] = 250,
+        [12_500] = 500,
+        [25_000] = 1000,
+        [50_000] = 2000,
+    };
+
     private static readonly Length MicroInch = new(Length.PicometresPerMicroinch);
     private static readonly Length Tenth = new(Length.PicometresPerMillimetre / 10_000);
     private static readonly Length[] InchSteps = [new(2_540_000), new(254_000), new(25_400), new(2_540), new(254)];
@@ -75,12 +95,24 @@ internal readonly record struct Ruler(LengthUnit Unit)
     /// <summary>A tolerance downwards, with its unit.</summary>
     public string Width(Deviation width) => Signed(width, up: false).TrimStart('+');
 
-    /// <summary>Roughness in µm, or downwards in µin, without its unit.</summary>
+    /// <summary>Roughness in µm, or in µin, without its unit: a preferred Ra by its pair, what was asked in whole µin as asked, all else downwards.</summary>
     public string Ra(Roughness roughness)
     {
         if (!IsInch)
         {
             return DecimalText.Format(roughness.Nanometres, 3);
+        }
+
+        if (roughness.IsRa && RaPairs.TryGetValue(roughness.Nanometres, out long paired))
+        {
+            return DecimalText.Format(paired, 0);
+        }
+
+        // Held to the nanometre below, a whole number of microinches is still told by it: 32 µin are held as 812 nm.
+        long whole = (roughness.Nanometres * 1000 + Length.PicometresPerMicroinch - 1) / Length.PicometresPerMicroinch;
+        if (whole * Length.PicometresPerMicroinch / 1000 == roughness.Nanometres)
+        {
+            return DecimalText.Format(whole, 0);
         }
 
         long tenths = roughness.Nanometres * 100_000 / Length.PicometresPerMicroinch / 10; // 1 nm = 1000 pm

@@ -59,17 +59,15 @@ internal sealed class Sheet
     }
 
     /// <summary>A line across the sheet, with a title standing in it.</summary>
-    public void Rule(int y, string title, Ink ink = Ink.Heading)
+    /// <returns>The column behind the title.</returns>
+    public int Rule(int y, string title, Ink ink = Ink.Heading)
     {
         for (int x = 0; x < Width; x++)
         {
             Put(x, y, Pen.Line, Ink.Faint);
         }
 
-        if (title.Length > 0)
-        {
-            Write(2, y, $" {Shorten(title, Width - 6)} ", ink);
-        }
+        return title.Length > 0 ? Write(2, y, $" {Shorten(title, Width - 6)} ", ink) : 0;
     }
 
     /// <summary>The text, or its beginning with an ellipsis where it is longer than <paramref name="width"/>.</summary>
@@ -94,6 +92,16 @@ internal sealed class Sheet
         }
 
         yield return rest;
+    }
+
+    /// <summary>Empties whole rows.</summary>
+    public void Clear(int fromRow, int rows)
+    {
+        for (int y = fromRow; y < fromRow + rows; y++)
+        {
+            Write(0, y, new string(' ', Width));
+            _operations.Remove(y);
+        }
     }
 
     /// <summary>Takes the ink from a part of the sheet, so that it reads as not valid now.</summary>

@@ -74,10 +74,37 @@ public class RulerTests
     }
 
     [Theory]
-    [InlineData(800, "0.8", "31")]
-    [InlineData(50, "0.05", "1.9")]
-    [InlineData(12_500, "12.5", "492")]
-    public void Roughness_rounds_downwards(long nanometres, string micrometres, string microinches)
+    [InlineData(25, "0.025", "1")]
+    [InlineData(50, "0.05", "2")]
+    [InlineData(100, "0.1", "4")]
+    [InlineData(200, "0.2", "8")]
+    [InlineData(400, "0.4", "16")]
+    [InlineData(800, "0.8", "32")]
+    [InlineData(1_600, "1.6", "63")]
+    [InlineData(3_200, "3.2", "125")]
+    [InlineData(6_300, "6.3", "250")]
+    [InlineData(12_500, "12.5", "500")]
+    [InlineData(25_000, "25", "1000")]
+    [InlineData(50_000, "50", "2000")]
+    public void A_preferred_roughness_is_shown_by_its_pair(long nanometres, string micrometres, string microinches) =>
+        Roughness_that_is_not_preferred_rounds_downwards(nanometres, micrometres, microinches);
+
+    [Theory]
+    [InlineData(812, "0.812", "32")]
+    [InlineData(3_175, "3.175", "125")]
+    [InlineData(406, "0.406", "16")]
+    public void Whole_microinches_are_shown_as_they_were_asked(long nanometres, string micrometres, string microinches) =>
+        Roughness_that_is_not_preferred_rounds_downwards(nanometres, micrometres, microinches);
+
+    [Fact]
+    public void Rz_has_no_pairs() => Inches.Ra(Roughness.Rz(6_300)).Should().Be("248");
+
+    [Theory]
+    [InlineData(801, "0.801", "31")]
+    [InlineData(799, "0.799", "31")]
+    [InlineData(60, "0.06", "2.3")]
+    [InlineData(12_510, "12.51", "492")]
+    public void Roughness_that_is_not_preferred_rounds_downwards(long nanometres, string micrometres, string microinches)
     {
         Millimetres.Ra(Roughness.Ra(nanometres)).Should().Be(micrometres);
         Inches.Ra(Roughness.Ra(nanometres)).Should().Be(microinches);
