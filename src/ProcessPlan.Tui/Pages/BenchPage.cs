@@ -255,10 +255,10 @@ internal static class BenchPage
 
     private static void DrawRoute(Sheet sheet, int row, int rows, Bench bench, Plan plan, Route route, Ruler ruler)
     {
-        string gap = route.Rank > 1 ? $", {new Money(route.CostPerPiece.Amount - plan.Routes[0].CostPerPiece.Amount, route.CostPerPiece.Currency).Format()} dearer" : "";
-        string currency = route.CostPerPiece.Currency;
-        Money lot = route.CostPerPiece with { Amount = route.CostPerPiece.Amount * plan.Job.Quantity };
-        sheet.Rule(row, $"route {route.Rank} of {plan.Routes.Count}{gap}: {route.CostPerPiece} a piece, {lot} for {plan.Job.Quantity}");
+        string gap = route.Rank > 1 ? $", {new Money(route.ShownCost.Amount - plan.Routes[0].ShownCost.Amount, route.ShownCost.Currency).Format()} dearer" : "";
+        string currency = route.ShownCost.Currency;
+        Money lot = route.ShownCost with { Amount = route.ShownCost.Amount * plan.Job.Quantity };
+        sheet.Rule(row, $"route {route.Rank} of {plan.Routes.Count}{gap}: {route.ShownCost} a piece, {lot} for {plan.Job.Quantity}");
         List<string[]> cells = [.. route.Operations.Select(operation => Cells(operation, ruler))];
         Table table = new(Columns(ruler, currency), cells, sheet.Width - 2, sheet.Pen);
         table.WriteHead(sheet, 2, row + 1);
