@@ -137,7 +137,7 @@ public class BenchViewTests
             shown += terminal.Press("PageDown").Text;
         }
 
-        shown.Should().Contain("── 2 problems in the line ──").And.Contain(" thrugh     'thrugh' is not").And.Contain(" 2O0off     '2O0off' is not");
+        shown.Should().Contain("── 2 problems in the line ──").And.Contain(" thrugh     'thrugh' is not").And.Contain(" 2O0off     '2O0off' is no material");
         terminal.Retype("hole 25H7").Text.Should().Contain("── notes ──").And.NotContain("problems");
     }
 

@@ -64,7 +64,8 @@ internal ref partial struct FeatureLineReader
         const int Least = 5;
         Place place = new(_at, WordEnd(_at) - _at);
         ReadOnlySpan<char> word = At(place);
-        if (word.Length < Least || !char.IsLetter(word[0]) || !word.ContainsAnyInRange('0', '9') || _materials.Containing(word) is null)
+        // Roughness, fits and lengths glued to a class are met on every other line: they are no names, and the names are many.
+        if (word.Length < Least || word.ContainsAny("./,") || word[1..].ContainsAny('x', 'X') || !char.IsLetter(word[0]) || !word.ContainsAnyInRange('0', '9') || _materials.Containing(word) is null)
         {
             return false;
         }
