@@ -88,7 +88,7 @@ public sealed class PlanText(TextWriter target, LengthUnit? unit, WhyAsked? why)
     private void Write(Route route, Job job, UnitScale scale)
     {
         target.WriteLine(string.Create(CultureInfo.InvariantCulture,
-            $"{route.ShownCost} a piece, {route.MinutesPerPiece} a piece, set-up {route.SetUp.Value:0} min a lot of {job.Quantity}"));
+            $"{route.ShownCost} a piece, {route.ShownMinutes} a piece, set-up {route.SetUp.Value:0} min a lot of {job.Quantity}"));
         target.WriteLine(string.Create(CultureInfo.InvariantCulture,
             $"yield {route.Yield:0.0 %} by the spread of the handbook: start {route.Blanks}, from {route.From}"));
         foreach (Operation operation in route.Operations)

@@ -92,4 +92,7 @@ public sealed record Route(
 {
     /// <summary>The cost as it is printed: the sum of the operations' costs to the cent, so that the card adds up.</summary>
     public Money ShownCost => new(Operations.Sum(static operation => operation.Cost.Rounded), CostPerPiece.Currency);
+
+    /// <summary>The run time as it is printed: the sum of the operations' times to the hundredth of a minute, so that the card adds up.</summary>
+    public Minutes ShownMinutes => new(Operations.Sum(static operation => Math.Round(operation.Minutes.Value, 2, MidpointRounding.AwayFromZero)));
 }

@@ -283,7 +283,7 @@ internal static class BenchPage
         string hidden = rows < cells.Count ? $"{cells.Count} operations " : "";
         string yield = string.Create(CultureInfo.InvariantCulture, $"yield {route.Yield * 100:0.0} %");
         sheet.Write(2, row + 2 + rows,
-            sheet.Shorten($"{hidden}from {route.From}: start {route.Blanks}, {yield}, {route.MinutesPerPiece} a piece, set-up {route.SetUp}", sheet.Width - 2), Ink.Strong);
+            sheet.Shorten($"{hidden}from {route.From}: start {route.Blanks}, {yield}, {route.ShownMinutes} a piece, set-up {route.SetUp}", sheet.Width - 2), Ink.Strong);
     }
 
     private static Column[] Columns(Ruler ruler, string currency) =>
